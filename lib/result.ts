@@ -17,7 +17,7 @@ export function refuse<R extends Refusal>(refusal: R): { readonly ok: false; rea
 }
 
 /** The value of a result our own code has already made sure of; a refusal here is a broken promise and throws. */
-export function valueOf<T>(result: Result<T>): T {
+export function promised<T>(result: Result<T>): T {
   if (result.ok) return result.value;
   throw new Error(`refused where an answer was promised: ${JSON.stringify(result.refusal)}`);
 }
