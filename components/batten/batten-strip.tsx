@@ -34,8 +34,8 @@ export function BattenStrip({ unit, marks, mean, zero, span, className = "" }: B
     >
       <Wood along={along} span={span} />
       {zero === null ? null : <Zero x={along(zero)} />}
-      {marks.map((mark, index) => (
-        <Mark key={`${index}-${mark.value}`} x={along(mark.value)} label={mark.label} />
+      {marks.map((mark) => (
+        <Mark key={mark.label} x={along(mark.value)} label={mark.label} />
       ))}
       {mean === null ? null : <Mean x={along(mean)} text={`${shown(mean)} ${unit}`} />}
       <text x={14} y={88} className="fill-port font-bold text-[11px]">
