@@ -1,0 +1,38 @@
+import type { ReactNode, TdHTMLAttributes, ThHTMLAttributes } from "react";
+
+/** A table with its caption; wide ones scroll by themselves and never push the page. */
+export function DataTable({ caption, children, showCaption = false }: { caption: string; children: ReactNode; showCaption?: boolean }) {
+  return (
+    <section aria-label={caption} className="overflow-x-auto">
+      <table className="w-full border-collapse text-left text-base">
+        <caption className={showCaption ? "pb-2 text-left font-bold text-small" : "sr-only"}>{caption}</caption>
+        {children}
+      </table>
+    </section>
+  );
+}
+
+type Align = { figure?: boolean };
+
+export function ColumnHead({ figure, className = "", ...rest }: ThHTMLAttributes<HTMLTableCellElement> & Align) {
+  return (
+    <th
+      scope="col"
+      className={`border-ink-line border-b-2 px-2 py-1.5 align-bottom font-bold text-small ${figure ? "text-right" : ""} ${className}`}
+      {...rest}
+    />
+  );
+}
+
+export function RowHead({ className = "", ...rest }: ThHTMLAttributes<HTMLTableCellElement>) {
+  return <th scope="row" className={`border-ink-line border-b px-2 py-1.5 font-bold ${className}`} {...rest} />;
+}
+
+export function Cell({ figure, className = "", ...rest }: TdHTMLAttributes<HTMLTableCellElement> & Align) {
+  return (
+    <td
+      className={`border-ink-line border-b px-2 py-1.5 ${figure ? "whitespace-nowrap text-right font-mono" : ""} ${className}`}
+      {...rest}
+    />
+  );
+}
