@@ -1,0 +1,41 @@
+import { decimalsFor, figure, signedFigure } from "@/lib/report/rounding";
+
+type Digits = { uncertainty: number; decimals?: never } | { decimals: number; uncertainty?: never };
+export type QuantityProps = Digits & {
+  /** null where it is not known: shown as a dash, said as words */
+  value: number | null;
+  unit: string;
+  /** residuals, trim and heel always show their sign */
+  signed?: boolean;
+  className?: string;
+};
+
+/** The one way out for a number: its digits follow the uncertainty, its unit stands beside it. */
+export function Quantity({ value, unit, signed = false, className = "", ...digits }: QuantityProps) {
+  if (value === null) return <Unknown className={className} />;
+  return (
+    <span className={`whitespace-nowrap font-mono ${className}`}>
+      {quantityFigure(value, digits, signed)}
+      {unit === "" ? null : <span className="font-sans text-[0.8em]"> {unit}</span>}
+    </span>
+  );
+}
+
+/** The same digits as a text, for labels that are spoken. */
+export function quantityInWords({ value, unit, signed = false, ...digits }: QuantityProps): string {
+  return value === null ? "not known" : `${quantityFigure(value, digits, signed)} ${unit}`.trim();
+}
+
+function quantityFigure(value: number, { decimals, uncertainty }: Digits, signed: boolean): string {
+  const places = decimals ?? decimalsFor(uncertainty ?? 0);
+  return signed ? signedFigure(value, places) : figure(value, places);
+}
+
+function Unknown({ className }: { className: string }) {
+  return (
+    <span className={className}>
+      <span aria-hidden="true">–</span>
+      <span className="sr-only">not known</span>
+    </span>
+  );
+}
