@@ -1,0 +1,37 @@
+import type { UseFormReturn } from "react-hook-form";
+import { QuantityField } from "@/components/ui/quantity-field";
+import type { PositionsRead, PositionsTyped } from "./positions-form";
+
+const axes = [
+  { axis: "x", label: "forward of AP" },
+  { axis: "y", label: "to starboard" },
+  { axis: "z", label: "above baseline" },
+] as const;
+
+/** One weight's centre: x, y, z. */
+export function PositionRow({
+  weight,
+  index,
+  form,
+}: {
+  weight: string;
+  index: number;
+  form: UseFormReturn<PositionsTyped, unknown, PositionsRead>;
+}) {
+  const errors = form.formState.errors.rows?.[index];
+  return (
+    <fieldset className="grid grid-cols-3 gap-2">
+      <legend className="mb-1 font-bold text-small">Weight {weight}</legend>
+      {axes.map(({ axis, label }) => (
+        <QuantityField
+          key={axis}
+          id={`position-${index}-${axis}`}
+          label={`${axis}, ${label}`}
+          unit="m"
+          error={errors?.[axis]?.message}
+          {...form.register(`rows.${index}.${axis}`)}
+        />
+      ))}
+    </fieldset>
+  );
+}
