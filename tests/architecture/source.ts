@@ -1,4 +1,4 @@
-import { type ESTree, parseSync } from "vite";
+import { type ESTree, type ParseResult, parseSync } from "vite";
 import type { TextFile } from "./project";
 
 export type Node = ESTree.Node;
@@ -12,7 +12,7 @@ export type Placed = { readonly node: Node; readonly parent: Node | null };
 export type Source = TextFile & {
   readonly program: ESTree.Program;
   readonly nodes: readonly Placed[];
-  readonly comments: readonly ESTree.Comment[];
+  readonly comments: ParseResult["comments"];
 };
 
 /** What a rule found, where. An empty list is a rule that holds. */

@@ -1,0 +1,97 @@
+import { type ChildProcess, spawn } from "node:child_process";
+import { once } from "node:events";
+import { mkdtemp, rm } from "node:fs/promises";
+import { tmpdir } from "node:os";
+import path from "node:path";
+import { setTimeout as sleep } from "node:timers/promises";
+import { fileURLToPath } from "node:url";
+import { freePort } from "./free-port";
+
+const root = fileURLToPath(new URL("../..", import.meta.url));
+const patience = 30_000;
+
+/** The production build on a port and a data folder of its own, to be stopped, killed and started again at will. */
+export class ProductServer {
+  private constructor(
+    readonly port: number,
+    readonly dataFolder: string,
+  ) {}
+
+  private child: ChildProcess | null = null;
+  private output = "";
+
+  /** A server that is not started yet, on an empty data folder. */
+  static async make(): Promise<ProductServer> {
+    return new ProductServer(await freePort(), await mkdtemp(path.join(tmpdir(), "battenbook-data-")));
+  }
+
+  get url(): string {
+    return `http://localhost:${this.port}`;
+  }
+
+  /** What the server has written on its way. */
+  get log(): string {
+    return this.output;
+  }
+
+  /** Starts on the same port and data as before, and waits until it answers. */
+  async start(): Promise<void> {
+    const child = this.spawned(["node_modules/next/dist/bin/next", "start", "--port", String(this.port)]);
+    this.child = child;
+    const deadline = Date.now() + patience;
+    while (!(await this.answers())) {
+      if (child.exitCode !== null || Date.now() > deadline) throw new Error(`the server does not answer:\n${this.output}`);
+      await sleep(100);
+    }
+  }
+
+  /** Runs one of the project's TypeScript commands on this server's data. */
+  async command(file: string, ...args: string[]): Promise<void> {
+    const child = this.spawned(["node_modules/tsx/dist/cli.mjs", "--conditions=react-server", file, ...args]);
+    const [code] = await once(child, "exit");
+    if (code !== 0) throw new Error(`${file} ended with ${code}:\n${this.output}`);
+  }
+
+  /** Asks the server to end, and waits until it has. */
+  async stop(): Promise<void> {
+    await this.end("SIGTERM");
+  }
+
+  /** Ends the server in the middle of whatever it is doing. */
+  async kill(): Promise<void> {
+    await this.end("SIGKILL");
+  }
+
+  async remove(): Promise<void> {
+    await this.kill();
+    await rm(this.dataFolder, { recursive: true, force: true, maxRetries: 5 });
+  }
+
+  private async end(signal: NodeJS.Signals): Promise<void> {
+    const child = this.child;
+    this.child = null;
+    if (child?.pid === undefined || child.exitCode !== null || child.signalCode !== null) return;
+    const ended = once(child, "exit");
+    // a group of its own, so that no worker of the server outlives it
+    process.kill(-child.pid, signal);
+    await ended;
+  }
+
+  private spawned(args: readonly string[]): ChildProcess {
+    const env = { ...process.env, NODE_ENV: "production" as const, BATTENBOOK_DATA: this.dataFolder, NEXTAUTH_URL: this.url };
+    const child = spawn(process.execPath, args, { cwd: root, env, detached: true, stdio: ["ignore", "pipe", "pipe"] });
+    for (const stream of [child.stdout, child.stderr]) stream?.on("data", (chunk) => this.hear(String(chunk)));
+    return child;
+  }
+
+  private hear(chunk: string): void {
+    this.output += chunk;
+  }
+
+  private answers(): Promise<boolean> {
+    return fetch(`${this.url}/manifest.webmanifest`).then(
+      (response) => response.ok,
+      () => false,
+    );
+  }
+}
