@@ -37,7 +37,7 @@ export function codeNames(text: string): readonly string[] {
   return [...text.matchAll(/`([^`]+)`/g)].map((match) => match[1] ?? "");
 }
 
-/** The blocks of a document: paragraphs, headings, lists, fenced code. */
+/** What empty lines set apart: paragraphs, headings, lists, fenced code without an empty line. */
 export function blocksOf(markdown: string): readonly string[] {
-  return markdown.trim().split(/\n{2,}(?![^`]*\n```\n)/);
+  return markdown.trim().split(/\n{2,}/);
 }
