@@ -3,11 +3,12 @@
 import { zodResolver } from "@hookform/resolvers/zod";
 import { useForm } from "react-hook-form";
 import { z } from "zod";
+import { typedNumber } from "@/components/readings/pad/typed-number";
 import { Button } from "@/components/ui/button";
 import { ChoiceField } from "@/components/ui/choice-field";
+import { numberSchema } from "@/components/ui/number-schema";
 import { QuantityField } from "@/components/ui/quantity-field";
 import { TextField } from "@/components/ui/text-field";
-import { numberFromText, typedNumber } from "@/components/ui/typed-number";
 import { conditionValueSchema } from "@/lib/record/readings-schema";
 
 export type Conditions = z.infer<typeof conditionValueSchema>;
@@ -17,11 +18,11 @@ const schema = z
   .object({
     wind: z.string().transform(optional),
     moorings: z.string().transform(optional),
-    underKeel: z.union([z.literal("").transform(() => undefined), typedNumber({ least: 0, most: 200 })]),
+    underKeel: z.union([z.literal("").transform(() => undefined), numberSchema({ least: 0, most: 200 })]),
     headcount: z
       .string()
-      .refine((typed) => typed.trim() === "" || Number.isInteger(numberFromText(typed)), "People are counted in whole numbers.")
-      .transform((typed) => numberFromText(typed) ?? undefined),
+      .refine((typed) => typed.trim() === "" || Number.isInteger(typedNumber(typed)), "People are counted in whole numbers.")
+      .transform((typed) => typedNumber(typed) ?? undefined),
     bobFree: z.enum(["", "yes", "no"]).transform((typed) => (typed === "" ? undefined : typed === "yes")),
     note: z.string().transform(optional),
   })
@@ -34,7 +35,7 @@ export function ConditionsForm({ move, onSeen }: { move: number; onSeen: (seen: 
   const form = useForm<z.input<typeof schema>, unknown, z.output<typeof schema>>({ resolver: zodResolver(schema), defaultValues: empty });
   const { errors } = form.formState;
   const save = form.handleSubmit(async (seen) => {
-    await onSeen(conditionValueSchema.parse(seen));
+    await onSeen(withoutGaps(seen));
     form.reset(empty);
   });
   return (
@@ -54,4 +55,9 @@ export function ConditionsForm({ move, onSeen }: { move: number; onSeen: (seen: 
       </div>
     </form>
   );
+}
+
+// an event's body has no place for what was not looked at
+function withoutGaps(seen: Conditions): Conditions {
+  return conditionValueSchema.parse(Object.fromEntries(Object.entries(seen).filter(([, value]) => value !== undefined)));
 }

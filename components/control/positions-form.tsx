@@ -4,7 +4,7 @@ import { zodResolver } from "@hookform/resolvers/zod";
 import { useForm } from "react-hook-form";
 import { z } from "zod";
 import { Button } from "@/components/ui/button";
-import { typedNumber } from "@/components/ui/typed-number";
+import { numberSchema } from "@/components/ui/number-schema";
 import type { TestRecord } from "@/lib/record/test-record";
 import type { ReadingDue } from "@/lib/sync/live";
 import { PositionRow } from "./position-row";
@@ -20,7 +20,7 @@ type PositionsFormProps = {
   onMeasured: (measured: readonly Measured[]) => Promise<void>;
 };
 
-const rowSchema = z.object({ weight: z.string(), x: typedNumber(), y: typedNumber(), z: typedNumber() });
+const rowSchema = z.object({ weight: z.string(), x: numberSchema(), y: numberSchema(), z: numberSchema() });
 const schema = z.object({
   rows: z.array(rowSchema),
   measured: z.boolean().refine((confirmed) => confirmed, "Measure the weights where they stand, then confirm it here."),

@@ -1,5 +1,5 @@
 import { z } from "zod";
-import { typedNumber, typedNumbers } from "@/components/ui/typed-number";
+import { numberSchema, numbersSchema } from "@/components/ui/number-schema";
 import type { TestRecord } from "@/lib/record/test-record";
 import { type ReadingValue, valueSchemas } from "@/lib/sync/event";
 import type { ReadingDue } from "@/lib/sync/live";
@@ -56,21 +56,21 @@ type Context = z.RefinementCtx;
 function readingValue(entry: RadioTyped, kind: EntryKind, context: Context): ReadingValue {
   switch (kind) {
     case "swing":
-      return enough(entry.mode, { valuesMm: field(context, "value", typedNumbers(battenLimits), entry.value) }, context);
+      return enough(entry.mode, { valuesMm: field(context, "value", numbersSchema(battenLimits), entry.value) }, context);
     case "angle":
-      return enough(entry.mode, { valuesDegrees: field(context, "value", typedNumbers(angleLimits), entry.value) }, context);
+      return enough(entry.mode, { valuesDegrees: field(context, "value", numbersSchema(angleLimits), entry.value) }, context);
     case "legs":
       return legs(entry, context);
     case "metres":
-      return { value: field(context, "value", typedNumber(metresLimits), entry.value) };
+      return { value: field(context, "value", numberSchema(metresLimits), entry.value) };
     case "density":
-      return { density: field(context, "value", typedNumber(densityLimits), entry.value) };
+      return { density: field(context, "value", numberSchema(densityLimits), entry.value) };
   }
 }
 
 function legs(entry: RadioTyped, context: Context): ReadingValue {
-  const portMm = field(context, "port", typedNumbers(battenLimits), entry.port);
-  const starboardMm = field(context, "starboard", typedNumbers(battenLimits), entry.starboard);
+  const portMm = field(context, "port", numbersSchema(battenLimits), entry.port);
+  const starboardMm = field(context, "starboard", numbersSchema(battenLimits), entry.starboard);
   return { mode: "settled", portMm, starboardMm };
 }
 

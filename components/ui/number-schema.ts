@@ -1,11 +1,12 @@
 import { z } from "zod";
+import { typedNumber } from "@/components/readings/pad/typed-number";
 
 type Limits = { readonly least?: number; readonly most?: number /** said when the number is out of its limits */; readonly sense?: string };
 
 /** A number as a person types it, comma or point; what is not one is refused in a sentence. */
-export function typedNumber(limits: Limits = {}) {
+export function numberSchema(limits: Limits = {}) {
   return z.string().transform((typed, context) => {
-    const read = numberFromText(typed);
+    const read = typedNumber(typed);
     const wrong = read === null ? notANumber(typed) : outOfSense(read, limits);
     if (wrong === null && read !== null) return read;
     context.addIssue({ code: "custom", message: wrong ?? notANumber(typed) });
@@ -14,22 +15,16 @@ export function typedNumber(limits: Limits = {}) {
 }
 
 /** Several numbers in one line, with spaces or semicolons between them. */
-export function typedNumbers(limits: Limits = {}) {
+export function numbersSchema(limits: Limits = {}) {
   return z.string().transform((typed, context) => {
     const words = typed.split(/[\s;]+/).filter((word) => word !== "");
-    const one = typedNumber(limits);
+    const one = numberSchema(limits);
     const read = (words.length === 0 ? [""] : words).map((word) => one.safeParse(word));
     const wrong = read.find((each) => !each.success);
     if (!wrong) return read.flatMap((each) => (each.success ? [each.data] : []));
     context.addIssue({ code: "custom", message: wrong.error?.issues[0]?.message ?? notANumber(typed) });
     return z.NEVER;
   });
-}
-
-/** The number in a text, or null: a sign, digits, at most one comma or point. */
-export function numberFromText(typed: string): number | null {
-  const text = typed.trim().replace("−", "-").replace(",", ".");
-  return /^[+-]?(\d+\.?\d*|\.\d+)$/.test(text) ? Number(text) : null;
 }
 
 function notANumber(typed: string): string {
