@@ -49,8 +49,16 @@ function loadFailure(file) {
 }
 
 function testFailure(test) {
-  const why = test.status === "failed" ? test.failureMessages.join("\n") : `did not run (${test.status})`;
+  const why = test.status === "failed" ? test.failureMessages.map(withoutPackages).join("\n") : `did not run (${test.status})`;
   return `${relative(test.file)} > ${test.fullName}\n${why}`;
+}
+
+/** A message without the lines of its stack that are not ours. */
+function withoutPackages(message) {
+  return message
+    .split("\n")
+    .filter((line) => !/^\s+at .*(node_modules|<anonymous>|node:internal)/.test(line))
+    .join("\n");
 }
 
 function relative(file) {

@@ -1,8 +1,9 @@
 import path from "node:path";
+import { fileURLToPath } from "node:url";
 import react from "@vitejs/plugin-react";
 import { defineConfig } from "vitest/config";
 
-const root = path.resolve(import.meta.dirname, "..");
+const root = fileURLToPath(new URL("..", import.meta.url));
 const alias = {
   "@": root,
   "server-only": path.join(root, "node_modules/server-only/empty.js"),
@@ -14,6 +15,8 @@ export default defineConfig({
   plugins: [react()],
   resolve: { alias },
   test: {
+    // what a rule found is read whole, not as "[ …(7) ]"
+    chaiConfig: { truncateThreshold: 0 },
     projects: [
       {
         extends: true,

@@ -82,7 +82,8 @@ function projectProblem(part: string, target: string): string | null {
   const targetPart = partOf(target);
   if (targetPart === null || targetPart === part) return null;
   const allowed = importTable.find((row) => row.part === part)?.mayImport ?? [];
-  return allowed.includes(targetPart) ? null : `${part} must not import ${targetPart} (${target})`;
+  const isAllowed = allowed.includes(targetPart) || (allowed.includes("lib/*") && targetPart.startsWith("lib"));
+  return isAllowed ? null : `${part} must not import ${targetPart} (${target})`;
 }
 
 function packageProblem(source: Source, part: string, from: string): string | null {
