@@ -31,7 +31,7 @@ async function serve(port, demo) {
   const url = `http://localhost:${port}`;
   const server = spawn(process.execPath, ["node_modules/next/dist/bin/next", "start", "--port", String(port)], {
     cwd: root,
-    env: { ...process.env, NODE_ENV: "production", NEXTAUTH_URL: process.env.NEXTAUTH_URL ?? url },
+    env: { ...process.env, NODE_ENV: "production", NEXT_TELEMETRY_DISABLED: "1", NEXTAUTH_URL: process.env.NEXTAUTH_URL ?? url },
     stdio: ["ignore", "ignore", "inherit"],
   });
   const ended = once(server, "exit");

@@ -8,7 +8,11 @@ import { root } from "./house.mjs";
  */
 export function run(program, args, { quiet = false, env = {}, cwd = root } = {}) {
   return new Promise((resolve) => {
-    const child = spawn(program, args, { cwd, env: { ...process.env, ...env }, stdio: ["ignore", "pipe", "pipe"] });
+    const child = spawn(program, args, {
+      cwd,
+      env: { ...process.env, NEXT_TELEMETRY_DISABLED: "1", ...env },
+      stdio: ["ignore", "pipe", "pipe"],
+    });
     const kept = [];
     const keep = (stream) => (chunk) => {
       kept.push(chunk);

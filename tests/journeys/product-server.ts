@@ -78,7 +78,8 @@ export class ProductServer {
   }
 
   private spawned(args: readonly string[]): ChildProcess {
-    const env = { ...process.env, NODE_ENV: "production" as const, BATTENBOOK_DATA: this.dataFolder, NEXTAUTH_URL: this.url };
+    const own = { NODE_ENV: "production" as const, NEXT_TELEMETRY_DISABLED: "1", BATTENBOOK_DATA: this.dataFolder, NEXTAUTH_URL: this.url };
+    const env = { ...process.env, ...own };
     const child = spawn(process.execPath, args, { cwd: root, env, detached: true, stdio: ["ignore", "pipe", "pipe"] });
     for (const stream of [child.stdout, child.stderr]) stream?.on("data", (chunk) => this.hear(String(chunk)));
     return child;
