@@ -1,0 +1,79 @@
+import { asc, desc, eq } from "drizzle-orm";
+import { chained, GENESIS, type LedgerEntry, type LedgerMatter } from "@/lib/ledger/hash-chain";
+import { ledgerEntries } from "../schema/ledger";
+import type { Act } from "./act";
+import type { Database } from "./connection";
+
+/** What a verb says of its own act; who, when and why come from the act. */
+export type Written = Act & {
+  readonly what: string;
+  readonly role?: string | null;
+  readonly before?: unknown;
+  readonly after?: unknown;
+  readonly capturedAt?: string | null;
+  readonly contentHash?: string | null;
+};
+
+/** Adds one entry to a test's chain, or to the server's (null). Called inside the transaction of the act itself. */
+export function writeEntry(db: Database, test: string | null, written: Written): LedgerEntry {
+  const entry = chained(matterOf(test, written), lastOf(db, test));
+  db.insert(ledgerEntries)
+    .values({ chain: chainOf(test), ...entry })
+    .run();
+  return entry;
+}
+
+/** The hash of the last entry of a chain. */
+export function ledgerHead(db: Database, test: string | null): string {
+  return lastOf(db, test)?.hash ?? GENESIS;
+}
+
+/** A whole chain, first entry first. */
+export function ledgerOf(db: Database, test: string | null): LedgerEntry[] {
+  const rows = db
+    .select()
+    .from(ledgerEntries)
+    .where(eq(ledgerEntries.chain, chainOf(test)))
+    .orderBy(asc(ledgerEntries.seq))
+    .all();
+  return rows.map(({ id, chain, ...entry }) => entry);
+}
+
+/** The tests that have a chain here. */
+export function chainsKept(db: Database): (string | null)[] {
+  const rows = db.selectDistinct({ chain: ledgerEntries.chain }).from(ledgerEntries).orderBy(ledgerEntries.chain).all();
+  return rows.map(({ chain }) => (chain === chainOf(null) ? null : chain));
+}
+
+function lastOf(db: Database, test: string | null): { seq: number; hash: string } | null {
+  const { seq, hash, chain } = ledgerEntries;
+  const row = db
+    .select({ seq, hash })
+    .from(ledgerEntries)
+    .where(eq(chain, chainOf(test)))
+    .orderBy(desc(seq))
+    .limit(1)
+    .get();
+  return row ?? null;
+}
+
+// JSON has no undefined: what a verb does not say stands in the entry as null
+function matterOf(test: string | null, written: Written): LedgerMatter {
+  return {
+    test,
+    at: written.at,
+    who: written.by,
+    role: written.role ?? null,
+    device: written.device ?? null,
+    what: written.what,
+    before: written.before ?? null,
+    after: written.after ?? null,
+    reason: written.reason ?? null,
+    capturedAt: written.capturedAt ?? null,
+    contentHash: written.contentHash ?? null,
+  };
+}
+
+function chainOf(test: string | null): string {
+  return test ?? "server";
+}
