@@ -28,6 +28,7 @@ export default {
       title: ["1.5rem", "1.875rem"],
       figure: ["2rem", "2.25rem"],
       signal: ["3rem", "3.25rem"],
+      beacon: ["6rem", "6rem"],
     },
     borderRadius: { none: "0", sm: "2px", DEFAULT: "4px", lg: "8px", full: "9999px" },
     extend: {

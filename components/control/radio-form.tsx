@@ -8,8 +8,9 @@ import { ChoiceField } from "@/components/ui/choice-field";
 import type { TestRecord } from "@/lib/record/test-record";
 import type { ReadingDue } from "@/lib/sync/live";
 import { entryKind, isCalledByRadio, type RadioReading, type RadioTyped, radioEmpty, radioSchema } from "./radio-entry";
-import { RadioValueFields } from "./radio-value-fields";
 import { slotInWords } from "./slot-in-words";
+import { SwingMode } from "./swing-mode";
+import { ValueFields } from "./value-fields";
 
 type RadioFormProps = {
   due: readonly ReadingDue[];
@@ -30,6 +31,7 @@ export function RadioForm({ due, stations, first, onRecord }: RadioFormProps) {
   const { setValue } = form;
   useEffect(() => setValue("slotKey", first ?? ""), [first, setValue]);
   const chosen = called.find((each) => each.slotKey === form.watch("slotKey"));
+  const kind = chosen ? entryKind(chosen.slot, stations) : null;
   const save = form.handleSubmit(async (reading) => {
     await onRecord(reading);
     setSaved(slotInWords(reading.slot));
@@ -42,7 +44,8 @@ export function RadioForm({ due, stations, first, onRecord }: RadioFormProps) {
         <Slots title="Due" due={called.filter((each) => each.state === "empty")} />
         <Slots title="Already read" due={called.filter((each) => each.state !== "empty")} />
       </ChoiceField>
-      {chosen ? <RadioValueFields kind={entryKind(chosen.slot, stations)} form={form} /> : null}
+      {kind ? <ValueFields id="radio" kind={kind} errors={form.formState.errors} register={form.register} /> : null}
+      {kind === "swing" || kind === "angle" ? <SwingMode register={form.register} /> : null}
       <div className="flex flex-wrap items-center gap-3">
         <Button type="submit">Take in by radio</Button>
         <output className="text-small">{saved ? `Saved: ${saved}.` : ""}</output>

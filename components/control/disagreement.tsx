@@ -1,0 +1,69 @@
+"use client";
+
+import { Cell, ColumnHead, DataTable, RowHead } from "@/components/ui/data-table";
+import { TimeOfDay } from "@/components/ui/time-of-day";
+import type { TestRecord } from "@/lib/record/test-record";
+import type { ReadingDue, StandingReading } from "@/lib/sync/live";
+import type { LeadActs } from "./lead-acts";
+import { ReadingFigure } from "./reading-figure";
+import { ResolveForm } from "./resolve-form";
+import { slotInWords } from "./slot-in-words";
+
+type DisagreementProps = { due: ReadingDue; stations: TestRecord["stations"]; acts: LeadActs | null };
+
+/** The readings of one slot side by side: who read, when, how it came, what; and the form that settles them. */
+export function Disagreement({ due, stations, acts }: DisagreementProps) {
+  const heads = headsOf(due);
+  return (
+    <div className="mt-2 grid gap-4 lg:grid-cols-2">
+      <DataTable caption={`Readings that disagree: ${slotInWords(due.slot)}`}>
+        <thead>
+          <tr>
+            <ColumnHead>Reading</ColumnHead>
+            <ColumnHead figure>Value</ColumnHead>
+            <ColumnHead>Who</ColumnHead>
+            <ColumnHead>When</ColumnHead>
+            <ColumnHead>How</ColumnHead>
+          </tr>
+        </thead>
+        <tbody>
+          {heads.map((head, index) => (
+            <HeadRow key={head.event} head={head} letter={letterOf(index)} due={due} />
+          ))}
+        </tbody>
+      </DataTable>
+      {acts ? <ResolveForm due={due} heads={heads} stations={stations} onResolve={acts.resolve} /> : null}
+    </div>
+  );
+}
+
+function HeadRow({ head, letter, due }: { head: StandingReading; letter: string; due: ReadingDue }) {
+  return (
+    <tr>
+      <RowHead>{letter}</RowHead>
+      <Cell figure>
+        <ReadingFigure value={head.value} kind={due.slot.kind} />
+      </Cell>
+      <Cell>{head.author}</Cell>
+      <Cell>
+        <TimeOfDay at={head.capturedAt} />
+      </Cell>
+      <Cell>
+        {head.source === "station" ? "at the station" : head.source === "radio" ? "by radio" : "from paper"}
+        {head.corrected ? ", corrected" : ""}
+        {head.late ? ", late" : ""}
+        {head.status === "void" ? ", taken back" : ""}
+      </Cell>
+    </tr>
+  );
+}
+
+/** Every head that a decision must name. */
+export function headsOf(due: ReadingDue): StandingReading[] {
+  const disagreeing = due.readings.filter((reading) => reading.status === "disagrees");
+  return disagreeing.length > 1 ? disagreeing : due.readings.filter((reading) => reading.status !== "superseded");
+}
+
+export function letterOf(index: number): string {
+  return String.fromCharCode(65 + index);
+}
