@@ -1,0 +1,82 @@
+import { BATCH_BYTES, BATCH_EVENTS, type Receipt, type SyncAnswer } from "./protocol";
+
+/**
+ * The phone's queue as plain rules: what is sent next, and what an answer makes of it. The page and the service worker
+ * both run these; neither storage nor network is known here.
+ *
+ * saved (here) → sending → on-server → confirmed (in a backup, or the report issued); aside: quarantined (kept by the
+ * server out of the result, still on the phone). A crash while sending means saved.
+ */
+export type EventState = "saved" | "sending" | "on-server" | "confirmed" | "quarantined";
+
+export type QueuedEvent = {
+  readonly id: string;
+  readonly seq: number;
+  readonly state: EventState;
+  readonly envelope: { readonly body: string; readonly signature: string | null };
+};
+
+export type StateChange = { readonly id: string; readonly state: EventState; readonly receipt: Receipt | null };
+
+/** Events to send now: in order of their numbers, at most 50 and at most 256 KB, but always at least one. */
+export function nextBatch<E extends QueuedEvent>(events: readonly E[]): E[] {
+  const batch: E[] = [];
+  let bytes = 0;
+  for (const event of events.filter(isUnsent).sort(bySeq)) {
+    bytes += sizeOf(event);
+    if (batch.length === BATCH_EVENTS || (batch.length > 0 && bytes > BATCH_BYTES)) break;
+    batch.push(event);
+  }
+  return batch;
+}
+
+/** What the queue holds that no server has answered for. */
+export function isUnsent(event: Pick<QueuedEvent, "state">): boolean {
+  return event.state === "saved" || event.state === "sending";
+}
+
+/** After a crash, a cut or an answer that never came: nothing is known of what was being sent. */
+export function afterSilence(batch: readonly QueuedEvent[]): StateChange[] {
+  return batch.filter((event) => event.state === "sending").map(({ id }) => ({ id, state: "saved", receipt: null }));
+}
+
+/** What the answer says of each event of the batch. An event without a receipt of its own goes back to saved. */
+export function afterAnswer(batch: readonly QueuedEvent[], answer: SyncAnswer): StateChange[] {
+  return batch.map(({ id }, place) => {
+    const receipt = answer.results[place];
+    if (!receipt || (receipt.id !== null && receipt.id !== id)) return { id, state: "saved", receipt: null };
+    return { id, state: receipt.outcome === "quarantined" ? "quarantined" : "on-server", receipt };
+  });
+}
+
+/**
+ * What must be sent again: everything this phone holds that the server lists as missing or that lies above its highest
+ * number. After a restore from an older backup (a new epoch) that is what the server lost.
+ */
+export function afterComparison(events: readonly QueuedEvent[], known: SyncAnswer["device"]): StateChange[] {
+  const missing = new Set(known.missing);
+  return events
+    .filter((event) => !isUnsent(event) && (missing.has(event.seq) || event.seq > known.highestSeq))
+    .map(({ id }) => ({ id, state: "saved", receipt: null }));
+}
+
+export type QueueCount = { readonly unsent: number; readonly onServer: number; readonly quarantined: number };
+
+export function queueCount(events: Iterable<Pick<QueuedEvent, "state">>): QueueCount {
+  const count = { unsent: 0, onServer: 0, quarantined: 0 };
+  for (const event of events) {
+    if (isUnsent(event)) count.unsent += 1;
+    else if (event.state === "quarantined") count.quarantined += 1;
+    else count.onServer += 1;
+  }
+  return count;
+}
+
+function sizeOf(event: QueuedEvent): number {
+  // UTF-16 units are at most three bytes each in UTF-8; figures and ids are one
+  return event.envelope.body.length + (event.envelope.signature?.length ?? 0) + 40;
+}
+
+function bySeq(a: QueuedEvent, b: QueuedEvent): number {
+  return a.seq - b.seq;
+}

@@ -1,0 +1,17 @@
+import type { QueueCount } from "./outbox";
+
+/** Whether the queue can move: the server answered, nothing answered, or it wants to know who is sending. */
+export type Reach = "unknown" | "reached" | "no-answer" | "sign-in-needed";
+
+/** The state of the queue as a person reads it, always on screen. */
+export function queueWords(count: QueueCount, reach: Reach): string {
+  if (reach === "sign-in-needed" && count.unsent > 0) return `${saved(count.unsent)}: sign in to send. Readings go on`;
+  const aside = count.quarantined > 0 ? `; ${count.quarantined} set aside by the server` : "";
+  if (count.unsent > 0) return `${saved(count.unsent)}, not sent yet${aside}`;
+  if (count.onServer + count.quarantined === 0) return "Nothing saved on this phone yet";
+  return `All ${count.onServer + count.quarantined} on the server${aside}`;
+}
+
+function saved(count: number): string {
+  return `${count} saved on this phone`;
+}
