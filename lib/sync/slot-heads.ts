@@ -1,0 +1,72 @@
+import type { EventOf } from "./event";
+
+/** An event that the server (or the wheelhouse's own device) has let in, with its number there. */
+export type Stamped<E> = { readonly body: E; readonly serverSeq: number; readonly receivedAt: string };
+
+export type SlotEvent = Stamped<EventOf<"record" | "correct" | "void" | "resolve">>;
+
+/**
+ * The acts of one slot as they stand on each other: a correction or a void stands on one act, a resolve on every act it
+ * settles. `heads` are those that nothing stands on; `forks` are acts on which two or more stand that still lead to
+ * different heads; `deferred` wait for an act that has not arrived. The order of arrival plays no part.
+ */
+export type SlotHeads = {
+  readonly heads: readonly SlotEvent[];
+  readonly forkedHeads: ReadonlySet<string>;
+  readonly deferred: readonly SlotEvent[];
+  readonly byId: ReadonlyMap<string, SlotEvent>;
+};
+
+export function slotHeads(events: readonly SlotEvent[]): SlotHeads {
+  const known = new Map(events.map((event) => [event.body.id, event]));
+  const deferred = events.filter((event) => !isRooted(event, known, new Set()));
+  const waiting = new Set(deferred.map(({ body }) => body.id));
+  const byId = new Map([...known].filter(([id]) => !waiting.has(id)));
+  const above = childrenOf(byId);
+  const heads = [...byId.values()].filter(({ body }) => !above.has(body.id)).sort(inOrderOfIds);
+  return { heads, forkedHeads: forkedHeads(above, heads), deferred, byId };
+}
+
+/** The acts that an act stands on. */
+export function basesOf({ body }: SlotEvent): readonly string[] {
+  if (body.base === null) return [];
+  return typeof body.base === "string" ? [body.base] : body.base;
+}
+
+function isRooted(event: SlotEvent, known: ReadonlyMap<string, SlotEvent>, seen: Set<string>): boolean {
+  if (seen.has(event.body.id)) return false;
+  const further = new Set(seen).add(event.body.id);
+  return basesOf(event).every((id) => {
+    const base = known.get(id);
+    return base !== undefined && isRooted(base, known, further);
+  });
+}
+
+function childrenOf(byId: ReadonlyMap<string, SlotEvent>): Map<string, string[]> {
+  const above = new Map<string, string[]>();
+  for (const event of byId.values()) {
+    for (const base of basesOf(event)) above.set(base, [...(above.get(base) ?? []), event.body.id]);
+  }
+  return above;
+}
+
+/** Heads that contradict a head of the same base: two corrections, two resolves, a correction and a void. */
+function forkedHeads(above: ReadonlyMap<string, string[]>, heads: readonly SlotEvent[]): Set<string> {
+  const isHead = new Set(heads.map(({ body }) => body.id));
+  const forked = new Set<string>();
+  for (const children of above.values()) {
+    const reached = children.map((child) => headsAbove(child, above, isHead));
+    const all = new Set(reached.flat());
+    if (all.size > 1 && reached.filter((some) => some.length > 0).length > 1) for (const head of all) forked.add(head);
+  }
+  return forked;
+}
+
+function headsAbove(id: string, above: ReadonlyMap<string, string[]>, isHead: ReadonlySet<string>): string[] {
+  if (isHead.has(id)) return [id];
+  return (above.get(id) ?? []).flatMap((child) => headsAbove(child, above, isHead));
+}
+
+function inOrderOfIds(a: SlotEvent, b: SlotEvent): number {
+  return a.body.id < b.body.id ? -1 : 1;
+}

@@ -1,0 +1,144 @@
+import { type AgreementLimits, isAgreed } from "./agreement";
+import type { EventOf, ReadingValue } from "./event";
+import type { SlotState } from "./live";
+import type { SlotKind } from "./slot";
+import { basesOf, type SlotEvent, type SlotHeads, slotHeads } from "./slot-heads";
+
+export type ReadingStatus = "accepted" | "superseded" | "void" | "disagrees";
+
+/** One value that was ever given for the slot, and what has become of it. */
+export type ProjectedReading = {
+  readonly event: string;
+  readonly reading: string;
+  readonly value: ReadingValue;
+  readonly source: "station" | "radio" | "paper";
+  readonly status: ReadingStatus;
+  readonly author: string;
+  readonly device: string;
+  readonly capturedAt: string;
+  readonly clockOffsetMs: number | null;
+  readonly receivedAt: string;
+  readonly serverSeq: number;
+  readonly reason: string | null;
+  /** it stands on an earlier value of the same reading */
+  readonly corrects: boolean;
+};
+
+export type SlotProjection = {
+  readonly state: SlotState;
+  readonly readings: readonly ProjectedReading[];
+  /** the acts a resolve has to name to settle the slot */
+  readonly heads: readonly string[];
+  readonly deferred: readonly string[];
+};
+
+export type SlotRules = {
+  readonly limits: AgreementLimits;
+  /** what arrived after this number came after the test was reconciled; null while it is not */
+  readonly reconciledSeq: number | null;
+};
+
+/**
+ * What stands in one slot, from all acts that concern it. The same acts give the same answer in any order of arrival and
+ * under any duplication.
+ *
+ * Two corrections of one base, a correction against a void, two resolves of the same heads, a head that a resolve did not
+ * name, station readings further apart than the limit, a reading after reconciliation: a disagreement. Further readings
+ * within the limit stand as replicates. A value by radio or on paper counts only until the station's own is there.
+ */
+export function slotProjection(kind: SlotKind, events: readonly SlotEvent[], rules: SlotRules): SlotProjection {
+  const standing = slotHeads(events);
+  const speaking = standing.heads.filter(({ body }) => body.type !== "void" || standing.forkedHeads.has(body.id));
+  const isOpen = isDisagreement(kind, standing, speaking, rules);
+  const accepted = new Set(isOpen ? [] : speaking.flatMap((head) => chosenValues(head, standing)));
+  const readings = [...standing.byId.values()].flatMap((event) => projected(event, standing, accepted, isOpen ? speaking : []));
+  return {
+    state: slotState(isOpen, speaking, readings),
+    readings: withoutRelayed(readings).sort(byEvent),
+    heads: speaking.map(({ body }) => body.id),
+    deferred: standing.deferred.map(({ body }) => body.id).sort(),
+  };
+}
+
+function slotState(isOpen: boolean, speaking: readonly SlotEvent[], readings: readonly ProjectedReading[]): SlotState {
+  if (isOpen) return "disagrees";
+  if (speaking.some(({ body }) => body.type === "resolve")) return "resolved";
+  return readings.some(({ status }) => status === "accepted") ? "read" : "empty";
+}
+
+function isDisagreement(kind: SlotKind, standing: SlotHeads, speaking: readonly SlotEvent[], rules: SlotRules): boolean {
+  if (speaking.some(({ body }) => standing.forkedHeads.has(body.id))) return true;
+  if (speaking.length > 1 && speaking.some(({ body }) => body.type === "resolve")) return true;
+  if (speaking.some((head) => isAfterReconciled(head, rules.reconciledSeq))) return true;
+  const own = speaking.filter((head) => sourceOf(head) === "station");
+  return !isAgreed(kind, (own.length > 0 ? own : speaking).flatMap(valueOfHead), rules.limits);
+}
+
+function isAfterReconciled({ body, serverSeq }: SlotEvent, reconciledSeq: number | null): boolean {
+  return reconciledSeq !== null && serverSeq > reconciledSeq && body.type !== "resolve";
+}
+
+function valueOfHead({ body }: SlotEvent): ReadingValue[] {
+  return body.type === "record" || body.type === "correct" ? [body.payload] : [];
+}
+
+function sourceOf({ body }: SlotEvent): "station" | "radio" | "paper" {
+  return body.source ?? "station";
+}
+
+/** The events whose values count when this head stands: its own, or those that a resolve has chosen. */
+function chosenValues({ body }: SlotEvent, standing: SlotHeads): string[] {
+  if (body.type === "void") return [];
+  if (body.type !== "resolve") return [body.id];
+  if (body.payload.choice === "none") return [];
+  if (body.payload.choice === "new") return [body.id];
+  const chosen = body.payload.choice === "one" ? [body.payload.head] : body.base;
+  return chosen.flatMap((id) => {
+    const head = standing.byId.get(id);
+    return head ? chosenValues(head, standing) : [];
+  });
+}
+
+function projected(event: SlotEvent, standing: SlotHeads, accepted: ReadonlySet<string>, open: readonly SlotEvent[]): ProjectedReading[] {
+  const value = valueGiven(event);
+  if (value === null) return [];
+  const { body, serverSeq, receivedAt } = event;
+  const { id, author, device, capturedAt, clockOffsetMs, reason } = body;
+  const disagrees = open.some((head) => contested(head, standing).includes(id));
+  const status = accepted.has(id) ? "accepted" : disagrees ? "disagrees" : isVoided(id, standing) ? "void" : "superseded";
+  const provenance = { author, device, capturedAt, clockOffsetMs, receivedAt, serverSeq, reason };
+  return [
+    { event: id, reading: body.reading ?? id, value, source: sourceOf(event), status, corrects: body.type === "correct", ...provenance },
+  ];
+}
+
+function valueGiven({ body }: SlotEvent): ReadingValue | null {
+  if (body.type === "record" || body.type === "correct") return body.payload;
+  return isNewValue(body) ? body.payload.value : null;
+}
+
+function isNewValue(body: SlotEvent["body"]): body is EventOf<"resolve"> & { payload: { choice: "new"; value: ReadingValue } } {
+  return body.type === "resolve" && body.payload.choice === "new";
+}
+
+/** The values an open head brings into the disagreement: its own, those it chose, or the one it would make void. */
+function contested(head: SlotEvent, standing: SlotHeads): readonly string[] {
+  return head.body.type === "void" ? basesOf(head) : chosenValues(head, standing);
+}
+
+function isVoided(id: string, standing: SlotHeads): boolean {
+  return [...standing.byId.values()].some((event) => event.body.type === "void" && basesOf(event).includes(id));
+}
+
+/** A relayed value steps back once the station's own reading counts; a resolve's choice is nobody's relay. */
+function withoutRelayed(readings: readonly ProjectedReading[]): ProjectedReading[] {
+  const hasOwn = readings.some(({ status, source }) => status === "accepted" && source === "station");
+  if (!hasOwn) return [...readings];
+  return readings.map((reading) =>
+    reading.status === "accepted" && reading.source !== "station" ? { ...reading, status: "superseded" } : reading,
+  );
+}
+
+function byEvent(a: ProjectedReading, b: ProjectedReading): number {
+  return a.event < b.event ? -1 : 1;
+}
