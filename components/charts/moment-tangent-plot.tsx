@@ -33,7 +33,7 @@ export function MomentTangentPlot({ points, line, stations }: MomentTangentPlotP
     upper,
   );
   const residual = scaleOver(
-    ordered.map((point) => point.residual ?? 0),
+    ordered.map((point) => point.residual),
     lower,
   );
   return (

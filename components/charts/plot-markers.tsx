@@ -17,13 +17,11 @@ type PlotMarkersProps = {
 /** The markers of one plot; the chosen one carries a ring, and one stop of the tab key serves them all. */
 export function PlotMarkers({ points, stations, x, y, of, chosen, onChoose }: PlotMarkersProps) {
   return points.map((point, index) => {
-    const value = point[of];
-    if (value === null) return null;
     return (
       <g
-        key={`${point.station} ${point.move}`}
+        key={`${point.station} ${point.move} ${point.tangent}`}
         data-point={`${point.station} ${point.move} ${of}`}
-        transform={`translate(${x(point.moment)} ${y(value)})`}
+        transform={`translate(${x(point.moment)} ${y(point[of])})`}
         className="outline-none"
         {...(onChoose ? walked(points, index, chosen, onChoose) : { "aria-hidden": true })}
       >

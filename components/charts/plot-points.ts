@@ -6,8 +6,8 @@ export type PlotPoint = {
   readonly moment: number;
   /** mm per m */
   readonly tangent: number;
-  /** measured − fitted, mm per m; null where the point took no part in the fit */
-  readonly residual: number | null;
+  /** measured − the common line, mm per m */
+  readonly residual: number;
   /** why the point takes no part: drawn hollow; null where it counts */
   readonly leftOut: string | null;
 };

@@ -18,7 +18,7 @@ export function PlotTable({ points }: { points: readonly PlotPoint[] }) {
       </thead>
       <tbody>
         {alongTheLine(points).map((point) => (
-          <tr key={`${point.move} ${point.station}`}>
+          <tr key={`${point.move} ${point.station} ${point.tangent}`}>
             <RowHead>{point.move}</RowHead>
             <Cell>{point.station}</Cell>
             <Cell figure>

@@ -2,10 +2,11 @@
 
 import { useSyncExternalStore } from "react";
 
+const day = { day: "numeric", month: "long" } as const;
 const options = { hour: "2-digit", minute: "2-digit", second: "2-digit", hourCycle: "h23" } as const;
 
 /** A moment by the clock of whoever looks; the server, which does not know that clock, writes UTC. */
-export function TimeOfDay({ at }: { at: string }) {
+export function TimeOfDay({ at, dated = false }: { at: string; dated?: boolean }) {
   const zone = useSyncExternalStore(
     neverChanges,
     () => Intl.DateTimeFormat().resolvedOptions().timeZone,
@@ -13,7 +14,7 @@ export function TimeOfDay({ at }: { at: string }) {
   );
   return (
     <time dateTime={at} className="whitespace-nowrap font-mono">
-      {new Intl.DateTimeFormat("en-GB", { ...options, timeZone: zone }).format(new Date(at))}
+      {new Intl.DateTimeFormat("en-GB", { ...options, ...(dated ? day : {}), timeZone: zone }).format(new Date(at))}
     </time>
   );
 }

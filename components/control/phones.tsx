@@ -1,0 +1,65 @@
+"use client";
+
+import { Cell, ColumnHead, DataTable, RowHead } from "@/components/ui/data-table";
+import { Panel } from "@/components/ui/panel";
+import { Sign } from "@/components/ui/sign";
+import type { Phone } from "@/lib/sync/live";
+import { heardInWords, phoneInWords } from "./phone-in-words";
+import { useMinute } from "./use-minute";
+
+/** The phones of the test: whose they are, when last heard, and what they still hold. */
+export function Phones({ phones }: { phones: readonly Phone[] }) {
+  const now = useMinute();
+  if (phones.length === 0) {
+    return (
+      <Panel title="Phones">
+        <p>No phone is enrolled yet. Make a code below for each reader.</p>
+      </Panel>
+    );
+  }
+  return (
+    <Panel title="Phones" aside={heldInWords(phones)}>
+      <DataTable caption="Phones of this test">
+        <thead>
+          <tr>
+            <ColumnHead>Phone</ColumnHead>
+            <ColumnHead>Person</ColumnHead>
+            <ColumnHead>Last heard</ColumnHead>
+            <ColumnHead figure>Still holds</ColumnHead>
+            <ColumnHead>Readings</ColumnHead>
+          </tr>
+        </thead>
+        <tbody>
+          {phones.map((phone) => (
+            <PhoneRow key={phone.device} phone={phone} now={now} />
+          ))}
+        </tbody>
+      </DataTable>
+    </Panel>
+  );
+}
+
+function PhoneRow({ phone, now }: { phone: Phone; now: number | null }) {
+  return (
+    <tr>
+      <RowHead>{phone.name}</RowHead>
+      <Cell>
+        {phone.person}
+        <span className="block text-ink-soft text-small">{phone.revoked ? "revoked" : phone.roles.join(", ")}</span>
+      </Cell>
+      <Cell>{now === null ? "" : heardInWords(phone.lastHeardAt, now)}</Cell>
+      <Cell figure>{phone.holds}</Cell>
+      <Cell className={phone.missing.length > 0 ? "font-bold text-redlead-text" : ""}>
+        <span className="inline-flex items-center gap-2">
+          <Sign kind={phone.missing.length > 0 ? "alert" : "read"} />
+          {phoneInWords(phone)}
+        </span>
+      </Cell>
+    </tr>
+  );
+}
+
+function heldInWords(phones: readonly Phone[]): string {
+  const held = phones.reduce((sum, phone) => sum + phone.holds, 0);
+  return held === 0 ? "None says it still holds readings" : `${held} readings still on phones`;
+}
