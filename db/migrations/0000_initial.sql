@@ -59,6 +59,27 @@ CREATE TABLE `enrolment_codes` (
 );
 --> statement-breakpoint
 CREATE UNIQUE INDEX `enrolment_codes_code_hash_unique` ON `enrolment_codes` (`code_hash`);--> statement-breakpoint
+CREATE TABLE `events` (
+	`server_seq` integer PRIMARY KEY AUTOINCREMENT NOT NULL,
+	`id` text,
+	`device` text NOT NULL,
+	`seq` integer,
+	`test` text,
+	`type` text,
+	`body` text NOT NULL,
+	`body_hash` text NOT NULL,
+	`signature` text,
+	`sent_by` text NOT NULL,
+	`received_at` text NOT NULL,
+	`outcome` text NOT NULL,
+	`code` text,
+	`message` text
+);
+--> statement-breakpoint
+CREATE INDEX `events_id` ON `events` (`id`);--> statement-breakpoint
+CREATE INDEX `events_body_hash` ON `events` (`body_hash`);--> statement-breakpoint
+CREATE INDEX `events_device_seq` ON `events` (`device`,`seq`);--> statement-breakpoint
+CREATE INDEX `events_test` ON `events` (`test`,`type`);--> statement-breakpoint
 CREATE TABLE `files` (
 	`sha256` text NOT NULL,
 	`test` text NOT NULL,
@@ -73,6 +94,26 @@ CREATE TABLE `files` (
 	FOREIGN KEY (`added_by`) REFERENCES `accounts`(`id`) ON UPDATE no action ON DELETE no action
 );
 --> statement-breakpoint
+CREATE TABLE `ledger_entries` (
+	`id` integer PRIMARY KEY AUTOINCREMENT NOT NULL,
+	`chain` text NOT NULL,
+	`seq` integer NOT NULL,
+	`test` text,
+	`at` text NOT NULL,
+	`who` text,
+	`role` text,
+	`device` text,
+	`what` text NOT NULL,
+	`before` text,
+	`after` text,
+	`reason` text,
+	`captured_at` text,
+	`content_hash` text,
+	`previous` text NOT NULL,
+	`hash` text NOT NULL
+);
+--> statement-breakpoint
+CREATE UNIQUE INDEX `ledger_chain_seq` ON `ledger_entries` (`chain`,`seq`);--> statement-breakpoint
 CREATE TABLE `plan_aboard` (
 	`test` text NOT NULL,
 	`place_in_list` integer NOT NULL,
@@ -176,6 +217,44 @@ CREATE TABLE `plan_weights` (
 	`certificate` text,
 	PRIMARY KEY(`test`, `id`),
 	FOREIGN KEY (`test`) REFERENCES `tests`(`id`) ON UPDATE no action ON DELETE no action
+);
+--> statement-breakpoint
+CREATE TABLE `placed_events` (
+	`event` text PRIMARY KEY NOT NULL,
+	`server_seq` integer NOT NULL,
+	`test` text NOT NULL,
+	`type` text NOT NULL,
+	`slot_key` text
+);
+--> statement-breakpoint
+CREATE INDEX `placed_slot` ON `placed_events` (`test`,`slot_key`);--> statement-breakpoint
+CREATE INDEX `placed_type` ON `placed_events` (`test`,`type`);--> statement-breakpoint
+CREATE TABLE `readings` (
+	`event` text PRIMARY KEY NOT NULL,
+	`test` text NOT NULL,
+	`slot_key` text NOT NULL,
+	`reading` text NOT NULL,
+	`value` text NOT NULL,
+	`source` text NOT NULL,
+	`status` text NOT NULL,
+	`author` text NOT NULL,
+	`device` text NOT NULL,
+	`captured_at` text NOT NULL,
+	`clock_offset_ms` integer,
+	`received_at` text NOT NULL,
+	`server_seq` integer NOT NULL,
+	`reason` text,
+	`corrects` integer NOT NULL
+);
+--> statement-breakpoint
+CREATE INDEX `readings_slot` ON `readings` (`test`,`slot_key`);--> statement-breakpoint
+CREATE TABLE `slots` (
+	`test` text NOT NULL,
+	`slot_key` text NOT NULL,
+	`slot` text NOT NULL,
+	`state` text NOT NULL,
+	`heads` text NOT NULL,
+	PRIMARY KEY(`test`, `slot_key`)
 );
 --> statement-breakpoint
 CREATE TABLE `server_identity` (

@@ -1,5 +1,5 @@
 import { z } from "zod";
-import { name, number, ordinal, place, positive, text, time, wholeNumber } from "@/lib/record/quantities";
+import { name, ordinal, place, positive, text, time, wholeNumber } from "@/lib/record/quantities";
 import {
   battenValueSchema,
   conditionValueSchema,
@@ -49,7 +49,7 @@ const act = {
   jobTag: z.string().min(1).max(64),
   author: z.uuid(),
   capturedAt: time,
-  clockOffsetMs: number.nullable(),
+  clockOffsetMs: z.number().int().nullable(),
   reason: text.nullable(),
 };
 const noReading = { reading: z.null(), base: z.null(), slot: z.null(), source: z.null() };
