@@ -31,6 +31,7 @@ export type Hull = {
   /** lowest and highest point of the moulded surface */
   readonly keel: number;
   readonly top: number;
+  readonly greatestHalfBreadth: number;
 };
 
 export type HullRefusal =
@@ -56,7 +57,8 @@ export function hullFromOffsets(offsets: Offsets): Result<Hull, HullRefusal> {
   const fault = faultOf(sections);
   if (fault) return refuse(fault);
   const closed = sections.map((section) => ({ x: section.x, points: fromCentreline(section.points) }));
-  const heights = closed.flatMap(({ points }) => points.map(([, z]) => z));
+  const points = closed.flatMap((section) => section.points);
+  const heights = points.map(([, z]) => z);
   return answer({
     strips: closed.slice(1).map((forward, i) => stripBetween(closed[i] as OffsetSection, forward)),
     shellFactor: offsets.shellFactor ?? 1,
@@ -65,6 +67,7 @@ export function hullFromOffsets(offsets: Offsets): Result<Hull, HullRefusal> {
     xForward: (closed.at(-1) as OffsetSection).x,
     keel: Math.min(...heights),
     top: Math.max(...heights),
+    greatestHalfBreadth: Math.max(...points.map(([halfBreadth]) => halfBreadth)),
   });
 }
 

@@ -1,8 +1,8 @@
 import { type Waterplane, waterplaneHeight } from "@/lib/frame";
-import { sum } from "@/lib/numerics/sum";
 import { answer, type Result, refuse } from "@/lib/result";
-import { breaksOf, type HalfBody, halfBodyBelow } from "./half-body";
+import { breaksOf } from "./half-body";
 import type { Hull } from "./hull";
+import { type ImmersedBody, immersedBody } from "./immersed-body";
 
 /** Volume and centres under one waterplane; metres in the ship's frame, waterplane projected on the base plane. */
 export type Hydrostatics = {
@@ -37,40 +37,21 @@ export type AfloatRefusal =
  *     BM_T = I_T/V,  KM_T = z_B + BM_T·(1 + c²)   c = tan(heel)
  *     BM_L = I_L/V,  KM_L = z_B + BM_L·(1 + b²)   b = −trim/L
  *
- * The shell factor multiplies every moulded integral, of the waterplane too: plating widens the waterplane about as much as
- * it adds to the volume, and only so is BM the rate at which the centre of buoyancy moves. Appendages add volume and moments.
+ * Shell factor and appendages are in it as `immersedBody` says.
  * Mirrored heel gives mirrored results to the last digit. Relative error of the ruled surface's integrals about 1e-10.
  * Refuses a hull that the water does not reach, and one wholly below it.
  *
  * Source: buoyancy's moments under an inclined plane, common practice; KM at a heel from dy_B/dc = BM and dz_B/dc = c·BM.
  */
 export function hydrostaticsAt(hull: Hull, plane: Waterplane): Result<Hydrostatics, AfloatRefusal> {
-  const starboard = halfBodyBelow(hull, plane, plane.tanHeel);
-  const port = plane.tanHeel === 0 ? starboard : halfBodyBelow(hull, plane, -plane.tanHeel);
-  const body = immersedBody(hull, starboard, port);
+  const body = immersedBody(hull, plane);
   const { draftAtAp, slopeAlong } = plane;
   if (!(body.volume > 0)) return refuse({ type: "NoWaterInHull", keel: hull.keel, draftAtAp, slopeAlong });
   if (!(body.area > 0)) return refuse({ type: "HullUnderWater", top: hull.top, draftAtAp, slopeAlong });
   return answer({ ...centresOf(body, plane), deckEdgeImmersed: isDeckEdgeImmersed(hull, plane) });
 }
 
-function immersedBody(hull: Hull, starboard: HalfBody, port: HalfBody): HalfBody {
-  const { shellFactor: f, appendages } = hull;
-  return {
-    volume: f * (starboard.volume + port.volume) + sum(appendages.map((a) => a.volume)),
-    momentX: f * (starboard.momentX + port.momentX) + sum(appendages.map((a) => a.volume * a.x)),
-    momentY: f * (starboard.momentY - port.momentY) + sum(appendages.map((a) => a.volume * a.y)),
-    momentZ: f * (starboard.momentZ + port.momentZ) + sum(appendages.map((a) => a.volume * a.z)),
-    area: f * (starboard.area + port.area),
-    areaX: f * (starboard.areaX + port.areaX),
-    areaY: f * (starboard.areaY - port.areaY),
-    areaXX: f * (starboard.areaXX + port.areaXX),
-    areaXY: f * (starboard.areaXY - port.areaXY),
-    areaYY: f * (starboard.areaYY + port.areaYY),
-  };
-}
-
-function centresOf(body: HalfBody, plane: Waterplane): Omit<Hydrostatics, "deckEdgeImmersed"> {
+function centresOf(body: ImmersedBody, plane: Waterplane): Omit<Hydrostatics, "deckEdgeImmersed"> {
   const vcb = body.momentZ / body.volume;
   const lcf = body.areaX / body.area;
   const tcf = body.areaY / body.area;
