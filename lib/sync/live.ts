@@ -39,6 +39,8 @@ export type ReadingDue = {
   readonly slotKey: string;
   readonly state: SlotState;
   readonly readings: readonly StandingReading[];
+  /** the acts a resolve has to name to settle the slot */
+  readonly heads: readonly string[];
 };
 
 /** One head standing in a slot. */
