@@ -3,12 +3,12 @@
 import { zodResolver } from "@hookform/resolvers/zod";
 import { useForm } from "react-hook-form";
 import { z } from "zod";
-import { typedNumber } from "@/components/readings/pad/typed-number";
 import { Button } from "@/components/ui/button";
 import { ChoiceField } from "@/components/ui/choice-field";
 import { numberSchema } from "@/components/ui/number-schema";
 import { QuantityField } from "@/components/ui/quantity-field";
 import { TextField } from "@/components/ui/text-field";
+import { typedNumber } from "@/components/ui/typed-number";
 import { conditionValueSchema } from "@/lib/record/readings-schema";
 
 export type Conditions = z.infer<typeof conditionValueSchema>;

@@ -1,5 +1,5 @@
 import { z } from "zod";
-import { typedNumber } from "@/components/readings/pad/typed-number";
+import { typedNumber } from "./typed-number";
 
 type Limits = { readonly least?: number; readonly most?: number /** said when the number is out of its limits */; readonly sense?: string };
 
