@@ -45,13 +45,21 @@ async function serve(port, demo) {
 /** Hands SIGINT and SIGTERM on to the server and lets it end its work; tells whether one came. */
 function stopWithUs(server) {
   let stopped = false;
-  for (const signal of ["SIGINT", "SIGTERM"]) {
-    process.on(signal, () => {
-      stopped = true;
-      server.kill("SIGTERM");
-    });
-  }
+  const stop = () => {
+    stopped = true;
+    server.kill("SIGTERM");
+  };
+  for (const signal of ["SIGINT", "SIGTERM"]) process.on(signal, stop);
+  stopWithNpm(stop);
   return () => stopped;
+}
+
+// npm ends on SIGTERM without telling its children: whoever was started by it looks whether it is still there
+function stopWithNpm(stop) {
+  if (process.env.npm_lifecycle_event === undefined) return;
+  const npm = process.ppid;
+  const watch = setInterval(() => process.ppid !== npm && stop(), 250);
+  watch.unref();
 }
 
 async function answers(url, server) {
