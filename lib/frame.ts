@@ -40,6 +40,7 @@ export function slopeAlongFromTrim(trim: number, lbp: number): number {
   return negated(trim) / lbp;
 }
 
+/** The heel of a waterplane as an angle, positive starboard side down [°]. */
 export function heelDegreesOf(plane: Waterplane): number {
   return (Math.atan(plane.tanHeel) * 180) / Math.PI;
 }

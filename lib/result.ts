@@ -8,10 +8,12 @@ export type Refusal = { readonly type: string; readonly path?: string };
 
 export type Result<T, R extends Refusal = Refusal> = { readonly ok: true; readonly value: T } | { readonly ok: false; readonly refusal: R };
 
+/** A result that holds its value. */
 export function answer<T>(value: T): { readonly ok: true; readonly value: T } {
   return { ok: true, value };
 }
 
+/** A result that holds why there is no value. */
 export function refuse<R extends Refusal>(refusal: R): { readonly ok: false; readonly refusal: R } {
   return { ok: false, refusal };
 }
