@@ -56,4 +56,4 @@ const result = await build({
   logLevel: "warning",
 });
 if (result.errors.length) process.exit(1);
-console.log(`service-worker.js: ${entries.length} precache entries, ${count} files, ${(size / 1024).toFixed(0)} KiB`);
+console.log(`service-worker.js: ${entries.length} precache entries, ${count} files, ${Math.round(size / 1024)} KiB`);

@@ -8,7 +8,7 @@ export const root = fileURLToPath(new URL("../..", import.meta.url));
 
 const generated = /^(\.git|node_modules|\.next.*|\.data.*|test-results|playwright-report)$/;
 const generatedFile =
-  /(^|\/)(next-env\.d\.ts|.*\.tsbuildinfo|\.install-lock|\.env.*)$|^public\/(sw|service-worker)\.js(\.map)?$|^tests\/pictures\//;
+  /(^|\/)(next-env\.d\.ts|.*\.tsbuildinfo|\.install-lock|\.env.*)$|^public\/service-worker\.js(\.map)?$|^tests\/pictures\//;
 const textual = /(\.(ts|tsx|mjs|js|json|css|md|sql|csv|svg|yml|html)|\/run|(^|\/)\.[a-z]+)$/;
 const code = /\.(ts|tsx|mjs|js)$/;
 

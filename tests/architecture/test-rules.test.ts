@@ -1,7 +1,7 @@
 import { describe, expect, test } from "vitest";
-import { codeFiles } from "./project";
+import { codeFiles, projectPaths } from "./project";
 import { sourceOf } from "./source";
-import { fileWithoutTests, mockedModules, repeatedTitles, testsWithoutExpectation, unrunTests } from "./test-rules";
+import { fileWithoutTests, mockedModules, repeatedTitles, testsWithoutExpectation, testsWithoutSource, unrunTests } from "./test-rules";
 
 const sources = codeFiles.filter((file) => /\.(test|spec)\.tsx?$/.test(file.path)).map(sourceOf);
 
@@ -9,6 +9,10 @@ describe("the project's tests", () => {
   const rules = { unrunTests, testsWithoutExpectation, fileWithoutTests, repeatedTitles, mockedModules };
   test.each(Object.entries(rules))("have nothing for %s", (_, rule) => {
     expect(sources.flatMap(rule)).toEqual([]);
+  });
+
+  test("mirror the source path for path", () => {
+    expect(testsWithoutSource(projectPaths)).toEqual([]);
   });
 });
 
@@ -39,6 +43,11 @@ describe("the rules refuse", () => {
   test("a title that stands twice in one chapter", () => {
     expect(repeatedTitles(invented(`test${expecting} test${expecting}`))).toHaveLength(1);
     expect(repeatedTitles(invented(`describe("x", () => { test${expecting} }); describe("y", () => { test${expecting} });`))).toEqual([]);
+  });
+
+  test("a test whose source is not there", () => {
+    const paths = ["lib/a.ts", "tests/lib/a.test.ts", "tests/lib/a.slow.test.ts", "tests/lib/b.test.ts", "tests/published/c.test.ts"];
+    expect(testsWithoutSource(paths)).toEqual(["tests/lib/b.test.ts mirrors no source lib/b"]);
   });
 
   test("an imitation of our own module", () => {

@@ -104,3 +104,12 @@ function lastOf(node: Node): string {
   if (node.type === "CallExpression") return lastOf(node.callee);
   return node.type === "TaggedTemplateExpression" ? lastOf(node.tag) : "";
 }
+
+/** Tests mirror the source path for path: tests/lib/numerics/sum.test.ts stands for lib/numerics/sum.ts. */
+export function testsWithoutSource(paths: readonly string[]): readonly Finding[] {
+  const known = new Set(paths.map((path) => path.replace(/\.tsx?$/, "")));
+  return paths.flatMap((path) => {
+    const mirrored = /^tests\/((?:lib|db|worker|components|app)\/.*?)(?:\.slow)?\.test\.tsx?$/.exec(path)?.[1];
+    return mirrored === undefined || known.has(mirrored) ? [] : [`${path} mirrors no source ${mirrored}`];
+  });
+}
