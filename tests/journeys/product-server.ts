@@ -45,11 +45,16 @@ export class ProductServer {
     }
   }
 
-  /** Runs one of the project's TypeScript commands on this server's data. */
-  async command(file: string, ...args: string[]): Promise<void> {
+  /** Runs one of the project's TypeScript commands on this server's data, and gives what it prints. */
+  async command(file: string, ...args: string[]): Promise<string> {
     const child = this.spawned(["node_modules/tsx/dist/cli.mjs", "--conditions=react-server", file, ...args]);
-    const [code] = await once(child, "exit");
+    let printed = "";
+    child.stdout?.on("data", (chunk) => {
+      printed += chunk;
+    });
+    const [code] = await once(child, "close");
     if (code !== 0) throw new Error(`${file} ended with ${code}:\n${this.output}`);
+    return printed;
   }
 
   /** Asks the server to end, and waits until it has. */
