@@ -40,7 +40,8 @@ async function playwrightReport(options) {
   return { report, output };
 }
 
-function stepOfReport(name, report, output) {
+/** The sums of one report: what did not pass at once has failed, whether it ran or not. */
+export function stepOfReport(name, report, output) {
   const tests = testsOf(report.suites);
   const failures = [...report.errors.map((error) => error.message ?? output), ...tests.filter((test) => !test.ok).map(testFailure)];
   if (tests.length === 0 && failures.length === 0) failures.push("No journey was found.");

@@ -27,7 +27,8 @@ async function vitestReport(folders, exclude) {
   return { report, code, output };
 }
 
-function stepOfReport(name, report, code, output) {
+/** The sums of one report: what did not pass has failed, whether it ran or not. */
+export function stepOfReport(name, report, code, output) {
   const tests = report.testResults.flatMap((file) => file.assertionResults.map((test) => ({ file: file.name, ...test })));
   const failures = [
     ...report.testResults.filter(didNotLoad).map(loadFailure),

@@ -28,6 +28,7 @@ export const importTable: readonly TableRow[] = [
   { part: "components", mayImport: ["lib/*", "components/use-*"] },
   { part: "components/use-*", mayImport: ["lib/*", "components", "worker", "db/device"] },
   { part: "app", mayImport: ["lib/*", "components", "components/use-*", "worker", "db/schema", "db/server"] },
+  { part: "instrumentation.ts", mayImport: ["db/server"] },
 ];
 
 /** The packages that the method may stand on: neither knows a clock, a network or a machine. */
