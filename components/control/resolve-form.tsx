@@ -29,8 +29,7 @@ export function ResolveForm({ due, heads, stations, onResolve }: ResolveFormProp
   });
   const { errors } = form.formState;
   const id = `resolve-${due.slotKey}`;
-  const events = heads.map((head) => head.event);
-  const save = form.handleSubmit(({ choice, reason }) => onResolve(events, due.slot, choice, reason));
+  const save = form.handleSubmit(({ choice, reason }) => onResolve(due.heads, due.slot, choice, reason));
   const choice = (value: string, words: ReactNode) => (
     <label key={value} className="flex min-h-tap items-center gap-3">
       <input type="radio" value={value} className="h-5 w-5 accent-redlead" {...form.register("choice")} />
