@@ -1,0 +1,6 @@
+/** Called once by Next when the server starts. */
+export async function register(): Promise<void> {
+  if (process.env.NEXT_RUNTIME !== "nodejs" || process.env.NEXT_PHASE === "phase-production-build") return;
+  const { startServer } = await import("./db/server/start");
+  startServer();
+}
