@@ -7,7 +7,7 @@ export type MadeCode = { readonly code: string; readonly expiresAt: string; read
 export function Enrolment({ made, origin }: { made: MadeCode; origin: string }) {
   return (
     <section aria-label={`Code for ${made.personName}`} className="flex flex-wrap items-center gap-6 rounded border-2 border-ink p-4">
-      <QrCode text={`${origin}/join?code=${made.code}`} label={`QR code that opens the page to join with the code ${made.code}`} />
+      <QrCode text={`${origin}/join#code=${made.code}`} label={`QR code that opens the page to join with the code ${made.code}`} />
       <div>
         <p>For {made.personName}, once, on one phone:</p>
         <p className="whitespace-nowrap font-bold font-mono text-figure sm:text-signal">{made.code}</p>
