@@ -1,6 +1,8 @@
+import type { z } from "zod";
 import { typedNumber, typedText } from "@/components/ui/typed-number";
 import { restingPoint } from "@/lib/inclining/resting-point";
 import type { BattenMode, BattenValue } from "@/lib/inclining/test-readings";
+import type { battenValueSchema } from "@/lib/record/readings-schema";
 import { answer, type Result, refuse } from "@/lib/result";
 import type { JobSheet } from "@/lib/sync/job-sheet";
 import { type PadKey, typedAfter } from "../pad/typed-keys";
@@ -15,6 +17,9 @@ export type BattenEntry = {
   readonly marks: Readonly<Record<Leg, readonly string[]>>;
   readonly typing: Readonly<Record<Leg, string>>;
 };
+
+/** As an event holds it. */
+export type KeptBatten = z.infer<typeof battenValueSchema>;
 
 export type EntryRefusal =
   | { readonly type: "NothingTyped"; readonly leg: Leg }
@@ -64,7 +69,7 @@ export function restOf(entry: BattenEntry, leg: Leg): number | null {
  * The reading as it is kept, in the order typed.
  * Refused: a leg without a number; a number the station's scale does not hold; too few turning points.
  */
-export function battenValue(entry: BattenEntry, station: Station): Result<BattenValue, EntryRefusal> {
+export function battenValue(entry: BattenEntry, station: Station): Result<KeptBatten, EntryRefusal> {
   for (const leg of legsOf(station.instrument)) {
     const refusal = legRefusal(entry, leg, station);
     if (refusal) return refuse(refusal);

@@ -4,7 +4,7 @@ import type { ReadingValue } from "@/lib/sync/event";
 import type { Slot } from "@/lib/sync/slot";
 import type { Station } from "./batten-entry";
 
-type Read = { readonly slot: Slot; readonly value: ReadingValue };
+export type Read = { readonly slot: Slot; readonly value: ReadingValue };
 
 /** One station's own readings, as single numbers: where the bob rested, or the difference of the levels (starboard − port). */
 export function earlierRests(readings: readonly Read[], station: Station, exceptMove: number): number[] {
@@ -24,14 +24,15 @@ export function restAtZero(readings: readonly Read[], station: Station): number 
 
 /** One number for a batten reading as it is kept; null where its marks give none. */
 export function restOfValue(value: BattenValue): number | null {
-  if ("valuesMm" in value) return rest(value.mode, value.valuesMm);
-  if ("valuesDegrees" in value) return rest(value.mode, value.valuesDegrees);
-  const port = rest(value.mode, value.portMm);
-  const starboard = rest(value.mode, value.starboardMm);
+  if ("valuesMm" in value) return restOn(value.mode, value.valuesMm);
+  if ("valuesDegrees" in value) return restOn(value.mode, value.valuesDegrees);
+  const port = restOn(value.mode, value.portMm);
+  const starboard = restOn(value.mode, value.starboardMm);
   return port === null || starboard === null ? null : starboard - port;
 }
 
-function rest(mode: BattenValue["mode"], values: readonly number[]): number | null {
+/** The resting point of one scale or leg; null where its marks give none. */
+export function restOn(mode: BattenValue["mode"], values: readonly number[]): number | null {
   const point = restingPoint(mode, values);
   return point.ok ? point.value.value : null;
 }

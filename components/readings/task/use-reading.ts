@@ -13,6 +13,9 @@ type Intent = { readonly of: Pick<OwnReading, "reading" | "head"> | null };
 type Kept<T> = { readonly intent: Intent | null; readonly form: T };
 export type Saved = { readonly value: ReadingValue; readonly reading: string; readonly head: string; readonly corrected: boolean };
 
+/** A draft that the phone's store refused. */
+export type Failure = { readonly draft: EventDraft };
+
 /** One slot on this phone: what was read in it, what is being typed, and the saving of it. */
 export function useReading<T>(sheet: JobSheet, author: string, slot: Slot, empty: T) {
   const key = slotKey(slot);
@@ -20,7 +23,7 @@ export function useReading<T>(sheet: JobSheet, author: string, slot: Slot, empty
   const { entry, change, drop, settled } = useUnfinishedEntry<Kept<T>>(sheet.test.id, key, { intent: null, form: empty });
   const [saved, setSaved] = useState<Saved | null>(null);
   const [saving, setSaving] = useState(false);
-  const [failed, setFailed] = useState<{ readonly draft: EventDraft } | null>(null);
+  const [failed, setFailed] = useState<Failure | null>(null);
   const standing = own?.filter((each) => each.slotKey === key);
 
   const act = { test: sheet.test.id, jobTag: sheet.tag, author, slot, reason: null };
@@ -30,7 +33,7 @@ export function useReading<T>(sheet: JobSheet, author: string, slot: Slot, empty
     setFailed(null);
     await settled();
     try {
-      const event = await appendEvent({ ...draft, capturedAt: draft.capturedAt });
+      const event = await appendEvent(draft);
       then(event.id);
       announceSaved();
     } catch {
@@ -68,7 +71,8 @@ export function useReading<T>(sheet: JobSheet, author: string, slot: Slot, empty
     standing: standing ?? [],
     form: entry?.form ?? empty,
     intent: entry?.intent ?? null,
-    type: (form: T) => change({ intent: entry?.intent ?? { of: null }, form }),
+    // a key pressed while the reading is on its way to the disk would bring the entry back to life
+    type: (form: T) => saving || change({ intent: entry?.intent ?? { of: null }, form }),
     begin,
     drop,
     save,

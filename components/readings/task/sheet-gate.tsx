@@ -1,0 +1,53 @@
+"use client";
+
+import Link from "next/link";
+import { useSearchParams } from "next/navigation";
+import { type ReactNode, Suspense } from "react";
+import { buttonClass } from "@/components/ui/button";
+import { Notice } from "@/components/ui/notice";
+import type { Task } from "./cautions";
+import { CautionsGate } from "./cautions-gate";
+import { type SheetHere, useJobSheet } from "./use-job-sheet";
+
+type SheetGateProps = { task: Task; children: (here: SheetHere, query: URLSearchParams) => ReactNode };
+
+/** Opens a task once its test is known on this phone and its cautions are confirmed. */
+export function SheetGate(props: SheetGateProps) {
+  return (
+    <Suspense fallback={<Looking />}>
+      <Gate {...props} />
+    </Suspense>
+  );
+}
+
+function Gate({ task, children }: SheetGateProps) {
+  const query = useSearchParams();
+  const here = useJobSheet(query.get("test"));
+  if (here === undefined) return <Looking />;
+  if (here === null) return <NoSheet />;
+  return (
+    <CautionsGate task={task} test={here.sheet.test.id} person={here.person.id}>
+      {children(here, new URLSearchParams(query))}
+    </CautionsGate>
+  );
+}
+
+function Looking() {
+  return <p className="py-8 text-center text-ink-soft">Opening the job sheet on this phone</p>;
+}
+
+function NoSheet() {
+  return (
+    <div className="flex flex-col gap-4 py-4">
+      <Notice tone="caution" title="This test is not on this phone">
+        Pick one that is, or fetch it where there is signal: enrol the phone with a code from the lead.
+      </Notice>
+      <Link href="/readings" className={buttonClass("now")}>
+        Tests on this phone
+      </Link>
+      <Link href="/join" className={buttonClass("plain")}>
+        Enrol this phone
+      </Link>
+    </div>
+  );
+}
