@@ -1,11 +1,10 @@
-import { Refused } from "@/components/ui/refused";
+import { LostPage } from "@/components/ui/lost-page";
 
 export default function Forbidden() {
   return (
-    <main className="mx-auto max-w-page p-4">
-      <Refused title="Not for your part">
-        Your part in this test, or on this server, does not include this page. An administrator can change that.
-      </Refused>
-    </main>
+    <LostPage title="This page is not open to you">
+      You are signed in, but have no part in this test that shows it: readers must not see each other’s numbers, and the rest is for those
+      who were given a part. Ask the lead or the engineer of the test.
+    </LostPage>
   );
 }

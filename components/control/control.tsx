@@ -16,8 +16,8 @@ export type ControlProps = {
 
 /** Central control, for those who order and for those who only watch. */
 export function Control(props: ControlProps) {
-  const role = props.roles.includes("lead") ? "lead" : props.roles.includes("engineer") ? "engineer" : null;
-  return role ? <LedControl {...props} role={role} /> : <WatchedControl {...props} />;
+  const orders = props.roles.includes("lead") || props.roles.includes("engineer");
+  return orders ? <LedControl {...props} /> : <WatchedControl {...props} />;
 }
 
 function WatchedControl({ test, first }: ControlProps) {

@@ -51,7 +51,7 @@ export function EnrolForm({ onMake }: EnrolFormProps) {
         </Button>
       </form>
       {refused ? <Notice tone="refused">{refused}</Notice> : null}
-      {made ? <Enrolment made={made} origin={window.location.origin} /> : null}
+      {made ? <Enrolment made={made} /> : null}
     </div>
   );
 }

@@ -16,11 +16,11 @@ import { useLiveTest } from "./use-live-test";
 import { useSending } from "./use-sending";
 
 /** Central control in the hands of those who order: what they do is saved on this device first. */
-export function LedControl({ test, person, first, role }: ControlProps & { role: "lead" | "engineer" }) {
+export function LedControl({ test, person, first }: ControlProps) {
   useSending();
   const { snapshot, link } = useLiveTest(test, first);
   const makeCode = useEnrolmentCodes(test);
-  const { device, prepare } = useLeadDevice({ test, person, role }, makeCode);
+  const { device, prepare } = useLeadDevice(test, person.id);
   const { acts, unsent, failed } = useLeadActs({ test, person: person.id, jobTag: device.state === "ready" ? device.jobTag : "" });
   const seen = useMemo(() => snapshotWithUnsent(snapshot, unsent), [snapshot, unsent]);
   return (

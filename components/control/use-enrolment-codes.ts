@@ -3,11 +3,11 @@
 import { z } from "zod";
 import type { MadeCode } from "./enrolment";
 
-export type NewCode = { readonly personName: string; readonly role: "reader" | "lead" | "engineer" | "witness"; readonly account?: string };
+export type NewCode = { readonly personName: string; readonly role: "reader" | "lead" | "engineer" | "witness" };
 export type MakeCode = (given: NewCode) => Promise<MadeCode | { readonly refused: string }>;
 
-const madeSchema = z.object({ code: z.string(), expiresAt: z.string() });
-const refusedSchema = z.object({ message: z.string() });
+const madeSchema = z.object({ code: z.string(), expiresAt: z.string(), url: z.url() });
+const refusedSchema = z.object({ error: z.string() });
 
 /** Makes codes that let phones into a test. */
 export function useEnrolmentCodes(test: string): MakeCode {
@@ -29,5 +29,5 @@ function madeFrom(answer: unknown, personName: string): MadeCode | { refused: st
   const made = madeSchema.safeParse(answer);
   if (made.success) return { ...made.data, personName };
   const refused = refusedSchema.safeParse(answer);
-  return { refused: refused.success ? refused.data.message : "The server made no code, and did not say why." };
+  return { refused: refused.success ? refused.data.error : "The server made no code, and did not say why." };
 }

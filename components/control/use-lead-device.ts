@@ -2,27 +2,26 @@
 
 import { useLiveQuery } from "dexie-react-hooks";
 import { useState } from "react";
-import { signedIn } from "@/components/join/signed-in";
+import { z } from "zod";
 import { deviceIdentity, enrolledIdentity, publicKeyOf, updateIdentity } from "@/db/device/device-identity";
 import { jobSheet } from "@/db/device/job-sheets";
 import { fetchAllJobSheets } from "@/worker/job-sheet-refresh";
-import type { MakeCode } from "./use-enrolment-codes";
 
 export type LeadDevice =
   | { readonly state: "asking" }
   | { readonly state: "ready"; readonly jobTag: string }
   | { readonly state: "stranger"; readonly busy: boolean; readonly refused: string | null };
 
-type Lead = { readonly test: string; readonly person: { readonly id: string; readonly name: string }; readonly role: "lead" | "engineer" };
+const refusedSchema = z.object({ error: z.string() });
 
 /** This device as one that may give orders: it has its own key and number, and the job sheet of this test for this person. */
-export function useLeadDevice({ test, person, role }: Lead, makeCode: MakeCode) {
+export function useLeadDevice(test: string, person: string) {
   const [busy, setBusy] = useState(false);
   const [refused, setRefused] = useState<string | null>(null);
-  const jobTag = useLiveQuery(() => jobTagFor(test, person.id), [test, person.id]);
+  const jobTag = useLiveQuery(() => jobTagFor(test, person), [test, person]);
   const prepare = async () => {
     setBusy(true);
-    setRefused(await whyNotPrepared({ personName: person.name, role, account: person.id }, makeCode));
+    setRefused(await whyNotPrepared());
     setBusy(false);
   };
   return { device: deviceFrom(jobTag, busy, refused), prepare };
@@ -39,19 +38,24 @@ async function jobTagFor(test: string, person: string): Promise<string | null> {
   return identity && held?.sheet.person.id === person ? held.sheet.tag : null;
 }
 
-/** Enrols this device by a code of its own, as a phone is; null when it may give orders from now on. */
-async function whyNotPrepared(given: Parameters<MakeCode>[0], makeCode: MakeCode): Promise<string | null> {
+/** Gives this device a key and a number that the server knows; null when it may give orders from now on. */
+async function whyNotPrepared(): Promise<string | null> {
   try {
-    const made = await makeCode(given);
-    if ("refused" in made) return made.refused;
-    const deviceName = "Wheelhouse";
-    const identity = await enrolledIdentity(deviceName);
-    const publicKey = JSON.stringify(await publicKeyOf(identity));
-    await signedIn({ code: made.code, device: identity.device, deviceName, publicKey });
+    const identity = await enrolledIdentity("Wheelhouse");
+    const device = { device: identity.device, name: identity.deviceName, publicKey: await publicKeyOf(identity) };
+    const headers = { "content-type": "application/json" };
+    const response = await fetch("/api/v1/devices", { method: "POST", headers, body: JSON.stringify(device) });
+    if (!response.ok) return sentenceOf(await response.json());
     await updateIdentity({ person: null, server: null });
-    await fetchAllJobSheets();
-    return null;
-  } catch (error) {
-    return error instanceof Error ? error.message : "This device could not be made ready.";
+    return (await fetchAllJobSheets()) > 0
+      ? null
+      : "The server gives this device no job sheet: the test may have been issued or handed over.";
+  } catch {
+    return "The server does not answer; it has to know this device once.";
   }
+}
+
+function sentenceOf(answer: unknown): string {
+  const refused = refusedSchema.safeParse(answer);
+  return refused.success ? refused.data.error : "The server does not take this device, and did not say why.";
 }

@@ -49,7 +49,7 @@ async function signedIn(credentials: Credentials): Promise<string | null> {
   try {
     const answer = await signIn("credentials", { ...credentials, redirect: false });
     if (answer?.ok) return null;
-    if (answer?.status === 429) return "Too many attempts. Wait a minute and try again.";
+    if (answer?.error === "TooManyAttempts") return "Too many attempts. Wait a while and try again.";
     return "No account has this e-mail and password together.";
   } catch {
     return "The server does not answer. Check that this device is on the ship's or the office's network.";

@@ -1,0 +1,8 @@
+import type { ReactNode } from "react";
+import { signedInPerson } from "@/app/session";
+import { OfficeShell } from "@/components/ui/office-shell";
+
+export default async function Layout({ children }: { children: ReactNode }) {
+  const person = await signedInPerson();
+  return <OfficeShell person={person?.name ?? null}>{children}</OfficeShell>;
+}

@@ -1,0 +1,1 @@
+export { FailedPage as default } from "@/components/ui/failed-page";

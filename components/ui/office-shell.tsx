@@ -1,0 +1,28 @@
+import Link from "next/link";
+import type { ReactNode } from "react";
+import { PageHeader } from "./page-header";
+import { SignOut } from "./sign-out";
+
+/** What surrounds the pages of wheelhouse and office: the name, the tests, who is signed in. */
+export function OfficeShell({ person, children }: { person: string | null; children: ReactNode }) {
+  return (
+    <>
+      <PageHeader home="/">
+        <nav aria-label="Places">
+          <Link
+            href="/tests"
+            prefetch={false}
+            className="inline-flex min-h-tap items-center underline decoration-ink-line underline-offset-4 hover:decoration-ink"
+          >
+            Tests
+          </Link>
+        </nav>
+        {person ? <span className="text-small">{person}</span> : null}
+        {person ? <SignOut /> : null}
+      </PageHeader>
+      <main id="main" className="mx-auto max-w-page px-4 py-5">
+        {children}
+      </main>
+    </>
+  );
+}
