@@ -9,7 +9,7 @@ import type { Act } from "./act";
 import { type Database, inTransaction } from "./connection";
 import { type Device, type DeviceRefusal, deviceRefusal, type NewDevice, registerDevice } from "./devices";
 import { writeEntry } from "./ledger-entries";
-import { grantRole } from "./role-grants";
+import { grantRole, grantsOf } from "./role-grants";
 
 // nothing that can be taken for something else when it is read aloud or in poor light: no 0 O, 1 I L, 8 B, 5 S, 2 Z
 const alphabet = "34679ACDEFGHJKMNPQRTUVWXY";
@@ -34,28 +34,37 @@ export type EnrolmentRefusal =
   | { type: "AccountClosed" }
   | DeviceRefusal;
 
-/** A new code for one phone, shown once (`ABCD-EFGH`): the server keeps only its hash. */
+export type MadeEnrolment = { readonly id: string; readonly code: string; readonly expiresAt: string };
+
+/**
+ * A new code for one phone, shown once (`ABCD-EFGH`): the server keeps only its hash.
+ *
+ * Refused: a code for an account that is neither the maker's own nor that of somebody who reads in this test and does
+ * nothing else. Whoever holds a code is signed in as its person: it must not open more than its maker may give.
+ */
 export function makeEnrolment(
   db: Database,
   test: string,
   given: NewEnrolment,
   act: Act & { by: string },
-): { code: string; expiresAt: string; id: string } {
+): Result<MadeEnrolment, { type: "AccountNotYours"; account: string }> {
+  const { role, personName, account = null } = given;
+  if (account !== null && account !== act.by && !isOnlyReader(db, account, test)) return refuse({ type: "AccountNotYours", account });
   const code = Array.from({ length: codeLength }, () => alphabet[randomInt(alphabet.length)]).join("");
   const id = randomUUID();
   const expiresAt = new Date(Date.parse(act.at) + hoursOpen * 3_600_000).toISOString();
   inTransaction(db, () => {
-    const row = { id, codeHash: hashOf(code), test, role: given.role, personName: given.personName, account: given.account ?? null };
-    db.insert(enrolmentCodes)
-      .values({ ...row, createdAt: act.at, createdBy: act.by, expiresAt })
-      .run();
-    writeEntry(db, test, {
-      ...act,
-      what: "enrolment.make",
-      after: { enrolment: id, role: given.role, person: given.personName, expiresAt },
-    });
+    const row = { id, codeHash: hashOf(code), test, role, personName, account, createdAt: act.at, createdBy: act.by, expiresAt };
+    db.insert(enrolmentCodes).values(row).run();
+    writeEntry(db, test, { ...act, what: "enrolment.make", after: { enrolment: id, role, person: personName, expiresAt } });
   });
-  return { code: `${code.slice(0, 4)}-${code.slice(4)}`, expiresAt, id };
+  return answer({ id, code: `${code.slice(0, 4)}-${code.slice(4)}`, expiresAt });
+}
+
+function isOnlyReader(db: Database, id: string, test: string): boolean {
+  const account = accountById(db, id);
+  if (!account || account.passwordHash !== null || account.isAdministrator || account.isEngineer) return false;
+  return grantsOf(db, id).every((grant) => grant.test === test && grant.role === "reader");
 }
 
 export function enrolmentsOf(db: Database, test: string): Enrolment[] {

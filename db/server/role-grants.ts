@@ -24,6 +24,15 @@ export function isRoleHeldAt(db: Database, account: string, test: string, roles:
   return rolesOf(db, account, test, at).some((role) => roles.includes(role));
 }
 
+/** Every role a person was ever given, in every test. */
+export function grantsOf(db: Database, account: string): Grant[] {
+  return db
+    .select({ test: roleGrants.test, account: roleGrants.account, role: roleGrants.role })
+    .from(roleGrants)
+    .where(eq(roleGrants.account, account))
+    .all();
+}
+
 /** Everybody who holds a role in the test, with each role. */
 export function peopleOf(db: Database, test: string, at: string): { account: string; name: string; role: Role; fromAt: string }[] {
   return db

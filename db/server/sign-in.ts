@@ -1,10 +1,9 @@
 import { z } from "zod";
-import type { Account } from "./accounts";
-import { accountSigningIn } from "./accounts";
+import { type Account, accountSigningIn } from "./accounts";
 import { Attempts } from "./attempts";
 import type { Database } from "./connection";
 import { newDeviceSchema } from "./devices";
-import { enrol } from "./enrolments";
+import { type EnrolmentRefusal, enrol } from "./enrolments";
 import type { Seal } from "./sessions";
 
 const hour = 3_600_000;
@@ -14,33 +13,46 @@ const phoneHours = 30 * 24;
 
 export type SignedIn = { readonly id: string; readonly name: string; readonly seal: Omit<Seal, "sub"> };
 
+const enrolmentSentences: Record<EnrolmentRefusal["type"], string> = {
+  CodeUnknown: "The server does not know this code. Look at each letter again, or ask the lead for a new one.",
+  CodeExpired: "This code is too old. Ask the lead for a new one.",
+  CodeUsed: "This code has let a phone in before, and each does so once. Ask the lead for a new one.",
+  CodeRevoked: "This code was taken back. Ask the lead for a new one.",
+  AccountClosed: "The account this code is for is closed. Ask the lead.",
+  DeviceRevoked: "This phone was taken out of the test. Ask the lead; another phone can be let in.",
+  DeviceHasAnotherKey: "This phone has lost its key since it was let in. Clear this page's storage, then enrol it anew.",
+};
+
 const passwordSchema = z.object({ email: z.string().max(320), password: z.string().min(1).max(1000) });
 const enrolmentSchema = z.object({ code: z.string().max(40), device: z.string(), deviceName: z.string(), publicKey: z.string().max(2000) });
 
 const passwordAttempts = new Attempts(10);
 const codeAttempts = new Attempts(30);
 
-/** A session for e-mail and password; null where they don't belong together. Refused by throwing `TooManyAttempts`. */
+/** The session library carries a thrown message to the page: a sentence for the person. */
+export const tooManyAttempts = "Too many attempts. Wait a minute and try again.";
+
+/** A session for e-mail and password; null where they don't belong together; throws a sentence where somebody guesses. */
 export async function sessionOfAccount(db: Database, given: unknown, at: string): Promise<SignedIn | null> {
   const read = passwordSchema.safeParse(given);
   if (!read.success) return null;
   const key = read.data.email.trim().toLowerCase();
-  if (passwordAttempts.isTooMany(key, at)) throw new Error("TooManyAttempts");
+  if (passwordAttempts.isTooMany(key, at)) throw new Error(tooManyAttempts);
   const account = await accountSigningIn(db, read.data.email, read.data.password);
   if (!account) passwordAttempts.failed(key, at);
   return account ? signedIn(account, null, passwordHours, at) : null;
 }
 
-/** A session for a phone and its code. Refused by throwing the refusal's name (`CodeUsed`, `CodeExpired`, …), which the page puts into words. */
+/** A session for a phone and its code; throws the sentence that says why not. */
 export function sessionOfEnrolment(db: Database, given: unknown, at: string): SignedIn {
-  if (codeAttempts.isTooMany("code", at)) throw new Error("TooManyAttempts");
+  if (codeAttempts.isTooMany("code", at)) throw new Error(tooManyAttempts);
   const read = enrolmentSchema.safeParse(given);
   const device = newDeviceSchema.safeParse(read.success ? deviceOf(read.data) : null);
-  if (!read.success || !device.success) throw new Error("PhoneNotDescribed");
+  if (!read.success || !device.success) throw new Error("This phone did not say who it is. Load the page again.");
   const enrolled = enrol(db, read.data.code, device.data, at);
   if (enrolled.ok) return signedIn(enrolled.value.account, device.data.device, phoneHours, at);
   codeAttempts.failed("code", at);
-  throw new Error(enrolled.refusal.type);
+  throw new Error(enrolmentSentences[enrolled.refusal.type]);
 }
 
 function deviceOf({ device, deviceName, publicKey }: z.infer<typeof enrolmentSchema>): unknown {

@@ -1,6 +1,7 @@
 import type { NextRequest } from "next/server";
 import NextAuth from "next-auth";
 import { authOptions } from "@/app/auth-options";
+import { tooManyAttempts } from "@/db/server/sign-in";
 
 type Context = { params: Promise<{ nextauth: string[] }> };
 
@@ -10,7 +11,7 @@ async function handle(request: NextRequest, context: Context): Promise<Response>
 }
 
 async function isThrottled(response: Response): Promise<boolean> {
-  return response.status === 401 && (await response.clone().text()).includes("error=TooManyAttempts");
+  return response.status === 401 && (await response.clone().text()).includes(encodeURIComponent(tooManyAttempts));
 }
 
 export { handle as GET, handle as POST };

@@ -23,8 +23,9 @@ export async function POST(request: Request, { params }: Context): Promise<Respo
   if (!given.success) return refused(400, "A code needs the person's name and one of the roles reader, lead, engineer, witness.");
   if (!mayGive(access.roles, given.data.role)) return refused(403, "Only an engineer or an administrator lets an engineer in.");
   const made = makeEnrolment(database(), id, given.data, { by: access.person.id, at: new Date().toISOString() });
-  const url = `${process.env.NEXTAUTH_URL ?? new URL(request.url).origin}/join?code=${made.code}`;
-  return Response.json({ ...made, url, personName: given.data.personName, role: given.data.role }, { status: 201 });
+  if (!made.ok) return refused(403, "A code for another person's account is not yours to make.");
+  const url = `${process.env.NEXTAUTH_URL ?? new URL(request.url).origin}/join#code=${made.value.code}`;
+  return Response.json({ ...made.value, url, personName: given.data.personName, role: given.data.role }, { status: 201 });
 }
 
 // nobody gives away more than he has
