@@ -61,16 +61,15 @@ async function sentBatch(device: string, batch: readonly HeldEvent[], around: Su
 /** "more" while the queue moves; else where sending stands now. */
 async function takenIn(device: string, batch: readonly HeldEvent[], heard: Heard, around: Surroundings): Promise<Reach | "more"> {
   if (heard.type === "sign-in-needed") return paused(batch);
-  if (heard.type !== "answer" || !(await isOurServer(heard.answer))) {
-    return failed(batch, heard.type === "no-answer" ? heard.retryAfterMs : null, around);
-  }
+  if (heard.type !== "answer") return failed(batch, heard.type === "no-answer" ? heard.retryAfterMs : null, around);
+  if (!(await isOurServer(heard.answer))) return failed(batch, null, around, true);
   const changes = afterAnswer(batch, heard.answer);
   const moved = changes.filter((change) => change.state !== "saved").length;
   await keepStates([...changes, ...(await changesByComparison(device, changes, heard.answer))]);
   await updateIdentity({ server: idOf(heard.answer), clockOffsetMs: heard.clockOffsetMs });
   if (batch.length > 0 && moved === 0) return failed(batch, null, around);
   const now = new Date(around.now()).toISOString();
-  await keepSending({ reach: "reached", failures: 0, notBefore: 0, heardAt: now, ledgerHead: heard.answer.ledgerHead });
+  await keepSending({ reach: "reached", failures: 0, notBefore: 0, heardAt: now, isStranger: false, ledgerHead: heard.answer.ledgerHead });
   return (await unsentCount()) > 0 ? "more" : "reached";
 }
 
@@ -87,11 +86,11 @@ async function paused(batch: readonly HeldEvent[]): Promise<Reach> {
   return "sign-in-needed";
 }
 
-async function failed(batch: readonly HeldEvent[], retryAfter: number | null, around: Surroundings): Promise<Reach> {
+async function failed(batch: readonly HeldEvent[], retryAfter: number | null, around: Surroundings, isStranger = false): Promise<Reach> {
   await keepStates(afterSilence(sending(batch)));
   const failures = (await lastSending()).failures + 1;
   const wait = Math.max(retryDelay(failures, around.chance()), retryAfter ?? 0);
-  await keepSending({ reach: "no-answer", failures, notBefore: around.now() + wait });
+  await keepSending({ reach: "no-answer", isStranger, failures, notBefore: around.now() + wait });
   return "no-answer";
 }
 

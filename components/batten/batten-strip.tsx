@@ -1,5 +1,6 @@
 import { ticks } from "d3-array";
 import { scaleLinear } from "d3-scale";
+import { figure } from "@/lib/report/rounding";
 
 export type BattenMark = { readonly value: number; readonly label: string };
 
@@ -16,14 +17,15 @@ type BattenStripProps = {
 };
 
 const WIDTH = 360;
-const HEIGHT = 92;
-const WOOD = { top: 30, height: 34 };
+const HEIGHT = 124;
+const WOOD = { top: 30, height: 48, bottom: 78 };
+const EDGE = 16;
 
 /** The batten as it stands below deck, seen from above, port on the left: each mark where it is, the mean and the zero. */
 export function BattenStrip({ unit, marks, mean, zero, span, className = "" }: BattenStripProps) {
   const along = scaleLinear()
     .domain([...span])
-    .range([14, WIDTH - 14])
+    .range([EDGE, WIDTH - EDGE])
     .clamp(true);
   return (
     <svg
@@ -32,16 +34,16 @@ export function BattenStrip({ unit, marks, mean, zero, span, className = "" }: B
       aria-label={inWords(marks, mean, zero, unit)}
       className={`block w-full ${className}`}
     >
-      <Wood along={along} span={span} />
-      {zero === null ? null : <Zero x={along(zero)} />}
-      {marks.map((mark) => (
-        <Mark key={mark.label} x={along(mark.value)} label={mark.label} />
+      <Wood along={along} span={span} unit={unit} />
+      {zero === null || zero < span[0] || zero > span[1] ? null : <Zero x={along(zero)} />}
+      {marks.map((mark, order) => (
+        <Mark key={mark.label} x={along(mark.value)} label={mark.label} row={order % 3} />
       ))}
-      {mean === null ? null : <Mean x={along(mean)} text={`${shown(mean)} ${unit}`} />}
-      <text x={14} y={88} className="fill-port font-bold text-[11px]">
+      {mean === null ? null : <Mean x={along(mean)} text={`${shown(mean, unit)} ${unit}`} />}
+      <text x={2} y={HEIGHT - 4} className="fill-port font-bold text-[14px]">
         P
       </text>
-      <text x={WIDTH - 14} y={88} textAnchor="end" className="fill-starboard font-bold text-[11px]">
+      <text x={WIDTH - 2} y={HEIGHT - 4} textAnchor="end" className="fill-starboard font-bold text-[14px]">
         S
       </text>
     </svg>
@@ -50,37 +52,38 @@ export function BattenStrip({ unit, marks, mean, zero, span, className = "" }: B
 
 type Along = (value: number) => number;
 
-function Wood({ along, span }: { along: Along; span: readonly [number, number] }) {
+function Wood({ along, span, unit }: { along: Along; span: readonly [number, number]; unit: "mm" | "°" }) {
   const fine = ticks(span[0], span[1], 40);
   const named = ticks(span[0], span[1], 6);
-  const bottom = WOOD.top + WOOD.height;
   return (
     <g>
-      <rect x={2} y={WOOD.top} width={WIDTH - 4} height={WOOD.height} rx={2} className="fill-batten stroke-batten-edge" />
-      <path
-        d={`M4 ${WOOD.top + 11} C 120 ${WOOD.top + 8}, 220 ${WOOD.top + 15}, ${WIDTH - 4} ${WOOD.top + 10}`}
-        className="fill-none stroke-batten-grain"
-      />
-      <path
-        d={`M4 ${WOOD.top + 24} C 90 ${WOOD.top + 27}, 250 ${WOOD.top + 20}, ${WIDTH - 4} ${WOOD.top + 25}`}
-        className="fill-none stroke-batten-grain"
-      />
+      <rect x={1} y={WOOD.top} width={WIDTH - 2} height={WOOD.height} rx={2} className="fill-batten stroke-batten-edge" />
+      {grain.map((line) => (
+        <path key={line} d={line} className="fill-none stroke-batten-grain" />
+      ))}
       {fine.map((value) => (
         <line
           key={value}
           x1={along(value)}
           x2={along(value)}
-          y1={bottom - 6}
-          y2={bottom}
+          y1={WOOD.bottom - 8}
+          y2={WOOD.bottom}
           className="stroke-batten-ink"
           strokeWidth={0.75}
         />
       ))}
       {named.map((value) => (
         <g key={value}>
-          <line x1={along(value)} x2={along(value)} y1={bottom - 12} y2={bottom} className="stroke-batten-ink" strokeWidth={1.25} />
-          <text x={along(value)} y={bottom + 13} textAnchor="middle" className="fill-ink-soft font-mono text-[10px]">
-            {shown(value)}
+          <line
+            x1={along(value)}
+            x2={along(value)}
+            y1={WOOD.bottom - 16}
+            y2={WOOD.bottom}
+            className="stroke-batten-ink"
+            strokeWidth={1.5}
+          />
+          <text x={along(value)} y={WOOD.bottom + 16} textAnchor="middle" className="fill-ink text-[13px]">
+            {shown(value, unit)}
           </text>
         </g>
       ))}
@@ -88,11 +91,18 @@ function Wood({ along, span }: { along: Along; span: readonly [number, number] }
   );
 }
 
-function Mark({ x, label }: { x: number; label: string }) {
+const grain = [
+  `M4 40 C 120 36, 220 45, ${WIDTH - 4} 39`,
+  `M4 52 C 80 56, 190 47, ${WIDTH - 4} 53`,
+  `M4 66 C 90 70, 250 61, ${WIDTH - 4} 67`,
+] as const;
+
+// the order of the marks, on three rows so that neighbours stay legible
+function Mark({ x, label, row }: { x: number; label: string; row: number }) {
   return (
     <g>
-      <line x1={x} x2={x} y1={WOOD.top} y2={WOOD.top + WOOD.height} className="stroke-batten-ink" strokeWidth={1.5} strokeDasharray="3 2" />
-      <text x={x} y={WOOD.top + 10} dx={3} className="fill-batten-ink font-mono text-[9px]">
+      <line x1={x} x2={x} y1={WOOD.top} y2={WOOD.bottom} className="stroke-batten-ink" strokeWidth={1.5} strokeDasharray="3 2" />
+      <text x={x} y={WOOD.top + 12 + 11 * row} dx={3} className="fill-batten-ink font-bold text-[11px]">
         {label}
       </text>
     </g>
@@ -103,9 +113,14 @@ function Mean({ x, text }: { x: number; text: string }) {
   const anchor = x < 60 ? "start" : x > WIDTH - 60 ? "end" : "middle";
   return (
     <g>
-      <path d={`M${x} ${WOOD.top + 2} l-6 -11 h12 Z`} className="fill-redlead" />
-      <line x1={x} x2={x} y1={WOOD.top} y2={WOOD.top + WOOD.height} className="stroke-redlead" strokeWidth={2.5} />
-      <text x={x} y={14} textAnchor={anchor} className="fill-ink font-bold font-mono text-[14px]">
+      <path d={`M${x} ${WOOD.top + 3} l-6 -10 h12 Z`} className="fill-redlead" />
+      <line x1={x} x2={x} y1={WOOD.top} y2={WOOD.bottom} className="stroke-redlead" strokeWidth={3} />
+      <text
+        x={anchor === "middle" ? x : anchor === "start" ? 2 : WIDTH - 2}
+        y={16}
+        textAnchor={anchor}
+        className="fill-ink font-bold text-[18px]"
+      >
         {text}
       </text>
     </g>
@@ -113,16 +128,31 @@ function Mean({ x, text }: { x: number; text: string }) {
 }
 
 function Zero({ x }: { x: number }) {
-  return <path d={`M${x} ${WOOD.top + WOOD.height + 2} l-4 8 h8 Z`} className="fill-ink" aria-label="zero" />;
+  const anchor = x < 60 ? "start" : x > WIDTH - 60 ? "end" : "middle";
+  const inside = Math.min(WIDTH - 24, Math.max(24, x));
+  return (
+    <g className="fill-ink">
+      <line x1={x} x2={x} y1={WOOD.top} y2={WOOD.bottom} className="stroke-ink" strokeWidth={2} />
+      <path d={`M${x} ${WOOD.bottom + 20} l-5 9 h10 Z`} />
+      <text
+        x={anchor === "middle" ? inside + 9 : inside}
+        y={HEIGHT - 4}
+        textAnchor={anchor === "middle" ? "start" : anchor}
+        className="text-[12px]"
+      >
+        zero
+      </text>
+    </g>
+  );
 }
 
-function inWords(marks: readonly BattenMark[], mean: number | null, zero: number | null, unit: string): string {
-  const read = marks.length === 0 ? "no marks yet" : `marks at ${marks.map((mark) => shown(mark.value)).join(", ")} ${unit}`;
-  const at = mean === null ? "" : `, mean ${shown(mean)} ${unit}`;
-  return `Batten: ${read}${at}${zero === null ? "" : `, zero at ${shown(zero)} ${unit}`}`;
+function inWords(marks: readonly BattenMark[], mean: number | null, zero: number | null, unit: "mm" | "°"): string {
+  const read = marks.length === 0 ? "no marks yet" : `marks at ${marks.map((mark) => shown(mark.value, unit)).join(", ")} ${unit}`;
+  const at = mean === null ? "" : `, mean ${shown(mean, unit)} ${unit}`;
+  return `Batten: ${read}${at}${zero === null ? "" : `, zero at ${shown(zero, unit)} ${unit}`}`;
 }
 
-// a tenth of a millimetre is the finest that a pencil mark carries
-function shown(value: number): string {
-  return String(Math.round(value * 10) / 10).replace("-", "−");
+// a tenth of a millimetre is the finest that a pencil mark carries, a thousandth of a degree what an inclinometer shows
+function shown(value: number, unit: "mm" | "°"): string {
+  return figure(value, unit === "mm" ? 1 : 3).replace(/\.?0+$/, (zeros) => (zeros.startsWith(".") ? "" : zeros));
 }

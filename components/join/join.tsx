@@ -1,6 +1,5 @@
 "use client";
 
-import { useState } from "react";
 import { useServiceWorker } from "@/components/readings/shell/use-service-worker";
 import { Notice } from "@/components/ui/notice";
 import { Enrolled } from "./enrolled";
@@ -15,22 +14,18 @@ export function Join() {
   useServiceWorker();
   const checks = useSelfTest();
   const enrolment = useEnrolment();
-  const [opened, setOpened] = useState(false);
   if (enrolment.step === "done") return <Enrolled enrolment={enrolment} />;
   return (
     <div className="flex flex-1 flex-col gap-4">
       <h1 className="font-bold text-title">Enrol this phone</h1>
       <JoinForm enrolment={enrolment} ready={checks !== null && mayStart(checks)} />
       {enrolment.sentence ? <Notice tone="refused">{enrolment.sentence}</Notice> : null}
-      <details
-        open={opened || (checks !== null && !checks.every(({ passed }) => passed))}
-        onToggle={(event) => setOpened(event.currentTarget.open)}
-      >
-        <summary className="min-h-tap py-2 font-bold">
-          {checks === null ? "Self-test" : `Self-test: ${checks.filter(({ passed }) => passed).length} of ${checks.length} passed`}
-        </summary>
+      <section aria-labelledby="self-test" className="mt-auto flex flex-col gap-2 border-ink-line border-t pt-3">
+        <h2 id="self-test" className="font-bold">
+          What this phone can do
+        </h2>
         <SelfTestList checks={checks} />
-      </details>
+      </section>
     </div>
   );
 }

@@ -1,5 +1,5 @@
 import { useState } from "react";
-import { deviceIdentity, enrolledIdentity, publicKeyOf, updateIdentity } from "@/db/device/device-identity";
+import { enrolledIdentity, publicKeyOf, updateIdentity } from "@/db/device/device-identity";
 import { jobSheets } from "@/db/device/job-sheets";
 import { fetchAllJobSheets } from "@/worker/job-sheet-refresh";
 import { signedIn } from "./signed-in";

@@ -13,11 +13,13 @@ export type Sending = {
   readonly notBefore: number;
   /** when the server was last heard */
   readonly heardAt: string | null;
+  /** a server answered that is not the one this phone was enrolled at */
+  readonly isStranger: boolean;
   /** head of the test's ledger as the server last told it: this phone is its witness */
   readonly ledgerHead: string | null;
 };
 
-const neverTried: Sending = { reach: "unknown", failures: 0, notBefore: 0, heardAt: null, ledgerHead: null };
+const neverTried: Sending = { reach: "unknown", failures: 0, notBefore: 0, heardAt: null, isStranger: false, ledgerHead: null };
 
 /** The device whose events are sent next: the one with the oldest unsent event, else the phone's own number; null before enrolment. */
 export async function deviceToSend(): Promise<string | null> {

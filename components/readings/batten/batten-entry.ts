@@ -22,7 +22,7 @@ export type BattenEntry = {
 export type KeptBatten = z.infer<typeof battenValueSchema>;
 
 export type EntryRefusal =
-  | { readonly type: "NothingTyped"; readonly leg: Leg }
+  | { readonly type: "NothingTyped"; readonly leg: Leg; readonly otherLegRead: boolean }
   | { readonly type: "OutsideScale"; readonly value: number; readonly scale: readonly [number, number] }
   | { readonly type: "TooFewTurningPoints"; readonly got: number; readonly needed: number };
 
@@ -80,9 +80,11 @@ export function battenValue(entry: BattenEntry, station: Station): Result<KeptBa
   return answer({ mode, portMm: legValues(entry, "port"), starboardMm: legValues(entry, "starboard") });
 }
 
-function legRefusal(entry: BattenEntry, leg: Leg, { scale }: Station): EntryRefusal | null {
+function legRefusal(entry: BattenEntry, leg: Leg, station: Station): EntryRefusal | null {
+  const { scale } = station;
   const values = legValues(entry, leg);
-  if (values.length === 0) return { type: "NothingTyped", leg };
+  if (values.length === 0)
+    return { type: "NothingTyped", leg, otherLegRead: legsOf(station.instrument).some((each) => legValues(entry, each).length > 0) };
   const outside = values.find((value) => value < scale[0] || value > scale[1]);
   if (outside !== undefined) return { type: "OutsideScale", value: outside, scale };
   if (entry.mode === "settled" || values.length >= 3) return null;

@@ -7,7 +7,6 @@ import { TypedDigits } from "../task/typed-digits";
 import { type BattenEntry, battenValue, legValues, type Station, withKey, withMarkTaken, withoutMark } from "./batten-entry";
 import { BattenHero } from "./batten-hero";
 import { entrySentence } from "./entry-sentence";
-import { LegSwitch } from "./leg-switch";
 import { ModeSwitch } from "./mode-switch";
 import { secondLookAt } from "./second-look";
 
@@ -22,11 +21,8 @@ export function BattenScreen({ entry, station, move }: BattenScreenProps) {
   const count = legValues(form, form.leg).length;
   return (
     <div className="flex flex-1 flex-col gap-2">
-      <BattenHero form={form} station={station} unit={unit} own={own} />
-      <div className="flex gap-2">
-        <ModeSwitch mode={form.mode} onChange={(mode) => type({ ...form, mode })} />
-        {station.instrument === "u-tube" ? <LegSwitch form={form} onChange={(leg) => type({ ...form, leg })} /> : null}
-      </div>
+      <BattenHero form={form} station={station} unit={unit} own={own} onLeg={(leg) => type({ ...form, leg })} />
+      <ModeSwitch mode={form.mode} onChange={(mode) => type({ ...form, mode })} />
       <TypedDigits
         typed={form.typing[form.leg]}
         unit={unit}

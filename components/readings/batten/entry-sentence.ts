@@ -5,7 +5,7 @@ import type { EntryRefusal } from "./batten-entry";
 export function entrySentence(refusal: EntryRefusal, unit: "mm" | "°"): string | null {
   switch (refusal.type) {
     case "NothingTyped":
-      return refusal.leg === "whole" ? null : `The ${refusal.leg} leg has no reading yet.`;
+      return refusal.otherLegRead ? `The ${refusal.leg} leg has no reading yet.` : null;
     case "OutsideScale":
       return `${shown(refusal.value)} ${unit} is not on this scale: it runs from ${shown(refusal.scale[0])} to ${shown(refusal.scale[1])} ${unit}.`;
     case "TooFewTurningPoints":

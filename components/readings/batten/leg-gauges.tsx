@@ -1,42 +1,66 @@
+"use client";
+
 import { scaleLinear } from "d3-scale";
 import { Side } from "@/components/ui/side";
 import { figure } from "@/lib/report/rounding";
-import { type BattenEntry, restOf } from "./batten-entry";
+import { type BattenEntry, type Leg, restOf } from "./batten-entry";
 
-type LegGaugesProps = { form: BattenEntry; scale: readonly [number, number] };
+type LegGaugesProps = { form: BattenEntry; scale: readonly [number, number]; onLeg: (leg: Leg) => void };
 
-/** The two legs of a U-tube as they stand on their sides of the ship, with the levels read so far. */
-export function LegGauges({ form, scale }: LegGaugesProps) {
+/** The two legs of a U-tube as they stand on their sides of the ship; a tap sends the pad's digits to that leg. */
+export function LegGauges({ form, scale, onLeg }: LegGaugesProps) {
   return (
-    <div className="grid grid-cols-2 gap-2">
-      <Leg side="port" level={restOf(form, "port")} scale={scale} active={form.leg === "port"} />
-      <Leg side="starboard" level={restOf(form, "starboard")} scale={scale} active={form.leg === "starboard"} />
-    </div>
+    <fieldset className="grid grid-cols-2 gap-2">
+      <legend className="sr-only">Leg of the U-tube</legend>
+      {(["port", "starboard"] as const).map((side) => (
+        <LegGauge key={side} side={side} level={restOf(form, side)} scale={scale} active={form.leg === side} onChoose={() => onLeg(side)} />
+      ))}
+    </fieldset>
   );
 }
 
-type LegProps = { side: "port" | "starboard"; level: number | null; scale: readonly [number, number]; active: boolean };
+type LegGaugeProps = {
+  side: "port" | "starboard";
+  level: number | null;
+  scale: readonly [number, number];
+  active: boolean;
+  onChoose: () => void;
+};
 
-function Leg({ side, level, scale, active }: LegProps) {
+function LegGauge({ side, level, scale, active, onChoose }: LegGaugeProps) {
+  return (
+    <button
+      type="button"
+      aria-pressed={active}
+      onClick={onChoose}
+      className={`flex items-center gap-3 rounded border-2 px-3 py-2 text-left ${side === "starboard" ? "flex-row-reverse text-right" : ""} ${active ? "border-ink bg-sailcloth-raised" : "border-ink-line"}`}
+    >
+      <Gauge level={level} scale={scale} />
+      <span className="flex min-w-0 flex-1 flex-col gap-1">
+        <span className="text-small">
+          <Side side={side} /> leg
+        </span>
+        <span className="font-bold text-title">{level === null ? "–" : figure(level, 1)}</span>
+        <span className="text-ink-soft text-small">{active ? "typing here" : "mm"}</span>
+      </span>
+    </button>
+  );
+}
+
+function Gauge({ level, scale }: { level: number | null; scale: readonly [number, number] }) {
   const up = scaleLinear()
     .domain([...scale])
-    .range([80, 6])
+    .range([96, 6])
     .clamp(true);
   return (
-    <div className={`flex items-center gap-3 rounded border-2 px-3 py-2 ${active ? "border-ink bg-sailcloth-raised" : "border-ink-line"}`}>
-      <svg viewBox="0 0 34 86" className="h-[86px] shrink-0" aria-hidden="true">
-        <rect x="14" y="2" width="18" height="82" rx="2" className="fill-batten stroke-batten-edge" />
-        {up.ticks(8).map((tick) => (
-          <line key={tick} x1="14" x2="20" y1={up(tick)} y2={up(tick)} className="stroke-batten-ink" />
-        ))}
-        <rect x="3" y="2" width="8" height="82" rx="4" className="fill-sailcloth-sunken stroke-ink-line" />
-        {level === null ? null : <rect x="3" y={up(level)} width="8" height={84 - up(level)} rx="3" className="fill-redlead" />}
-      </svg>
-      <p className="flex min-w-0 flex-col gap-1">
-        <Side side={side} />
-        <span className="font-bold font-mono text-large">{level === null ? "–" : figure(level, 1)}</span>
-        <span className="text-ink-soft text-small">mm</span>
-      </p>
-    </div>
+    <svg viewBox="0 0 38 102" className="h-[102px] shrink-0" aria-hidden="true">
+      <rect x="16" y="2" width="20" height="98" rx="2" className="fill-batten stroke-batten-edge" />
+      {up.ticks(10).map((tick) => (
+        <line key={tick} x1="16" x2="23" y1={up(tick)} y2={up(tick)} className="stroke-batten-ink" />
+      ))}
+      <rect x="3" y="2" width="10" height="98" rx="5" className="fill-sailcloth-sunken stroke-ink-soft" />
+      {level === null ? null : <rect x="4" y={up(level)} width="8" height={99 - up(level)} rx="3" className="fill-ink-soft" />}
+      {level === null ? null : <line x1="1" x2="36" y1={up(level)} y2={up(level)} className="stroke-redlead" strokeWidth="2.5" />}
+    </svg>
   );
 }

@@ -7,7 +7,7 @@ type ModeSwitchProps = { mode: BattenMode; onChange: (mode: BattenMode) => void 
 /** Whether the bob hangs still, or its swing is read at the turning points. */
 export function ModeSwitch({ mode, onChange }: ModeSwitchProps) {
   return (
-    <fieldset className="grid flex-1 grid-cols-2 overflow-hidden rounded border-2 border-ink">
+    <fieldset className="grid grid-cols-2 overflow-hidden rounded border-2 border-ink">
       <legend className="sr-only">How it is read</legend>
       <Choice label="Settled" chosen={mode === "settled"} onChoose={() => onChange("settled")} />
       <Choice label="Turning points" chosen={mode === "turning-points"} onChoose={() => onChange("turning-points")} />
@@ -15,7 +15,7 @@ export function ModeSwitch({ mode, onChange }: ModeSwitchProps) {
   );
 }
 
-export function Choice({ label, chosen, onChoose }: { label: string; chosen: boolean; onChoose: () => void }) {
+function Choice({ label, chosen, onChoose }: { label: string; chosen: boolean; onChoose: () => void }) {
   return (
     <button
       type="button"

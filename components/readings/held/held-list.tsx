@@ -28,7 +28,7 @@ export function HeldList({ held }: { held: readonly Held[] }) {
                 <TimeOfDay at={body.capturedAt} />
               </span>
             </p>
-            <p className="break-words font-mono">{valueWords(body)}</p>
+            <p className="break-words text-large">{valueWords(body)}</p>
             <p className={`flex items-center gap-2 text-small ${event.state === "quarantined" ? "text-redlead-text" : "text-ink-soft"}`}>
               <Sign kind={signs[event.state]} />
               {stateWords(event.state, event.receipt)}

@@ -2,6 +2,7 @@
 
 import { lazy, Suspense, useState } from "react";
 import { Button } from "@/components/ui/button";
+import { Notice } from "@/components/ui/notice";
 import { TimeOfDay } from "@/components/ui/time-of-day";
 import { queueWords } from "@/lib/sync/queue-words";
 import { useQueue } from "../shell/use-queue";
@@ -38,6 +39,11 @@ export function HeldPage() {
           "Server not heard yet"
         )}
       </p>
+      {queue?.isStranger ? (
+        <Notice tone="refused" title="Another server answers at this address">
+          The readings stay on this phone: they go only to the server it was enrolled at. Tell the lead.
+        </Notice>
+      ) : null}
       {queue?.reach === "sign-in-needed" ? (
         <a href="/join" className="font-bold text-redlead-text underline">
           Sign in again with a code; nothing is lost meanwhile

@@ -39,7 +39,7 @@ export function MarkBoard({ estimates, mean, kind }: MarkBoardProps) {
       {mean === null ? null : (
         <g>
           <line x1="0" x2={WIDTH} y1={HEIGHT / 2} y2={HEIGHT / 2} className="stroke-redlead" strokeWidth="2.5" />
-          <text x={WIDTH - 10} y={HEIGHT / 2 - 8} textAnchor="end" className="fill-ink font-bold font-mono text-[20px]">
+          <text x={WIDTH - 10} y={HEIGHT / 2 - 8} textAnchor="end" className="fill-ink font-bold text-[22px]">
             {figure(mean, 3)} m
           </text>
           <text x={WIDTH - 10} y={HEIGHT / 2 + 18} textAnchor="end" className="fill-ink text-[12px]">

@@ -50,7 +50,7 @@ function Key({ name, disabled, onKey }: { name: PadKey; disabled: boolean; onKey
       disabled={disabled}
       aria-label={special?.name ?? name}
       onClick={() => onKey(name)}
-      className={`${keyClass} ${look} font-mono text-title disabled:opacity-35`}
+      className={`${keyClass} ${look} text-[1.75rem] disabled:opacity-35`}
     >
       {special?.face ?? name}
     </button>

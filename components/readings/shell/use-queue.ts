@@ -4,13 +4,13 @@ import { lastSending } from "@/db/device/event-queue";
 import { type QueueCount, queueCount } from "@/lib/sync/outbox";
 import type { Reach } from "@/lib/sync/queue-words";
 
-export type Queue = { readonly count: QueueCount; readonly reach: Reach; readonly heardAt: string | null };
+export type Queue = { readonly count: QueueCount; readonly reach: Reach; readonly heardAt: string | null; readonly isStranger: boolean };
 
 /** What this phone holds and whether it can be sent; undefined until the store has answered. */
 export function useQueue(): Queue | undefined {
   return useLiveQuery(async () => {
     const states = await deviceDatabase().events.toArray();
-    const { reach, heardAt } = await lastSending();
-    return { count: queueCount(states), reach, heardAt };
+    const { reach, heardAt, isStranger } = await lastSending();
+    return { count: queueCount(states), reach, heardAt, isStranger };
   });
 }

@@ -28,7 +28,7 @@ export function AgainChoice({ readings, shown, next, onSecondLook, onRepeat, onC
         <ul className="mt-1 flex flex-col gap-1">
           {readings.map((each) => (
             <li key={each.reading} className="flex items-baseline justify-between gap-3">
-              <span className="font-mono text-title">{shown(each.value)}</span>
+              <span className="text-title">{shown(each.value)}</span>
               <span className="text-ink-soft text-small">
                 {each.corrected ? "corrected, " : ""}
                 <TimeOfDay at={each.capturedAt} />

@@ -24,7 +24,7 @@ export function SavedCard({ shown, corrected, next, onChange, onTakeBack }: Save
           <path d="M8 26l11 11L40 12" fill="none" stroke="currentColor" strokeWidth="6" strokeLinecap="round" strokeLinejoin="round" />
         </svg>
         <p className="font-bold text-figure leading-tight">{corrected ? "Correction saved on this phone" : "Saved on this phone"}</p>
-        <p className="font-mono text-figure">{shown}</p>
+        <p className="text-figure">{shown}</p>
       </div>
       <div className="flex flex-wrap gap-2">
         <TakeBack onTakeBack={onTakeBack} />

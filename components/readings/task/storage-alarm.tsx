@@ -23,7 +23,7 @@ export function StorageAlarm({ failure, shown, onTryAgain }: StorageAlarmProps) 
         Not saved
       </h2>
       <p className="mt-2 text-large">This phone's store refused three times. The reading stands here and nowhere else:</p>
-      <p className="my-3 text-center font-mono text-figure">{shown}</p>
+      <p className="my-3 text-center text-figure">{shown}</p>
       <p>Write it on paper and call it out to the lead. Then save the export file, which holds it too, and try again.</p>
       <div className="mt-4 flex flex-col gap-2">
         <Button className="min-h-key w-full" onClick={saveFile}>

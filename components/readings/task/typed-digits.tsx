@@ -29,7 +29,7 @@ export function TypedDigits({ typed, unit, taken = [], onDrop }: TypedDigitsProp
             </li>
           ))}
       </ol>
-      <output aria-live="polite" aria-label="Typed" className="whitespace-nowrap font-mono text-[2.25rem] leading-none">
+      <output aria-live="polite" aria-label="Typed" className="whitespace-nowrap text-[2.5rem] leading-none">
         {typed}
         <span aria-hidden="true" className="ml-0.5 inline-block h-[1.9rem] w-[3px] translate-y-1 bg-redlead" />
       </output>

@@ -12,7 +12,7 @@ export function FieldButton({ label, unit, typed, active, onChoose }: FieldButto
       className={`flex h-24 flex-col justify-between rounded border-2 px-3 py-2 text-left ${active ? "border-ink bg-sailcloth-raised" : "border-ink-line"}`}
     >
       <span className="text-ink-soft text-small">{label}</span>
-      <span className="font-mono text-figure leading-none">
+      <span className="text-figure leading-none">
         {typed}
         {active ? <span aria-hidden="true" className="ml-0.5 inline-block h-7 w-[3px] translate-y-1 bg-redlead" /> : null}
       </span>
