@@ -1,1 +1,3 @@
+"use client";
+
 export { FailedPage as default } from "@/components/ui/failed-page";

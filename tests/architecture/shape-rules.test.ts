@@ -72,6 +72,7 @@ describe("the rules refuse", () => {
     expect(misplacedUseClient(invented('"use client"; a();'))).toEqual([]);
     expect(misplacedUseClient(invented('a(); "use client";'))).toHaveLength(1);
     expect(misplacedUseClient(invented('"use client"; a();', "app/page.tsx"))).toHaveLength(1);
+    expect(misplacedUseClient(invented('"use client"; a();', "app/error.tsx"))).toEqual([]);
   });
 
   test("a check that is turned off", () => {

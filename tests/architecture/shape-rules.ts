@@ -50,12 +50,13 @@ export function defaultExports(source: Source): readonly Finding[] {
   return [...direct, ...renamed].map((node) => finding(source, node.start, "a default export"));
 }
 
-/** "use client" stands at the top of the components that need it, and never in app/. */
+/** "use client" stands at the top of the components that need it, and never in app/ but in error.tsx, where Next insists. */
 export function misplacedUseClient(source: Source): readonly Finding[] {
   const marks = nodesOfType(source, "Literal").filter((node) => node.value === "use client");
   const isAtTop = (offset: number) => offset === source.program.body[0]?.start;
   return marks.flatMap((node) => {
-    if (source.path.startsWith("app/")) return [finding(source, node.start, '"use client" in app/')];
+    const isDemandedByNext = /^app\/(.*\/)?(global-)?error\.tsx$/.test(source.path);
+    if (source.path.startsWith("app/") && !isDemandedByNext) return [finding(source, node.start, '"use client" in app/')];
     return source.path.startsWith("tests/") || isAtTop(node.start) ? [] : [finding(source, node.start, '"use client" is not at the top')];
   });
 }
