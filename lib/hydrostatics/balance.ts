@@ -23,21 +23,25 @@ type Gaps = readonly [number, number, number];
  * The waterplane near a first one at which volume, trimming and heeling moments balance.
  *
  * Newton's method: a change of the waterplane by (da, db, dc) changes volume and moments by the waterplane's own area, first
- * and second moments. Steps are halved until the gaps shrink. Refuses when they do not close to 1e-9 m.
+ * and second moments. Steps are halved until the gaps shrink. Refuses gaps that do not close to a nanometre.
  */
 export function balanced(hull: Hull, balance: Balance, first: Waterplane): Result<Waterplane, NoBalance> {
   let plane = first;
   let body = immersedBody(hull, plane);
   let gaps = gapsOf(body, plane, balance);
-  for (let step = 0; step < 60; step++) {
+  for (let step = 0; step < 60 && sizeOf(gaps) > closed; step++) {
     const change = newtonChange(body, plane, balance);
     const nearer = change && nearerPlane(hull, balance, plane, change, sizeOf(gaps));
     if (!nearer) break;
     ({ plane, body, gaps } = nearer);
   }
   const [draftGap, trimArm, heelArm] = gaps;
-  return sizeOf(gaps) < 1e-9 ? answer(plane) : refuse({ type: "NoBalance", draftGap, trimArm, heelArm });
+  return sizeOf(gaps) <= tolerated ? answer(plane) : refuse({ type: "NoBalance", draftGap, trimArm, heelArm });
 }
+
+/** Where the search ends, and what it may leave where rounding forbids that [m]. */
+const closed = 1e-12;
+const tolerated = 1e-9;
 
 function gapsOf(body: ImmersedBody, plane: Waterplane, { volume, lcg, tcg, vcg, heelIsFree }: Balance): Gaps {
   const { slopeAlong: b, tanHeel: c } = plane;

@@ -52,14 +52,17 @@ export function atDisplacementAndHeel(
 }
 
 function restOf(hull: Hull, balance: Balance, { lbp, sag = 0, guess }: Afloat, tanHeel: number): Result<AtRest, EquilibriumRefusal> {
-  const tilted = { draftAtAp: 0, slopeAlong: guess?.slopeAlong ?? 0, tanHeel, sag, lbp };
-  const draftAtAp = draftAtApFor(hull, balance.volume, tilted);
-  if (!draftAtAp.ok) {
-    const { atLow, atHigh } = draftAtAp.refusal;
-    return refuse({ type: "VolumeOutOfReach", volume: balance.volume, smallest: atLow + balance.volume, largest: atHigh + balance.volume });
-  }
-  const plane = balanced(hull, balance, { ...tilted, draftAtAp: draftAtAp.value });
+  const near = guess && balanced(hull, balance, { ...guess, tanHeel, sag, lbp });
+  const plane = near?.ok ? near : balancedFromLevel(hull, balance, { draftAtAp: 0, slopeAlong: 0, tanHeel, sag, lbp });
   if (!plane.ok) return plane;
   const hydrostatics = hydrostaticsAt(hull, plane.value);
   return hydrostatics.ok ? answer({ plane: plane.value, hydrostatics: hydrostatics.value }) : hydrostatics;
+}
+
+function balancedFromLevel(hull: Hull, balance: Balance, level: Waterplane): Result<Waterplane, EquilibriumRefusal> {
+  const draftAtAp = draftAtApFor(hull, balance.volume, level);
+  if (draftAtAp.ok) return balanced(hull, balance, { ...level, draftAtAp: draftAtAp.value });
+  const { atLow, atHigh } = draftAtAp.refusal;
+  const { volume } = balance;
+  return refuse({ type: "VolumeOutOfReach", volume, smallest: atLow + volume, largest: atHigh + volume });
 }

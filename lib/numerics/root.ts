@@ -30,11 +30,18 @@ function narrowed(f: (x: number) => number, first: Point, second: Point, toleran
   let stale = first;
   let newest = second;
   for (let step = 0; Math.abs(newest.x - stale.x) > tolerance; step++) {
-    const x = step % 3 === 2 ? (stale.x + newest.x) / 2 : stale.x - (stale.f * (newest.x - stale.x)) / (newest.f - stale.f);
+    const x = nextLook(stale, newest, step % 3 === 2);
+    if (x === stale.x || x === newest.x) break;
     const next = { x, f: f(x) };
-    if (next.f === 0 || x === stale.x || x === newest.x) return x;
+    if (next.f === 0) return x;
     stale = Math.sign(next.f) === Math.sign(newest.f) ? { x: stale.x, f: stale.f / 2 } : newest;
     newest = next;
   }
-  return Math.abs(newest.f) <= Math.abs(stale.f) ? newest.x : stale.x;
+  return newest.x;
+}
+
+// a chord that rounding sends to an end of the bracket tells nothing: halve instead
+function nextLook(stale: Point, newest: Point, halve: boolean): number {
+  const chord = stale.x - (stale.f * (newest.x - stale.x)) / (newest.f - stale.f);
+  return halve || chord === stale.x || chord === newest.x ? (stale.x + newest.x) / 2 : chord;
 }
