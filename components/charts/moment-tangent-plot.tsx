@@ -15,6 +15,8 @@ type MomentTangentPlotProps = { points: readonly PlotPoint[]; line: PlotLine | n
 const UPPER = { top: 24, height: 230 };
 const LOWER = { top: 306, height: 84 };
 const HEIGHT = 430;
+/** mm per m; finer than any batten is read */
+const FINEST = 0.05;
 const MARGIN = { left: 46, right: 14 };
 
 /**
@@ -32,10 +34,7 @@ export function MomentTangentPlot({ points, line, stations }: MomentTangentPlotP
     points.map((point) => point.tangent),
     upper,
   );
-  const residual = scaleOver(
-    ordered.map((point) => point.residual),
-    lower,
-  );
+  const residual = residualScale(points, lower);
   return (
     <figure className="min-w-0">
       <div ref={ref}>
@@ -49,7 +48,12 @@ export function MomentTangentPlot({ points, line, stations }: MomentTangentPlotP
           {line ? <CommonLine line={line} x={x} y={tangent} /> : null}
           <PlotMarkers points={ordered} stations={stations} x={x} y={tangent} of="tangent" chosen={chosen} onChoose={setChosen} />
           <MomentAxis scale={x} box={lower} named title="Moment, t·m" />
-          <UprightAxis scale={residual} box={lower} title="Left over when the line is taken away, mm per m" ticks={3} />
+          <UprightAxis
+            scale={residual}
+            box={lower}
+            title="Left over when the line is taken away, mm per m; stations side by side"
+            ticks={3}
+          />
           <PlotMarkers points={ordered} stations={stations} x={x} y={residual} of="residual" chosen={chosen} />
         </svg>
       </div>
@@ -86,6 +90,12 @@ function momentScale(points: readonly PlotPoint[], width: number): Scale {
   return scaleLinear()
     .domain([-1.08 * reach, 1.08 * reach])
     .range([MARGIN.left, width - MARGIN.right]);
+}
+
+// by the points that count: one that is left out must not flatten the others
+function residualScale(points: readonly PlotPoint[], box: Box): Scale {
+  const counted = points.filter((point) => point.leftOut === null).map((point) => point.residual);
+  return scaleOver([...counted, FINEST], box).clamp(true);
 }
 
 function scaleOver(values: readonly number[], box: Box): Scale {

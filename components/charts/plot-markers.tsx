@@ -3,6 +3,8 @@ import type { Scale } from "./axes";
 import { type PlotPoint, pointName } from "./plot-points";
 import { StationShape } from "./station-shape";
 
+const ASIDE = 9;
+
 type PlotMarkersProps = {
   points: readonly PlotPoint[];
   stations: readonly string[];
@@ -21,15 +23,25 @@ export function PlotMarkers({ points, stations, x, y, of, chosen, onChoose }: Pl
       <g
         key={`${point.station} ${point.move} ${point.tangent}`}
         data-point={`${point.station} ${point.move} ${of}`}
-        transform={`translate(${x(point.moment)} ${y(point[of])})`}
+        transform={`translate(${x(point.moment) + asideBy(point, stations, of)} ${y(point[of])})`}
         className="outline-none"
         {...(onChoose ? walked(points, index, chosen, onChoose) : { "aria-hidden": true })}
       >
         {index === chosen ? <circle r={12} className="fill-none stroke-redlead" strokeWidth={1.5} /> : null}
-        <StationShape index={stations.indexOf(point.station)} hollow={point.leftOut !== null} size={of === "tangent" ? 6 : 5} />
+        <StationShape index={stations.indexOf(point.station)} hollow={point.leftOut !== null} size={of === "tangent" ? 6 : 4} />
+        {isBeyond(y, point[of]) ? <path d={point[of] > 0 ? "M0 -13l4 6h-8Z" : "M0 13l4 -6h-8Z"} className="fill-ink" /> : null}
       </g>
     );
   });
+}
+
+// residuals of one move stand side by side, or stations that agree would hide each other
+function asideBy(point: PlotPoint, stations: readonly string[], of: "tangent" | "residual"): number {
+  return of === "residual" ? (stations.indexOf(point.station) - (stations.length - 1) / 2) * ASIDE : 0;
+}
+
+function isBeyond(y: Scale, value: number): boolean {
+  return y.clamp() && Math.abs(value) > Math.max(...y.domain());
 }
 
 function walked(points: readonly PlotPoint[], index: number, chosen: number, onChoose: (index: number) => void) {

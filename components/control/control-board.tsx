@@ -41,11 +41,11 @@ export function ControlBoard({ snapshot, acts, orders, link, enrol }: ControlBoa
       <StopSign record={snapshot.record} />
       <Decisions snapshot={snapshot} acts={acts} />
       <div className="grid items-start gap-5 lg:grid-cols-2">
-        <ReadingsGrid snapshot={snapshot} />
         <div className="flex min-w-0 flex-col gap-5">
-          <LinePanel record={snapshot.record} />
+          <ReadingsGrid snapshot={snapshot} />
           <StandingResult snapshot={snapshot} />
         </div>
+        <LinePanel record={snapshot.record} />
       </div>
       {acts ? (
         <div className="grid items-start gap-5 lg:grid-cols-3">
@@ -53,13 +53,15 @@ export function ControlBoard({ snapshot, acts, orders, link, enrol }: ControlBoa
         </div>
       ) : null}
       <div className="grid items-start gap-5 lg:grid-cols-2">
-        <RoundProgress due={snapshot.due} />
+        <div className="flex min-w-0 flex-col gap-5">
+          <RoundProgress due={snapshot.due} />
+          <Cautions />
+        </div>
         <div className="flex min-w-0 flex-col gap-5">
           <Phones phones={snapshot.phones} />
           {enrol}
         </div>
       </div>
-      <Cautions />
     </div>
   );
 }

@@ -13,7 +13,7 @@ export function MoveSignal({ snapshot }: { snapshot: LiveSnapshot }) {
         <strong className="font-mono text-beacon">{now.move ? now.move.no : "–"}</strong>
       </p>
       <div className="min-w-0">
-        <p className={`inline-block rounded px-3 py-1 font-bold text-title ${isOpen ? "bg-ink text-sailcloth" : "border-2 border-ink"}`}>
+        <p className={`inline-block rounded px-3 py-1 font-bold text-figure ${isOpen ? "bg-ink text-sailcloth" : "border-2 border-ink"}`}>
           {signalWord(now)}
         </p>
         <p className="mt-1 text-ink-soft">{now.move ? now.move.label : "Every move of the plan is closed."}</p>
@@ -27,7 +27,7 @@ export function MoveSignal({ snapshot }: { snapshot: LiveSnapshot }) {
 function StillDue({ now }: { now: MoveNow }) {
   return (
     <div className="min-w-0">
-      <p className="font-bold text-title">
+      <p className="font-bold text-figure">
         {now.read} of {now.expected} read
       </p>
       {now.due.length === 0 ? (

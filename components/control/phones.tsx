@@ -19,7 +19,7 @@ export function Phones({ phones }: { phones: readonly Phone[] }) {
   }
   return (
     <Panel title="Phones" aside={heldInWords(phones)}>
-      <DataTable caption="Phones of this test">
+      <DataTable caption="Phones of this test" className="min-w-[34rem]">
         <thead>
           <tr>
             <ColumnHead>Phone</ColumnHead>

@@ -3,9 +3,9 @@ import { QuantityField } from "@/components/ui/quantity-field";
 import type { PositionsRead, PositionsTyped } from "./positions-form";
 
 const axes = [
-  { axis: "x", label: "forward of AP" },
-  { axis: "y", label: "to starboard" },
-  { axis: "z", label: "above baseline" },
+  { axis: "x", label: "from AP" },
+  { axis: "y", label: "to starb." },
+  { axis: "z", label: "above base" },
 ] as const;
 
 /** One weight's centre: x, y, z. */
@@ -20,7 +20,7 @@ export function PositionRow({
 }) {
   const errors = form.formState.errors.rows?.[index];
   return (
-    <fieldset className="grid grid-cols-3 gap-2">
+    <fieldset className="grid grid-cols-3 items-end gap-2">
       <legend className="mb-1 font-bold text-small">Weight {weight}</legend>
       {axes.map(({ axis, label }) => (
         <QuantityField

@@ -21,7 +21,7 @@ export function Start() {
             {doors.map(({ href, title, who, weight }) => (
               <Link key={href} href={href} prefetch={false} className={`${buttonClass(weight)} min-h-key flex-col !items-start !gap-0`}>
                 <span className="font-bold">{title}</span>
-                <span className="text-small">{who}</span>
+                <span className="font-normal text-small">{who}</span>
               </Link>
             ))}
           </nav>

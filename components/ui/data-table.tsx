@@ -1,10 +1,12 @@
 import type { ReactNode, TdHTMLAttributes, ThHTMLAttributes } from "react";
 
+type DataTableProps = { caption: string; children: ReactNode; showCaption?: boolean; className?: string };
+
 /** A table with its caption; wide ones scroll by themselves and never push the page. */
-export function DataTable({ caption, children, showCaption = false }: { caption: string; children: ReactNode; showCaption?: boolean }) {
+export function DataTable({ caption, children, showCaption = false, className = "" }: DataTableProps) {
   return (
     <section aria-label={caption} className="overflow-x-auto">
-      <table className="w-full border-collapse text-left text-base">
+      <table className={`w-full border-collapse text-left text-base ${className}`}>
         <caption className={showCaption ? "pb-2 text-left font-bold text-small" : "sr-only"}>{caption}</caption>
         {children}
       </table>
@@ -31,7 +33,7 @@ export function RowHead({ className = "", ...rest }: ThHTMLAttributes<HTMLTableC
 export function Cell({ figure, className = "", ...rest }: TdHTMLAttributes<HTMLTableCellElement> & Align) {
   return (
     <td
-      className={`border-ink-line border-b px-2 py-1.5 ${figure ? "whitespace-nowrap text-right font-mono" : ""} ${className}`}
+      className={`border-ink-line border-b px-2 py-1.5 ${figure ? "whitespace-nowrap text-right tabular-nums" : ""} ${className}`}
       {...rest}
     />
   );

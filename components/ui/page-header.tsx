@@ -19,7 +19,7 @@ export function PageHeader({ home, children }: { home: string; children?: ReactN
         </Link>
         <div className="flex flex-wrap items-center gap-3">
           {children}
-          <LightSwitch />
+          <LightSwitch compact />
         </div>
       </div>
     </header>

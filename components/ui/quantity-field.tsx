@@ -19,7 +19,7 @@ export function QuantityField({ id, label, unit, error, hint, className = "", ..
           inputMode="text"
           autoComplete="off"
           spellCheck={false}
-          className={`${controlClass} font-mono text-large ${className}`}
+          className={`${controlClass} text-large tabular-nums ${className}`}
           {...describedBy(id, error, hint)}
           {...rest}
         />

@@ -14,9 +14,9 @@ export type QuantityProps = Digits & {
 export function Quantity({ value, unit, signed = false, className = "", ...digits }: QuantityProps) {
   if (value === null) return <Unknown className={className} />;
   return (
-    <span className={`whitespace-nowrap font-mono ${className}`}>
+    <span className={`whitespace-nowrap tabular-nums ${className}`}>
       {quantityFigure(value, digits, signed)}
-      {unit === "" ? null : <span className="font-sans text-[0.8em]"> {unit}</span>}
+      {unit === "" ? null : <span className="text-[0.85em]"> {unit}</span>}
     </span>
   );
 }
