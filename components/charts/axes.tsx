@@ -18,7 +18,7 @@ export function MomentAxis({ scale, box, named, title }: { scale: Scale; box: Bo
             strokeWidth={tick === 0 ? 1 : 0.5}
           />
           {named ? (
-            <text y={box.bottom + 15} textAnchor="middle" className="fill-ink-soft font-mono">
+            <text y={box.bottom + 15} textAnchor="middle" className="fill-ink-soft tabular-nums">
               {shown(tick)}
             </text>
           ) : null}
@@ -59,7 +59,7 @@ export function UprightAxis({ scale, box, title, ticks }: { scale: Scale; box: B
             className={tick === 0 ? "stroke-ink-soft" : "stroke-ink-line"}
             strokeWidth={tick === 0 ? 1 : 0.5}
           />
-          <text x={box.left - 6} dy="0.32em" textAnchor="end" className="fill-ink-soft font-mono">
+          <text x={box.left - 6} dy="0.32em" textAnchor="end" className="fill-ink-soft tabular-nums">
             {shown(tick)}
           </text>
         </g>

@@ -42,7 +42,7 @@ export function TestsTable({ tests }: { tests: readonly TestLine[] }) {
               </Link>
             </RowHead>
             <Cell>{test.vessel}</Cell>
-            <Cell className="whitespace-nowrap font-mono">{test.date}</Cell>
+            <Cell className="whitespace-nowrap tabular-nums">{test.date}</Cell>
             <Cell>{test.place}</Cell>
             <Cell>{stateInWords[test.state]}</Cell>
             <Cell>{rolesInWords(test.roles)}</Cell>

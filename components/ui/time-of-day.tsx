@@ -13,7 +13,7 @@ export function TimeOfDay({ at, dated = false }: { at: string; dated?: boolean }
     () => "UTC",
   );
   return (
-    <time dateTime={at} className="whitespace-nowrap font-mono">
+    <time dateTime={at} className="whitespace-nowrap tabular-nums">
       {new Intl.DateTimeFormat("en-GB", { ...options, ...(dated ? day : {}), timeZone: zone }).format(new Date(at))}
     </time>
   );
