@@ -26,7 +26,8 @@ describe("importing a record file", () => {
   });
 
   test("says when the server does not answer", async () => {
-    // nothing listens at the address of this page
+    // nothing listens on the port of the page's address
+    (window as unknown as { happyDOM: { setURL: (url: string) => void } }).happyDOM.setURL("http://127.0.0.1:1/tests");
     choose(JSON.stringify(bargeRecord(1)));
     expect((await screen.findByRole("alert")).textContent).toContain("The server does not answer; nothing was taken in.");
   });
