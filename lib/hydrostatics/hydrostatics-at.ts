@@ -1,4 +1,5 @@
 import { type Waterplane, waterplaneHeight } from "@/lib/frame";
+import { between } from "@/lib/numerics/interpolation";
 import { answer, type Result, refuse } from "@/lib/result";
 import { breaksOf } from "./half-body";
 import type { Hull } from "./hull";
@@ -84,15 +85,10 @@ function isDeckEdgeImmersed(hull: Hull, plane: Waterplane): boolean {
     const breaks = breaksOf(strip, plane, Math.abs(plane.tanHeel));
     return breaks.slice(1).some((t, i) => {
       const middle = (t + (breaks[i] as number)) / 2;
-      const halfBreadth = mixed(strip.aft.halfBreadths, strip.forward.halfBreadths, edge, middle);
-      const height = mixed(strip.aft.heights, strip.forward.heights, edge, middle);
+      const halfBreadth = between(strip.aft.halfBreadths[edge] as number, strip.forward.halfBreadths[edge] as number, middle);
+      const height = between(strip.aft.heights[edge] as number, strip.forward.heights[edge] as number, middle);
       const x = strip.xAft + middle * (strip.xForward - strip.xAft);
       return halfBreadth > 0 && height < waterplaneHeight({ ...plane, tanHeel: Math.abs(plane.tanHeel) }, x, halfBreadth);
     });
   });
-}
-
-function mixed(aft: readonly number[], forward: readonly number[], i: number, t: number): number {
-  const from = aft[i] as number;
-  return from + t * ((forward[i] as number) - from);
 }

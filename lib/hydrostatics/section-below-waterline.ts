@@ -1,3 +1,4 @@
+import { between } from "@/lib/numerics/interpolation";
 import type { Strip } from "./hull";
 
 /**
@@ -33,8 +34,8 @@ export function sectionBelowWaterline(strip: Strip, t: number, height: number, s
   let z0 = 0;
   let above0 = 0;
   for (let i = 0; i < aft.heights.length; i++) {
-    const y1 = mixed(aft.halfBreadths, forward.halfBreadths, i, t);
-    const z1 = mixed(aft.heights, forward.heights, i, t) - height;
+    const y1 = between(aft.halfBreadths[i] as number, forward.halfBreadths[i] as number, t);
+    const z1 = between(aft.heights[i] as number, forward.heights[i] as number, t) - height;
     const above1 = z1 - slope * y1;
     if (i > 0) addEdge(cut, y0, z0, above0, y1, z1, above1);
     y0 = y1;
@@ -43,11 +44,6 @@ export function sectionBelowWaterline(strip: Strip, t: number, height: number, s
   }
   cut.momentZ += height * cut.area;
   return cut;
-}
-
-function mixed(aft: readonly number[], forward: readonly number[], i: number, t: number): number {
-  const from = aft[i] as number;
-  return from + t * ((forward[i] as number) - from);
 }
 
 // a point on the waterline counts as above it

@@ -3,15 +3,16 @@
  *
  *     I_x(a, b) = xᵃ(1−x)ᵇ/(a·B(a, b)) · 1/(1+ d₁/(1+ d₂/(1+ …)))
  *
+ * `complement` is 1 − x where the caller knows it better than a subtraction gives it.
  * The continued fraction converges fast below x = (a+1)/(a+b+2); above it the symmetry I_x(a,b) = 1 − I_{1−x}(b,a) is used.
  *
  * Source: NIST Digital Library of Mathematical Functions 8.17.22 (from memory).
  */
-export function incompleteBeta(x: number, a: number, b: number): number {
+export function incompleteBeta(x: number, a: number, b: number, complement: number = 1 - x): number {
   if (!(x >= 0 && x <= 1 && a > 0 && b > 0)) throw new RangeError(`incomplete beta of x = ${x}, a = ${a}, b = ${b}`);
-  if (x === 0 || x === 1) return x;
-  if (x > (a + 1) / (a + b + 2)) return 1 - incompleteBeta(1 - x, b, a);
-  const front = Math.exp(a * Math.log(x) + b * Math.log1p(-x) - logBeta(a, b)) / a;
+  if (x === 0 || complement === 0) return x;
+  if (x > (a + 1) / (a + b + 2)) return 1 - incompleteBeta(complement, b, a, x);
+  const front = Math.exp(a * Math.log(x) + b * Math.log(complement) - logBeta(a, b)) / a;
   return front * continuedFraction(x, a, b);
 }
 

@@ -23,7 +23,8 @@ export function studentTTwoSided95(dof: number): number {
 /** Probability that Student's t exceeds t. */
 export function studentTTail(t: number, dof: number): number {
   if (!(dof > 0)) throw new RangeError(`Student's t of ${dof} degrees of freedom`);
-  const oneSide = incompleteBeta(dof / (dof + t * t), dof / 2, 0.5) / 2;
+  const whole = dof + t * t;
+  const oneSide = incompleteBeta(dof / whole, dof / 2, 0.5, (t * t) / whole) / 2;
   return t >= 0 ? oneSide : 1 - oneSide;
 }
 

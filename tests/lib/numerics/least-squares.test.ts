@@ -37,7 +37,8 @@ describe("least squares", () => {
   });
 
   it("leaves residuals square on every column", () => {
-    const number = fc.double({ min: -10, max: 10, noNaN: true });
+    // whole numbers: columns that are almost but not quite dependent would ask for coefficients of any size
+    const number = fc.integer({ min: -10, max: 10 });
     fc.assert(
       fc.property(fc.array(fc.tuple(number, number, number), { minLength: 5, maxLength: 12 }), (triples) => {
         const rows = triples.map(([a, b]) => [1, a, b]);
