@@ -1,0 +1,65 @@
+import { Cell, ColumnHead, DataTable, RowHead } from "@/components/ui/data-table";
+import { Quantity } from "@/components/ui/quantity";
+import { centreOf, type Moments } from "@/lib/lightship/weight-item";
+
+/** One line of the way from as inclined to lightship; what goes off stands with a minus. */
+export type BalanceLine = {
+  readonly label: string;
+  readonly moments: Moments;
+  readonly kind: "state" | "off" | "on";
+};
+
+/** As inclined, what is deducted, what is added, and what is left: the lightship. Masses, centres and moments. */
+export function BalanceTable({ lines }: { lines: readonly BalanceLine[] }) {
+  return (
+    <DataTable caption="From as inclined to lightship" className="min-w-[52rem]">
+      <thead>
+        <tr>
+          <ColumnHead>Item</ColumnHead>
+          <ColumnHead figure>Mass, t</ColumnHead>
+          <ColumnHead figure>LCG, m</ColumnHead>
+          <ColumnHead figure>TCG, m</ColumnHead>
+          <ColumnHead figure>VCG, m</ColumnHead>
+          <ColumnHead figure>Along, t·m</ColumnHead>
+          <ColumnHead figure>Athwart, t·m</ColumnHead>
+          <ColumnHead figure>Upward, t·m</ColumnHead>
+        </tr>
+      </thead>
+      <tbody>
+        {lines.map((line) => (
+          <BalanceRow key={line.label} line={line} />
+        ))}
+      </tbody>
+    </DataTable>
+  );
+}
+
+function BalanceRow({ line }: { line: BalanceLine }) {
+  const { moments, kind, label } = line;
+  const by = kind === "off" ? -1 : 1;
+  const centre = moments.mass === 0 ? null : centreOf(moments);
+  const look = kind === "state" ? "bg-sailcloth font-bold" : "";
+  return (
+    <tr className={look}>
+      <RowHead className={kind === "state" ? "" : "pl-5 font-normal"}>
+        {kind === "off" ? "less " : kind === "on" ? "plus " : ""}
+        {label}
+      </RowHead>
+      <Figure value={by * moments.mass} decimals={2} signed={kind !== "state"} />
+      <Figure value={centre?.lcg ?? null} decimals={3} />
+      <Figure value={centre?.tcg ?? null} decimals={3} signed />
+      <Figure value={centre?.vcg ?? null} decimals={3} />
+      <Figure value={by * moments.along} decimals={1} signed={kind !== "state"} />
+      <Figure value={by * moments.athwart} decimals={1} signed />
+      <Figure value={by * moments.upward} decimals={1} signed={kind !== "state"} />
+    </tr>
+  );
+}
+
+function Figure({ value, decimals, signed = false }: { value: number | null; decimals: number; signed?: boolean }) {
+  return (
+    <Cell figure>
+      <Quantity value={value} unit="" decimals={decimals} signed={signed} />
+    </Cell>
+  );
+}

@@ -1,0 +1,72 @@
+import { seriesName } from "@/components/control/line-so-far";
+import { Cell, ColumnHead, DataTable, RowHead } from "@/components/ui/data-table";
+import { Panel } from "@/components/ui/panel";
+import { Quantity } from "@/components/ui/quantity";
+import type { MomentTangentLine } from "@/lib/inclining/inclined-ship";
+
+const PER_METRE = 1000;
+
+/** The common slope with its interval, and what each station says by itself. */
+export function FitPanel({ line }: { line: MomentTangentLine }) {
+  const { spread } = line;
+  return (
+    <Panel title="The line" aside="tangent on moment, least squares, one intercept for each station">
+      <p>
+        Common slope{" "}
+        <strong>
+          <Quantity
+            value={line.slope * PER_METRE}
+            unit="mm per m for each t·m"
+            uncertainty={spread ? spread.slopeUncertainty * PER_METRE : line.slope}
+          />
+        </strong>
+        {spread ? (
+          <>
+            , known to ±
+            <Quantity value={spread.halfWidth95 * 100} unit="%" decimals={2} /> with 95 % confidence, {spread.degreesOfFreedom} degrees of
+            freedom from {line.moves.length} moves.
+          </>
+        ) : (
+          ". Fewer than three moves: its uncertainty can’t be told."
+        )}
+      </p>
+      <div className="mt-3">
+        <DataTable caption="Slope of each station by itself" showCaption>
+          <thead>
+            <tr>
+              <ColumnHead>Station</ColumnHead>
+              <ColumnHead figure>Own slope, mm per m for each t·m</ColumnHead>
+              <ColumnHead figure>Largest residual</ColumnHead>
+            </tr>
+          </thead>
+          <tbody>
+            {line.stations.map((station) => (
+              <tr key={seriesName(station)}>
+                <RowHead>{seriesName(station)}</RowHead>
+                <Cell figure>
+                  <Quantity
+                    value={station.slope === null ? null : station.slope * PER_METRE}
+                    unit=""
+                    uncertainty={spread ? spread.slopeUncertainty * PER_METRE : line.slope}
+                  />
+                </Cell>
+                <Cell figure>
+                  <Quantity
+                    value={largest(station.commonResiduals.map((point) => point.residual)) * PER_METRE}
+                    unit="mm per m"
+                    decimals={3}
+                    signed
+                  />
+                </Cell>
+              </tr>
+            ))}
+          </tbody>
+        </DataTable>
+      </div>
+    </Panel>
+  );
+}
+
+function largest(residuals: readonly number[]): number {
+  return residuals.reduce((most, each) => (Math.abs(each) > Math.abs(most) ? each : most), 0);
+}
