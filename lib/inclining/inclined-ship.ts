@@ -9,7 +9,7 @@ export type StationLine = {
   readonly id: string;
   readonly series: number;
   readonly session: number;
-  /** by itself [1/(t·m)]; null where its moves have one moment only */
+  /** by itself [1/(t·m)]; null below three moves, or where they all have one moment */
   readonly slope: number | null;
   /** tangent at zero moment on its own batten, by itself */
   readonly intercept: number | null;

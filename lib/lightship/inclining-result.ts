@@ -1,0 +1,98 @@
+import { gmOfMove } from "@/lib/inclining/as-inclined";
+import { type Faults, inside } from "@/lib/inclining/faults";
+import type { AsInclined, SlopeSpread, StationLine } from "@/lib/inclining/inclined-ship";
+import { type InclinedShip, incliningTest } from "@/lib/inclining/inclining-test";
+import type { ShipHydrostatics } from "@/lib/inclining/ship-afloat";
+import type { IncliningTestData } from "@/lib/inclining/test-data";
+import { answer, type Result } from "@/lib/result";
+import { type Lightship, type LightshipItem, lightshipBalance, lightshipOf } from "./lightship";
+
+/** A test together with what separates the ship as inclined from the lightship; a test record is one of these. */
+export type LightshipTestData = IncliningTestData & { readonly items: readonly LightshipItem[] };
+
+/** The result of a test in the shape in which the command `reduce` prints it. */
+export type IncliningResult = {
+  readonly waterline: {
+    readonly density: number;
+    readonly draftAft: number;
+    readonly draftForward: number;
+    readonly draftMidships: number;
+    readonly trim: number;
+    readonly heelDegrees: number;
+    readonly sag: number;
+    readonly residuals: Readonly<Record<string, number>>;
+  };
+  readonly hydrostatics: Omit<ShipHydrostatics, "kml">;
+  readonly fit: SlopeSpread & {
+    readonly slope: number;
+    readonly stations: readonly StationResult[];
+    readonly moves: readonly MoveResult[];
+  };
+  readonly asInclined: AsInclined;
+  readonly lightship: Lightship & { readonly headline: "classical" };
+};
+
+export type StationResult = {
+  readonly id: string;
+  readonly series: number;
+  readonly session: number;
+  readonly slope: number | null;
+  readonly intercept: number | null;
+  /** by the number of the move */
+  readonly residuals: Readonly<Record<string, number>>;
+};
+
+export type MoveResult = {
+  readonly no: number;
+  readonly session: number;
+  readonly moment: number;
+  readonly tanHeel: number;
+  readonly gm: number | null;
+};
+
+/**
+ * The whole result of a test: how she floats, the line, the ship as inclined, the lightship.
+ *
+ * A station's slope, intercept and residuals are of its own line; moments are those that act at the heel of each move.
+ * Refused with every fault and its place in the record.
+ */
+export function incliningResult(test: LightshipTestData): Result<IncliningResult, Faults> {
+  const ship = incliningTest(test);
+  if (!ship.ok) return ship;
+  const balance = inside("items", lightshipBalance(ship.value, test));
+  if (!balance.ok) return balance;
+  return answer({
+    waterline: waterlineResult(ship.value),
+    hydrostatics: hydrostaticsResult(ship.value),
+    fit: fitResult(ship.value, test),
+    asInclined: ship.value.asInclined,
+    lightship: { ...lightshipOf(balance.value), headline: "classical" },
+  });
+}
+
+function waterlineResult({ afloat: { waterline, water } }: InclinedShip): IncliningResult["waterline"] {
+  const { draftAft, draftForward, draftMidships, trim, heelDegrees, residuals, plane } = waterline;
+  return { density: water.density, draftAft, draftForward, draftMidships, trim, heelDegrees, sag: plane.sag, residuals };
+}
+
+function hydrostaticsResult({ afloat }: InclinedShip): IncliningResult["hydrostatics"] {
+  const { source, volume, displacement, lcb, vcb, tcb, kmt, lcf } = afloat.hydrostatics;
+  return { source, volume, displacement, lcb, vcb, tcb, kmt, lcf };
+}
+
+function fitResult({ line, afloat }: InclinedShip, { aboard }: LightshipTestData): IncliningResult["fit"] {
+  return {
+    slope: line.slope,
+    ...line.spread,
+    stations: line.stations.map(stationResult),
+    moves: line.moves.map((move) => {
+      const { no, session, moment, tanHeel } = move;
+      return { no, session, moment, tanHeel, gm: gmOfMove(afloat, line.moves, aboard, move) };
+    }),
+  };
+}
+
+function stationResult({ id, series, session, slope, intercept, residuals }: StationLine): StationResult {
+  const byMove = Object.fromEntries(residuals.map(({ move, residual }) => [move, residual]));
+  return { id, series, session, slope, intercept, residuals: byMove };
+}
