@@ -1,6 +1,7 @@
 "use client";
 
-import type { ReactNode } from "react";
+import { type ReactNode, useMemo } from "react";
+import { testSoFar } from "@/lib/inclining/test-so-far";
 import type { LiveSnapshot } from "@/lib/sync/live";
 import { Cautions } from "./cautions";
 import { Decisions } from "./decisions";
@@ -25,6 +26,7 @@ type ControlBoardProps = {
 
 /** Central control: the move and what needs deciding on top, the readings and the line below, the rest quiet. */
 export function ControlBoard({ snapshot, acts, orders, link, enrol }: ControlBoardProps) {
+  const so = useMemo(() => testSoFar(snapshot.record), [snapshot.record]);
   return (
     <div className="flex flex-col gap-5">
       <section aria-label="The test now" className="flex flex-col gap-3 border-ink border-y-2 py-4">
@@ -38,14 +40,14 @@ export function ControlBoard({ snapshot, acts, orders, link, enrol }: ControlBoa
         </div>
         {link}
       </section>
-      <StopSign record={snapshot.record} />
+      <StopSign so={so} />
       <Decisions snapshot={snapshot} acts={acts} />
       <div className="grid items-start gap-5 lg:grid-cols-2">
         <div className="flex min-w-0 flex-col gap-5">
           <ReadingsGrid snapshot={snapshot} />
-          <StandingResult snapshot={snapshot} />
+          <StandingResult so={so} moves={snapshot.moves} />
         </div>
-        <LinePanel record={snapshot.record} />
+        <LinePanel record={snapshot.record} so={so} />
       </div>
       {acts ? (
         <div className="grid items-start gap-5 lg:grid-cols-3">

@@ -5,16 +5,16 @@ import { MomentTangentPlot } from "@/components/charts/moment-tangent-plot";
 import { PlotTable } from "@/components/charts/plot-table";
 import { Disclosure } from "@/components/ui/disclosure";
 import { Panel } from "@/components/ui/panel";
+import type { TestSoFar } from "@/lib/inclining/test-so-far";
 import type { TestRecord } from "@/lib/record/test-record";
 import { type LineSoFar, lineSoFar } from "./line-so-far";
-import { RefusalSentences } from "./refusal-sentences";
 
 /** Whether the line is straight, as far as the test has gone. */
-export function LinePanel({ record }: { record: TestRecord }) {
-  const so = useMemo(() => lineSoFar(record), [record]);
+export function LinePanel({ record, so }: { record: TestRecord; so: TestSoFar }) {
+  const line = useMemo(() => lineSoFar(record, so), [record, so]);
   return (
-    <Panel title="Moment and tangent" aside={so.ok ? countedInWords(so.value) : "no line yet"}>
-      {so.ok ? <Line so={so.value} /> : <RefusalSentences refusal={so.refusal} />}
+    <Panel title="Moment and tangent" aside={line ? countedInWords(line) : "no line yet"}>
+      {line ? <Line so={line} /> : <p>The line begins when two moves with different moments have been read.</p>}
     </Panel>
   );
 }

@@ -1,9 +1,10 @@
 import type { PlotPoint } from "@/components/charts/plot-points";
-import type { Faults } from "@/lib/inclining/faults";
 import type { FittedPoint, MomentTangentLine, StationLine } from "@/lib/inclining/inclined-ship";
 import { momentTangentLine } from "@/lib/inclining/moment-tangent-line";
+import { attitudeUnder } from "@/lib/inclining/ship-afloat";
+import { type TestSoFar, testSoFar } from "@/lib/inclining/test-so-far";
 import type { TestRecord } from "@/lib/record/test-record";
-import { answer, type Result } from "@/lib/result";
+import type { Result } from "@/lib/result";
 
 const PER_METRE = 1000;
 
@@ -14,17 +15,20 @@ export type LineSoFar = {
   readonly stations: readonly string[];
 };
 
-/** The line through what counts so far, and beside it the points that take no part, as they would lie. */
-export function lineSoFar(record: TestRecord): Result<LineSoFar, Faults> {
-  const line = momentTangentLine(record);
-  if (!line.ok) return line;
-  const counted = line.value.stations.flatMap((station) => station.commonResiduals.map((point) => pointOnLine(station, point)));
-  return answer({
-    line: line.value,
-    points: [...counted, ...disagreeing(record, line.value), ...excluded(record, line.value)],
-    stations: [...new Set(line.value.stations.map(seriesName))],
-  });
+/** The line through what counts so far, and beside it the points that take no part, as they would lie; null while there is none. */
+export function lineSoFar(record: TestRecord, so: TestSoFar = testSoFar(record)): LineSoFar | null {
+  const { line, afloat } = so;
+  if (line === null) return null;
+  const asIf: AsIf = (changed) => momentTangentLine(changed, afloat ? attitudeUnder(afloat.waterline) : undefined);
+  const counted = line.stations.flatMap((station) => station.commonResiduals.map((point) => pointOnLine(station, point)));
+  return {
+    line,
+    points: [...counted, ...disagreeing(record, line, asIf), ...excluded(record, line, asIf)],
+    stations: [...new Set(line.stations.map(seriesName))],
+  };
 }
+
+type AsIf = (record: TestRecord) => Result<MomentTangentLine>;
 
 /** A station's name, with its series where it has begun a new one, and its session after the first. */
 export function seriesName({ id, series, session }: Pick<StationLine, "id" | "series" | "session">): string {
@@ -44,27 +48,31 @@ function pointOnLine(station: StationLine, point: FittedPoint): PlotPoint {
 }
 
 /** Each disagreeing reading where it would lie if it alone counted in its slot. */
-function disagreeing(record: TestRecord, line: MomentTangentLine): PlotPoint[] {
+function disagreeing(record: TestRecord, line: MomentTangentLine, asIf: AsIf): PlotPoint[] {
   return record.readings.battens.flatMap((reading) => {
     if (reading.status !== "disagrees") return [];
     const battens = record.readings.battens.map((each) => (each === reading ? { ...each, status: "accepted" as const } : each));
-    const asIf = momentTangentLine({ ...record, readings: { ...record.readings, battens } });
-    return asIf.ok ? hollow(asIf.value, line, reading.move, "disagrees").filter((point) => point.station.startsWith(reading.station)) : [];
+    const counting = asIf({ ...record, readings: { ...record.readings, battens } });
+    return counting.ok ? hollow(counting.value, line, reading.move, "disagrees").filter(isOf(reading)) : [];
   });
 }
 
-function excluded(record: TestRecord, line: MomentTangentLine): PlotPoint[] {
+function excluded(record: TestRecord, line: MomentTangentLine, asIf: AsIf): PlotPoint[] {
   return record.moves.flatMap((move) => {
     if (move.excluded === undefined) return [];
     const moves = record.moves.map((each) => (each === move ? { ...each, excluded: undefined } : each));
-    const asIf = momentTangentLine({ ...record, moves });
-    return asIf.ok ? hollow(asIf.value, line, move.no, "its move is excluded") : [];
+    const counting = asIf({ ...record, moves });
+    return counting.ok ? hollow(counting.value, line, move.no, "its move is excluded") : [];
   });
 }
 
+function isOf({ station, series = 1, session = 1 }: TestRecord["readings"]["battens"][number]) {
+  return (point: PlotPoint) => point.station === seriesName({ id: station, series, session });
+}
+
 // measured from the intercept of the line that counts: a point left out must not bend it
-function hollow(asIf: MomentTangentLine, line: MomentTangentLine, move: number, leftOut: string): PlotPoint[] {
-  return asIf.stations.flatMap((station) => {
+function hollow(counting: MomentTangentLine, line: MomentTangentLine, move: number, leftOut: string): PlotPoint[] {
+  return counting.stations.flatMap((station) => {
     const zero = line.stations.find((each) => seriesName(each) === seriesName(station))?.commonIntercept;
     const point = station.commonResiduals.find((each) => each.move === move);
     if (zero === undefined || !point) return [];

@@ -1,17 +1,10 @@
-"use client";
-
-import { useMemo } from "react";
 import { Quantity } from "@/components/ui/quantity";
-import type { TestRecord } from "@/lib/record/test-record";
+import type { TestSoFar } from "@/lib/inclining/test-so-far";
 import { heeledTooFar, mostHeelDegrees } from "./heel-stop";
-import { lineSoFar } from "./line-so-far";
 
 /** In large type, when the ship heels more than a test may take her. */
-export function StopSign({ record }: { record: TestRecord }) {
-  const tooFar = useMemo(() => {
-    const so = lineSoFar(record);
-    return so.ok ? heeledTooFar(so.value.line.moves) : [];
-  }, [record]);
+export function StopSign({ so }: { so: TestSoFar }) {
+  const tooFar = so.line ? heeledTooFar(so.line.moves) : [];
   const worst = tooFar.at(-1);
   if (!worst) return null;
   return (

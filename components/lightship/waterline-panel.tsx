@@ -2,12 +2,13 @@ import { Cell, ColumnHead, DataTable, RowHead } from "@/components/ui/data-table
 import { Facts } from "@/components/ui/facts";
 import { Panel } from "@/components/ui/panel";
 import { Quantity } from "@/components/ui/quantity";
+import type { WaterDensity } from "@/lib/hydrostatics/water-density";
 import type { Waterline } from "@/lib/hydrostatics/waterline";
 
-type WaterlinePanelProps = { waterline: Waterline; density: number; densityUncertainty: number | null };
+type WaterlinePanelProps = { waterline: Waterline; water: WaterDensity };
 
 /** The waterplane that all marks agree on best, and what each mark is off it. */
-export function WaterlinePanel({ waterline, density, densityUncertainty }: WaterlinePanelProps) {
+export function WaterlinePanel({ waterline, water }: WaterlinePanelProps) {
   return (
     <Panel title="Waterline" aside={waterline.sagFitted ? "sag from the marks" : "the marks can’t tell the sag: taken as 0"}>
       <Facts
@@ -18,7 +19,7 @@ export function WaterlinePanel({ waterline, density, densityUncertainty }: Water
           ["Trim, by the stern +", <Quantity key="trim" value={waterline.trim} unit="m" decimals={3} signed />],
           ["Heel, to starboard +", <Quantity key="heel" value={waterline.heelDegrees} unit="°" decimals={2} signed />],
           ["Sag, hog −", <Quantity key="sag" value={waterline.plane.sag} unit="m" decimals={3} signed />],
-          ["Water", <Quantity key="water" value={density} unit="t/m³" uncertainty={densityUncertainty ?? 0.0005} />],
+          ["Water", <Quantity key="water" value={water.density} unit="t/m³" decimals={4} />],
         ]}
       />
       <div className="mt-4">

@@ -3,7 +3,7 @@ import { afterEach, describe, expect, test } from "vitest";
 import { MomentTangentPlot } from "@/components/charts/moment-tangent-plot";
 import { PlotTable } from "@/components/charts/plot-table";
 import { type LineSoFar, lineSoFar } from "@/components/control/line-so-far";
-import { promised } from "@/lib/result";
+import type { TestRecord } from "@/lib/record/test-record";
 import { bargeRecord, displacement, gm, momentAt } from "../control/barge";
 import { bargeSnapshot, battenSlot } from "../control/barge-snapshot";
 
@@ -14,6 +14,12 @@ function drawn(so: LineSoFar) {
   return container;
 }
 
+function drawable(record: TestRecord): LineSoFar {
+  const so = lineSoFar(record);
+  if (!so) throw new Error("the barge gives no line");
+  return so;
+}
+
 function placeOf(container: HTMLElement, point: string): [number, number] {
   const transform = container.querySelector(`[data-point="${point}"]`)?.getAttribute("transform") ?? "";
   const [x = Number.NaN, y = Number.NaN] = [...transform.matchAll(/-?[\d.]+/g)].map(([figure]) => Number(figure));
@@ -21,7 +27,7 @@ function placeOf(container: HTMLElement, point: string): [number, number] {
 }
 
 describe("the moment–tangent plot", () => {
-  const so = promised(lineSoFar(bargeRecord(4)));
+  const so = drawable(bargeRecord(4));
 
   test("draws one marker for each point of its table, in the plot and in the residuals", () => {
     const container = drawn(so);
@@ -76,7 +82,7 @@ describe("the moment–tangent plot", () => {
   test("draws a disagreeing reading hollow and leaves it out of the line", () => {
     const value = { mode: "settled" as const, valuesMm: [80] };
     const other = { slot: battenSlot(1, "A"), value, from: "0190a5d1-5d00-4000-8000-0000000000a2" };
-    const disputed = promised(lineSoFar(bargeSnapshot({ read: 4, open: null, called: [other] }).record));
+    const disputed = drawable(bargeSnapshot({ read: 4, open: null, called: [other] }).record);
     const out = disputed.points.filter((point) => point.leftOut !== null);
     expect(out.map((point) => point.station)).toEqual(["A", "A"]);
     expect(disputed.line.slope).toBeCloseTo(so.line.slope, 12);

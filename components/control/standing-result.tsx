@@ -1,0 +1,70 @@
+import { Facts } from "@/components/ui/facts";
+import { Panel } from "@/components/ui/panel";
+import { Quantity } from "@/components/ui/quantity";
+import type { MomentTangentLine } from "@/lib/inclining/inclined-ship";
+import type { TestSoFar } from "@/lib/inclining/test-so-far";
+import type { MoveProgress } from "@/lib/sync/live";
+import { RefusalSentences } from "./refusal-sentences";
+
+type StandingResultProps = { so: TestSoFar; moves: readonly MoveProgress[] };
+
+/** GM and KG as they stand, how much they rest on, and what is missing: always preliminary. */
+export function StandingResult({ so, moves }: StandingResultProps) {
+  const { asInclined, line } = so;
+  return (
+    <Panel title="As it stands" aside={<strong className="text-redlead-text">Preliminary, not for loading or sailing</strong>}>
+      <div className="grid grid-cols-2 gap-4">
+        <Headline name="GM fluid" value={asInclined?.gmFluid ?? null} relative={line} of={asInclined?.gmFluid ?? 0} />
+        <Headline name="KG, as inclined" value={asInclined?.vcg ?? null} relative={line} of={asInclined?.gmFluid ?? 0} />
+      </div>
+      <p className="mt-3 mb-2">
+        {so.movesUsed} of {moves.length} moves in the line
+        {line?.spread ? ", the interval from the scatter of the moves alone." : "; three are needed for an interval."}
+      </p>
+      {asInclined ? <Rest asInclined={asInclined} /> : null}
+      {so.missing.length > 0 ? (
+        <div className="mt-3">
+          <p className="font-bold">Still missing</p>
+          <RefusalSentences refusals={so.missing} />
+        </div>
+      ) : null}
+    </Panel>
+  );
+}
+
+/** KG is KM less GM: what the line leaves open in the one stands in the other. */
+function Headline({ name, value, relative, of }: { name: string; value: number | null; relative: MomentTangentLine | null; of: number }) {
+  const spread = relative?.spread ?? null;
+  const slope = relative?.slope ?? 1;
+  return (
+    <div>
+      <p className="text-ink-soft text-small">{name}</p>
+      <p className="font-bold text-figure">
+        {spread ? (
+          <Quantity value={value} unit="m" uncertainty={(of * spread.slopeUncertainty) / slope} />
+        ) : (
+          <Quantity value={value} unit="m" decimals={2} />
+        )}
+      </p>
+      {spread && value !== null ? (
+        <p className="text-small">
+          ± <Quantity value={of * spread.halfWidth95} unit="m" uncertainty={of * spread.halfWidth95} /> (95 %)
+        </p>
+      ) : null}
+    </div>
+  );
+}
+
+function Rest({ asInclined }: { asInclined: NonNullable<TestSoFar["asInclined"]> }) {
+  return (
+    <Facts
+      facts={[
+        ["Displacement", <Quantity key="displacement" value={asInclined.displacement} unit="t" decimals={1} />],
+        ["Free surface", <Quantity key="surface" value={asInclined.freeSurfaceCorrection} unit="m" decimals={3} />],
+        ["GM solid", <Quantity key="solid" value={asInclined.gmSolid} unit="m" decimals={3} />],
+        ["LCG", <Quantity key="lcg" value={asInclined.lcg} unit="m" decimals={2} />],
+        ["TCG, to starboard +", <Quantity key="tcg" value={asInclined.tcg} unit="m" decimals={3} signed />],
+      ]}
+    />
+  );
+}

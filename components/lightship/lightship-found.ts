@@ -1,0 +1,37 @@
+import type { Faults } from "@/lib/inclining/faults";
+import { inside } from "@/lib/inclining/faults";
+import { type InclinedShip, incliningTest } from "@/lib/inclining/inclining-test";
+import { type Lightship, type LightshipBalance, lightshipBalance, lightshipOf } from "@/lib/lightship/lightship";
+import { type Moments, momentsOf } from "@/lib/lightship/weight-item";
+import type { TestRecord } from "@/lib/record/test-record";
+import { answer, type Result } from "@/lib/result";
+import type { BalanceLine } from "./balance-table";
+
+export type FoundLightship = { readonly ship: InclinedShip; readonly lines: readonly BalanceLine[]; readonly lightship: Lightship };
+
+/** A test's lightship with each line of the way to it. */
+export function foundLightship(record: TestRecord): Result<FoundLightship, Faults> {
+  const ship = incliningTest(record);
+  if (!ship.ok) return ship;
+  const balance = inside("items", lightshipBalance(ship.value, record));
+  if (!balance.ok) return balance;
+  return answer({ ship: ship.value, lines: linesOf(balance.value, ship.value, record), lightship: lightshipOf(balance.value) });
+}
+
+function linesOf(balance: LightshipBalance, ship: InclinedShip, { items }: TestRecord): BalanceLine[] {
+  const off = (label: string, moments: Moments): BalanceLine => ({ label, moments, kind: "off" });
+  const on = (label: string, moments: Moments): BalanceLine => ({ label, moments, kind: "on" });
+  const liquids = ship.liquids.map(({ id, mass, lcg, tcg, vcg }) => off(`tank ${id}`, momentsOf({ mass, x: lcg, y: tcg, z: vcg })));
+  const single = [off("test weights", balance.testWeights), off("persons", balance.persons), ...liquids];
+  return [
+    { label: "As inclined", moments: balance.asInclined, kind: "state" },
+    ...[...single, ...items.flatMap((item) => (item.action === "deduct" ? [off(item.label, momentsOf(item))] : []))].filter(hasMass),
+    ...items.flatMap((item) => (item.action === "add" ? [on(item.label, momentsOf(item))] : [])),
+    ...(items.some(({ action }) => action === "relocate") ? [on("items moved to their places", balance.relocated)] : []),
+    { label: "Lightship", moments: balance.lightship, kind: "state" },
+  ];
+}
+
+function hasMass({ moments }: BalanceLine): boolean {
+  return moments.mass !== 0;
+}

@@ -1,0 +1,68 @@
+"use client";
+
+import { useMemo } from "react";
+import { MomentTangentPlot } from "@/components/charts/moment-tangent-plot";
+import { PlotTable } from "@/components/charts/plot-table";
+import { lineSoFar } from "@/components/control/line-so-far";
+import { RefusalSentences } from "@/components/control/refusal-sentences";
+import { Disclosure } from "@/components/ui/disclosure";
+import { Notice } from "@/components/ui/notice";
+import { Panel } from "@/components/ui/panel";
+import type { TestRecord } from "@/lib/record/test-record";
+import { BalanceTable } from "./balance-table";
+import { FitPanel } from "./fit-panel";
+import { HydrostaticsPanel } from "./hydrostatics-panel";
+import { ItemsTable } from "./items-table";
+import { type FoundLightship, foundLightship } from "./lightship-found";
+import { LightshipResult } from "./lightship-result";
+import { WaterlinePanel } from "./waterline-panel";
+
+/** From as inclined to lightship, with all that it rests on. */
+export function LightshipPage({ record }: { record: TestRecord }) {
+  const found = useMemo(() => foundLightship(record), [record]);
+  return (
+    <div className="flex flex-col gap-5">
+      {found.ok ? <Found found={found.value} record={record} /> : <NotYet refusals={found.refusal.faults} />}
+      <ItemsTable items={record.items} />
+    </div>
+  );
+}
+
+function Found({ found, record }: { found: FoundLightship; record: TestRecord }) {
+  const { ship, lines, lightship } = found;
+  return (
+    <>
+      <LightshipResult lightship={lightship} ship={ship} />
+      <Panel title="From as inclined to lightship">
+        <BalanceTable lines={lines} />
+      </Panel>
+      <div className="grid items-start gap-5 lg:grid-cols-2">
+        <WaterlinePanel waterline={ship.afloat.waterline} water={ship.afloat.water} />
+        <HydrostaticsPanel hydrostatics={ship.afloat.hydrostatics} asInclined={ship.asInclined} />
+        <Plot record={record} />
+        <FitPanel line={ship.line} />
+      </div>
+    </>
+  );
+}
+
+function Plot({ record }: { record: TestRecord }) {
+  const so = useMemo(() => lineSoFar(record), [record]);
+  if (!so) return null;
+  return (
+    <Panel title="Moment and tangent">
+      <MomentTangentPlot points={so.points} line={{ slope: so.line.slope * 1000 }} stations={so.stations} />
+      <Disclosure title="The points as figures">
+        <PlotTable points={so.points} />
+      </Disclosure>
+    </Panel>
+  );
+}
+
+function NotYet({ refusals }: { refusals: Parameters<typeof RefusalSentences>[0]["refusals"] }) {
+  return (
+    <Notice tone="caution" title="The lightship can’t be worked out yet">
+      <RefusalSentences refusals={refusals} />
+    </Notice>
+  );
+}

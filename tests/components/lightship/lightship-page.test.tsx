@@ -1,0 +1,66 @@
+import { cleanup, render, screen, within } from "@testing-library/react";
+import { afterEach, describe, expect, test } from "vitest";
+import { foundLightship } from "@/components/lightship/lightship-found";
+import { LightshipPage } from "@/components/lightship/lightship-page";
+import { promised } from "@/lib/result";
+import { bargeRecord, displacement } from "../control/barge";
+
+afterEach(cleanup);
+
+/** The barge as inclined has KG 4.8 m at midships; two weights of 5 t stand at z 5.6 m, x 28 and 32 m, y ∓4 m. */
+const mass = displacement - 10;
+const vcg = (displacement * 4.8 - 10 * 5.6) / mass;
+
+function rowOf(table: HTMLElement, label: string): string[] {
+  const row = within(table).getByRole("rowheader", { name: label }).closest("tr");
+  return row
+    ? within(row)
+        .getAllByRole("cell")
+        .map((cell) => cell.textContent ?? "")
+    : [];
+}
+
+describe("the lightship page", () => {
+  test("finds the barge's lightship", () => {
+    const { lightship } = promised(foundLightship(bargeRecord(4)));
+    // the barge's readings are exact: only the arithmetic of the reduction stands between
+    expect(lightship.displacement).toBeCloseTo(mass, 6);
+    expect(lightship.vcg).toBeCloseTo(vcg, 6);
+    expect(lightship.lcg).toBeCloseTo(30, 6);
+    expect(lightship.tcg).toBeCloseTo(0, 6);
+  });
+
+  test("shows each line of the way with its mass and moments", () => {
+    render(<LightshipPage record={bargeRecord(4)} />);
+    const table = screen.getByRole("table", { name: "From as inclined to lightship" });
+    expect(rowOf(table, "As inclined")).toEqual(["1476.00", "30.000", "0.000", "4.800", "44280.0", "0.0", "7084.8"]);
+    expect(rowOf(table, "less test weights")).toEqual(["−10.00", "30.000", "0.000", "5.600", "−300.0", "0.0", "−56.0"]);
+    expect(rowOf(table, "Lightship")).toEqual(["1466.00", "30.000", "0.000", "4.795", "43980.0", "0.0", "7028.8"]);
+  });
+
+  test("adds and deducts the items of the plan by name", () => {
+    const items = [
+      { action: "deduct" as const, label: "scaffolding", mass: 2, x: 10, y: 0, z: 8 },
+      { action: "add" as const, label: "anchor, port", mass: 1.5, x: 57, y: -2, z: 5 },
+    ];
+    render(<LightshipPage record={{ ...bargeRecord(4), items }} />);
+    const table = screen.getByRole("table", { name: "From as inclined to lightship" });
+    expect(rowOf(table, "less scaffolding").slice(0, 4)).toEqual(["−2.00", "10.000", "0.000", "8.000"]);
+    expect(rowOf(table, "plus anchor, port").slice(0, 4)).toEqual(["+1.50", "57.000", "−2.000", "5.000"]);
+    expect(rowOf(table, "Lightship")[0]).toBe("1465.50");
+  });
+
+  test("gives the residual of every mark", () => {
+    render(<LightshipPage record={bargeRecord(4)} />);
+    const table = screen.getByRole("table", { name: "Residual of each mark" });
+    expect(within(table).getAllByRole("row")).toHaveLength(1 + 6);
+  });
+
+  test("says in sentences what keeps the lightship from being known, and shows no figure", () => {
+    const record = bargeRecord(4);
+    render(<LightshipPage record={{ ...record, readings: { ...record.readings, drafts: [], water: [] } }} />);
+    expect(screen.getByText("The lightship can’t be worked out yet")).toBeDefined();
+    expect(screen.queryByRole("table", { name: "From as inclined to lightship" })).toBeNull();
+    expect(screen.getAllByRole("listitem").length).toBeGreaterThanOrEqual(2);
+  });
+});
