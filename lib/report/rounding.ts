@@ -35,3 +35,9 @@ export function decimalsFor(uncertainty: number): number {
 export function figureWithin(value: number, uncertainty: number): string {
   return figure(value, decimalsFor(uncertainty));
 }
+
+/** A number with at most so many significant digits, for sentences: no trailing zeros, a real minus sign. */
+export function shortFigure(value: number, digits = 6): string {
+  const short = String(Math.abs(Number(value.toPrecision(digits))));
+  return value < 0 && short !== "0" ? minusSign + short : short;
+}
