@@ -1,0 +1,72 @@
+import type { IncliningResult } from "@/lib/lightship/inclining-result";
+import { decimalsFor, figure, figureWithin, signedFigure } from "./rounding";
+
+/**
+ * The result of a test as lines of text for a person, each number with its unit.
+ * Digits of what follows from the slope follow its 95 % interval; the others are those in which they are read.
+ */
+export function resultPage(result: IncliningResult): readonly string[] {
+  return [...waterlineLines(result), "", ...fitLines(result), "", ...inclinedLines(result), "", ...lightshipLines(result)];
+}
+
+type Row = readonly [label: string, value: string, unit: string];
+
+function waterlineLines({ waterline, hydrostatics }: IncliningResult): readonly string[] {
+  return section("Afloat", [
+    ["Draft aft", figure(waterline.draftAft, 3), "m"],
+    ["Draft midships", figure(waterline.draftMidships, 3), "m"],
+    ["Draft forward", figure(waterline.draftForward, 3), "m"],
+    ["Trim by the stern", signedFigure(waterline.trim, 3), "m"],
+    ["Heel to starboard", signedFigure(waterline.heelDegrees, 2), "°"],
+    ["Sag", signedFigure(waterline.sag, 3), "m"],
+    ["Water density", figure(waterline.density, 4), "t/m³"],
+    [`Displacement by ${hydrostatics.source}`, figure(hydrostatics.displacement, 1), "t"],
+    ["KMt at the measured list", figure(hydrostatics.kmt, 3), "m"],
+  ]);
+}
+
+function fitLines({ fit }: IncliningResult): readonly string[] {
+  const decimals = decimalsFor(fit.slopeUncertainty * 1e6);
+  return section("Line, tangent on moment", [
+    ["Slope per 1 000 000 t·m", figure(fit.slope * 1e6, decimals), ""],
+    ["Half width at 95 %", figure(fit.halfWidth95 * 100, 2), "% of the slope"],
+    ["Degrees of freedom", figure(fit.degreesOfFreedom, 0), ""],
+    ...fit.stations.flatMap(({ id, series, slope }): Row[] =>
+      slope === null ? [] : [[`Station ${id}, series ${series}, by itself`, figure(slope * 1e6, decimals), ""]],
+    ),
+    ...fit.moves.map(
+      ({ no, moment, gm }): Row => [
+        `Move ${no} at ${signedFigure(moment, 2)} t·m, GM`,
+        gm === null ? "–" : figure(gm, 3),
+        gm === null ? "" : "m",
+      ],
+    ),
+  ]);
+}
+
+function inclinedLines({ asInclined, fit }: IncliningResult): readonly string[] {
+  const uncertainty = (asInclined.gmFluid * fit.slopeUncertainty) / fit.slope;
+  return section("As inclined", [
+    ["Displacement", figure(asInclined.displacement, 1), "t"],
+    ["GM fluid", figureWithin(asInclined.gmFluid, uncertainty), "m"],
+    ["Free surface correction", figureWithin(asInclined.freeSurfaceCorrection, uncertainty), "m"],
+    ["GM solid", figureWithin(asInclined.gmSolid, uncertainty), "m"],
+    ["VCG", figureWithin(asInclined.vcg, uncertainty), "m"],
+    ["LCG", figure(asInclined.lcg, 3), "m"],
+    ["TCG to starboard", signedFigure(asInclined.tcg, 3), "m"],
+  ]);
+}
+
+function lightshipLines({ lightship, asInclined, fit }: IncliningResult): readonly string[] {
+  const uncertainty = (asInclined.gmFluid * asInclined.displacement * fit.slopeUncertainty) / fit.slope / lightship.displacement;
+  return section(`Lightship, ${lightship.headline} method`, [
+    ["Displacement", figure(lightship.displacement, 1), "t"],
+    ["VCG", figureWithin(lightship.vcg, uncertainty), "m"],
+    ["LCG", figure(lightship.lcg, 3), "m"],
+    ["TCG to starboard", signedFigure(lightship.tcg, 3), "m"],
+  ]);
+}
+
+function section(title: string, rows: readonly Row[]): readonly string[] {
+  return [title, ...rows.map(([label, value, unit]) => `  ${label.padEnd(34)} ${value.padStart(12)} ${unit}`.trimEnd())];
+}
