@@ -48,12 +48,7 @@ export function MomentTangentPlot({ points, line, stations }: MomentTangentPlotP
           {line ? <CommonLine line={line} x={x} y={tangent} /> : null}
           <PlotMarkers points={ordered} stations={stations} x={x} y={tangent} of="tangent" chosen={chosen} onChoose={setChosen} />
           <MomentAxis scale={x} box={lower} named title="Moment, t·m" />
-          <UprightAxis
-            scale={residual}
-            box={lower}
-            title="Left over when the line is taken away, mm per m; stations side by side"
-            ticks={3}
-          />
+          <UprightAxis scale={residual} box={lower} title="Left over, mm per m; stations side by side" ticks={3} />
           <PlotMarkers points={ordered} stations={stations} x={x} y={residual} of="residual" chosen={chosen} />
         </svg>
       </div>

@@ -56,7 +56,7 @@ function Place({ from, to, signed = false }: { from: number; to: number | null; 
   return (
     <Cell figure>
       <Quantity value={from} unit="m" decimals={2} signed={signed} />
-      {to === null ? null : (
+      {to === null || to === from ? null : (
         <>
           <span aria-hidden="true"> → </span>
           <span className="sr-only"> to </span>

@@ -8,7 +8,7 @@ import type { Lightship } from "@/lib/lightship/lightship";
 export function LightshipResult({ lightship, ship }: { lightship: Lightship; ship: InclinedShip }) {
   const { displacement, lcg, tcg, vcg } = lightship;
   return (
-    <Panel title="Lightship" aside="classical reduction">
+    <Panel title="Result" aside="classical reduction">
       <div className="grid grid-cols-2 gap-x-6 gap-y-4 md:grid-cols-4">
         <Headline name="Displacement" value={displacement} unit="t" decimals={1} />
         <Headline name="VCG above baseline" value={vcg} unit="m" {...digitsOfVcg(lightship, ship)} />

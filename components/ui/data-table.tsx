@@ -5,7 +5,7 @@ type DataTableProps = { caption: string; children: ReactNode; showCaption?: bool
 /** A table with its caption; wide ones scroll by themselves and never push the page. */
 export function DataTable({ caption, children, showCaption = false, className = "" }: DataTableProps) {
   return (
-    <section aria-label={caption} className="overflow-x-auto">
+    <section aria-label={caption} className="relative overflow-x-auto">
       <table className={`w-full border-collapse text-left text-base ${className}`}>
         <caption className={showCaption ? "pb-2 text-left font-bold text-small" : "sr-only"}>{caption}</caption>
         {children}

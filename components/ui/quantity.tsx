@@ -16,7 +16,7 @@ export function Quantity({ value, unit, signed = false, className = "", ...digit
   return (
     <span className={`whitespace-nowrap tabular-nums ${className}`}>
       {quantityFigure(value, digits, signed)}
-      {unit === "" ? null : <span className="text-[0.85em]"> {unit}</span>}
+      <Unit unit={unit} />
     </span>
   );
 }
@@ -29,6 +29,12 @@ export function quantityInWords({ value, unit, signed = false, ...digits }: Quan
 function quantityFigure(value: number, { decimals, uncertainty }: Digits, signed: boolean): string {
   const places = decimals ?? decimalsFor(uncertainty ?? 0);
   return signed ? signedFigure(value, places) : figure(value, places);
+}
+
+// a degree sign stands at its figure, other units a space away
+function Unit({ unit }: { unit: string }) {
+  if (unit === "" || unit === "°") return unit;
+  return <span className="text-[0.85em]"> {unit}</span>;
 }
 
 function Unknown({ className }: { className: string }) {
