@@ -8,20 +8,26 @@ import { resultPage } from "@/lib/report/result-page";
 const usage = "usage: reduce [--table] RECORD.json";
 
 const options = process.argv.slice(2);
-const isTable = options.includes("--table");
-const [file, ...others] = options.filter((option) => option !== "--table");
+const files = options.filter((option) => option !== "--table");
 
-if (file === undefined || others.length > 0 || file.startsWith("--")) stop([usage]);
-else reduceFile(file);
+const printed = reduction(files, options.includes("--table"));
+if (printed.ok) process.stdout.write(printed.page);
+else {
+  process.stderr.write(printed.faults.map((line) => `${line}\n`).join(""));
+  process.exitCode = 2;
+}
 
-/** Nothing but the record is read, and nothing but its result is printed. */
-function reduceFile(path: string): void {
-  const text = textOf(path);
-  if (text === null) return stop([`${path}: no such file can be read`]);
+type Printed = { readonly ok: true; readonly page: string } | { readonly ok: false; readonly faults: readonly string[] };
+
+/** What the command prints: the result of one record, or all that stands against it. */
+function reduction([file, ...others]: readonly string[], isTable: boolean): Printed {
+  if (file === undefined || others.length > 0 || file.startsWith("--")) return { ok: false, faults: [usage] };
+  const text = textOf(file);
+  if (text === null) return { ok: false, faults: [`${file}: no such file can be read`] };
   const record = parseRecord(text);
   const result = record.ok ? incliningResult(record.value) : record;
-  if (!result.ok) return stop(faultsOf(result).map(refusalLine));
-  process.stdout.write(isTable ? pageOf(result.value) : `${JSON.stringify(result.value, null, 2)}\n`);
+  if (!result.ok) return { ok: false, faults: faultsOf(result).map(refusalLine) };
+  return { ok: true, page: isTable ? pageOf(result.value) : `${JSON.stringify(result.value, null, 2)}\n` };
 }
 
 function textOf(path: string): string | null {
@@ -34,9 +40,4 @@ function textOf(path: string): string | null {
 
 function pageOf(result: IncliningResult): string {
   return `${resultPage(result).join("\n")}\n`;
-}
-
-function stop(lines: readonly string[]): void {
-  process.stderr.write(`${lines.join("\n")}\n`);
-  process.exitCode = 2;
 }
