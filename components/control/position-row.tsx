@@ -10,10 +10,12 @@ const axes = [
 
 /** One weight's centre: x, y, z. */
 export function PositionRow({
+  id,
   weight,
   index,
   form,
 }: {
+  id: string;
   weight: string;
   index: number;
   form: UseFormReturn<PositionsTyped, unknown, PositionsRead>;
@@ -25,7 +27,7 @@ export function PositionRow({
       {axes.map(({ axis, label }) => (
         <QuantityField
           key={axis}
-          id={`position-${index}-${axis}`}
+          id={`${id}-${axis}`}
           label={`${axis}, ${label}`}
           unit="m"
           error={errors?.[axis]?.message}

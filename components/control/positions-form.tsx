@@ -1,6 +1,7 @@
 "use client";
 
 import { zodResolver } from "@hookform/resolvers/zod";
+import { useId } from "react";
 import { useForm } from "react-hook-form";
 import { z } from "zod";
 import { Button } from "@/components/ui/button";
@@ -30,6 +31,7 @@ export type PositionsRead = z.output<typeof schema>;
 
 /** Where the weights really stand at a move: the plan's places stand in the fields, and a person answers for them. */
 export function PositionsForm({ move, planned, due, onMeasured }: PositionsFormProps) {
+  const id = useId();
   const weights = due.flatMap(({ slot }) => (slot.kind === "position" ? [slot.weight] : []));
   const form = useForm<PositionsTyped, unknown, PositionsRead>({
     resolver: zodResolver(schema),
@@ -40,14 +42,19 @@ export function PositionsForm({ move, planned, due, onMeasured }: PositionsFormP
   return (
     <form onSubmit={save} noValidate className="flex flex-col gap-3" aria-label={`Positions of the weights at move ${move}`}>
       {weights.map((weight, index) => (
-        <PositionRow key={weight} weight={weight} index={index} form={form} />
+        <PositionRow key={weight} id={`${id}-${weight}`} weight={weight} index={index} form={form} />
       ))}
       <label className="flex min-h-tap items-center gap-3">
-        <input type="checkbox" className="h-6 w-6 accent-redlead" aria-describedby="measured-error" {...form.register("measured")} />
+        <input
+          type="checkbox"
+          className="h-6 w-6 accent-redlead"
+          aria-describedby={wrong ? `${id}-measured` : undefined}
+          {...form.register("measured")}
+        />
         Measured where they stand at move {move}, not taken from the plan
       </label>
       {wrong ? (
-        <p id="measured-error" role="alert" className="text-redlead-text text-small">
+        <p id={`${id}-measured`} role="alert" className="text-redlead-text text-small">
           {wrong}
         </p>
       ) : null}

@@ -21,11 +21,6 @@ export function Quantity({ value, unit, signed = false, className = "", ...digit
   );
 }
 
-/** The same digits as a text, for labels that are spoken. */
-export function quantityInWords({ value, unit, signed = false, ...digits }: QuantityProps): string {
-  return value === null ? "not known" : `${quantityFigure(value, digits, signed)} ${unit}`.trim();
-}
-
 function quantityFigure(value: number, { decimals, uncertainty }: Digits, signed: boolean): string {
   const places = decimals ?? decimalsFor(uncertainty ?? 0);
   return signed ? signedFigure(value, places) : figure(value, places);

@@ -1,5 +1,7 @@
 import { cleanup, fireEvent, render, screen, waitFor } from "@testing-library/react";
 import { afterEach, describe, expect, test } from "vitest";
+import type { LeadActs } from "@/components/control/lead-acts";
+import { PositionAgain } from "@/components/control/position-again";
 import { type Measured, PositionsForm } from "@/components/control/positions-form";
 import { bargeSnapshot } from "./barge-snapshot";
 
@@ -52,5 +54,28 @@ describe("where the weights stand", () => {
     fireEvent.click(screen.getByRole("button", { name: "Save positions" }));
     expect((await screen.findByRole("alert")).textContent).toBe("“5.6 m” is not a number.");
     expect(measured).toEqual([]);
+  });
+});
+
+describe("a weight measured once more", () => {
+  const place: [number, number, number] = [28, 4.02, 5.6];
+  const once = bargeSnapshot({ read: 1, open: 2, called: [{ slot: { kind: "position", weight: "W1", move: 2 }, value: { place } }] });
+  const again = once.due.find(({ slot, state }) => slot.kind === "position" && state === "read");
+
+  test("corrects the standing place, with its reason", async () => {
+    if (!again) throw new Error("the place was not taken in");
+    const corrected: Parameters<LeadActs["correct"]>[] = [];
+    const nothing = async () => undefined;
+    const orders = { openMove: nothing, closeMove: nothing, repeatMove: nothing, excludeMove: nothing };
+    const correct: LeadActs["correct"] = async (...given) => void corrected.push(given);
+    render(<PositionAgain due={again} acts={{ ...orders, record: nothing, resolve: nothing, release: nothing, correct }} />);
+    fireEvent.change(screen.getByLabelText(/^y,/), { target: { value: "4.0" } });
+    fireEvent.click(screen.getByRole("checkbox"));
+    fireEvent.click(screen.getByRole("button", { name: "Save positions" }));
+    expect((await screen.findByRole("alert")).textContent).toContain("Write the reason");
+    expect(corrected).toEqual([]);
+    fireEvent.change(screen.getByLabelText("Why it is measured again"), { target: { value: "tape sagged" } });
+    fireEvent.click(screen.getByRole("button", { name: "Save positions" }));
+    await waitFor(() => expect(corrected).toEqual([[again.readings[0], again.slot, { place: [28, 4, 5.6] }, "tape sagged"]]));
   });
 });
