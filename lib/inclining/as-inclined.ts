@@ -53,6 +53,7 @@ export function asInclined(
  *     GM = M / (Δ·tan θ)
  *
  * Persons count as in `asInclined`.
+ * Source: IMO 2008 IS Code, part B annex 1 *from memory*.
  */
 export function gmOfMove(afloat: ShipAfloat, moves: readonly MoveOnLine[], aboard: readonly Aboard[], move: MoveOnLine): number | null {
   const largest = Math.max(...moves.map(({ moment }) => Math.abs(moment)));

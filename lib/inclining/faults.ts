@@ -3,6 +3,7 @@ import { answer, type Refusal, type Result, refuse } from "@/lib/result";
 /** All that keeps a test from being reduced, each with its path in the record where one place is to blame. */
 export type Faults = { readonly type: "Faults"; readonly faults: readonly Refusal[] };
 
+/** A refusal that holds every fault found. */
 export function refuseFaults(faults: readonly Refusal[]): { readonly ok: false; readonly refusal: Faults } {
   return refuse({ type: "Faults", faults });
 }

@@ -36,6 +36,7 @@ export function uTubeTangent(portMm: number, starboardMm: number, span: number):
  *     tan = tan(heel at zero + angle − angle at zero)
  *
  * Angles in degrees; the heel at zero is the tangent found by the draft marks.
+ * Source: an inclinometer shows an angle from its own zero, *common practice*.
  */
 export function inclinometerTangent(angleDegrees: number, zeroDegrees: number, tanHeelAtZero: number): number {
   return Math.tan(Math.atan(tanHeelAtZero) + ((angleDegrees - zeroDegrees) * Math.PI) / 180);

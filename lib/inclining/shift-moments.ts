@@ -24,6 +24,7 @@ export type NoPosition = { readonly type: "NoPosition"; readonly weight: string;
  *
  * Where ballast is the shifting weight, its soundings at each move add theirs.
  * Positions in metres, masses in tonnes. A session without a move 0 of its own counts from the test's.
+ * Source: IMO 2008 IS Code, part B annex 1 *from memory*.
  * Refused: no move 0; a move that lacks a weight's position or the soundings of ballast that shifts.
  */
 export function shiftMoments(
@@ -40,6 +41,8 @@ export function shiftMoments(
  * The moments that act at the heel the ship has at each move: a weight that was also raised has the arm of the heel.
  *
  *     M* = athwart + tan(heel) · upward
+ *
+ * Source: the lever of a weight about the line of buoyancy, y + tan(heel)·z, *common practice*.
  */
 export function actingMoments(moments: readonly ShiftMoment[], attitudeAt: AttitudeAt): readonly ActingMoment[] {
   return moments.map((move) => ({

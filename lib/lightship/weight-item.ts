@@ -14,14 +14,17 @@ export function momentsOf({ mass, x, y, z }: WeightItem): Moments {
   return { mass, along: mass * x, athwart: mass * y, upward: mass * z };
 }
 
+/** The sum of two balances, mass and moments alike. */
 export function plus(a: Moments, b: Moments): Moments {
   return { mass: a.mass + b.mass, along: a.along + b.along, athwart: a.athwart + b.athwart, upward: a.upward + b.upward };
 }
 
+/** One balance less another, mass and moments alike. */
 export function minus(a: Moments, b: Moments): Moments {
   return { mass: a.mass - b.mass, along: a.along - b.along, athwart: a.athwart - b.athwart, upward: a.upward - b.upward };
 }
 
+/** Mass and moments of weights together; of none, zero. */
 export function total(items: readonly WeightItem[]): Moments {
   return items.map(momentsOf).reduce(plus, nothing);
 }
