@@ -15,8 +15,13 @@ export function decisionsOwed(snapshot: LiveSnapshot): Decision[] {
 
 function disagreements(snapshot: LiveSnapshot): Decision[] {
   return snapshot.due
-    .filter((due) => due.state === "disagrees")
+    .filter((due) => due.state === "disagrees" && !isReadAgain(snapshot, due))
     .map((due) => ({ kind: "disagreement", due, sentence: `Readings disagree: ${slotInWords(due.slot)}.` }));
+}
+
+// a move that was ordered again counts by its last repeat only
+function isReadAgain({ moves }: LiveSnapshot, { slot }: ReadingDue): boolean {
+  return slot.kind === "batten" && moves.some((move) => move.no === slot.move && move.repeat > slot.repeat);
 }
 
 function movesInDispute(snapshot: LiveSnapshot): Decision[] {

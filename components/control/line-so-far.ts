@@ -50,11 +50,15 @@ function pointOnLine(station: StationLine, point: FittedPoint): PlotPoint {
 /** Each disagreeing reading where it would lie if it alone counted in its slot. */
 function disagreeing(record: TestRecord, line: MomentTangentLine, asIf: AsIf): PlotPoint[] {
   return record.readings.battens.flatMap((reading) => {
-    if (reading.status !== "disagrees") return [];
+    if (reading.status !== "disagrees" || isReadAgain(record, reading)) return [];
     const battens = record.readings.battens.map((each) => (each === reading ? { ...each, status: "accepted" as const } : each));
     const counting = asIf({ ...record, readings: { ...record.readings, battens } });
     return counting.ok ? hollow(counting.value, line, reading.move, "disagrees").filter(isOf(reading)) : [];
   });
+}
+
+function isReadAgain({ moves }: TestRecord, { move, repeat = 1 }: TestRecord["readings"]["battens"][number]): boolean {
+  return moves.some((each) => each.no === move && (each.repeat ?? 1) > repeat);
 }
 
 function excluded(record: TestRecord, line: MomentTangentLine, asIf: AsIf): PlotPoint[] {
