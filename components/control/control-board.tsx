@@ -43,11 +43,11 @@ export function ControlBoard({ snapshot, acts, orders, link, enrol }: ControlBoa
       <StopSign so={so} />
       <Decisions snapshot={snapshot} acts={acts} />
       <div className="grid items-start gap-5 lg:grid-cols-2">
+        <ReadingsGrid snapshot={snapshot} />
         <div className="flex min-w-0 flex-col gap-5">
-          <ReadingsGrid snapshot={snapshot} />
+          <LinePanel record={snapshot.record} so={so} />
           <StandingResult so={so} moves={snapshot.moves} />
         </div>
-        <LinePanel record={snapshot.record} so={so} />
       </div>
       {acts ? (
         <div className="grid items-start gap-5 lg:grid-cols-3">

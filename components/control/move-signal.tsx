@@ -16,7 +16,7 @@ export function MoveSignal({ snapshot }: { snapshot: LiveSnapshot }) {
         <p className={`inline-block rounded px-3 py-1 font-bold text-figure ${isOpen ? "bg-ink text-sailcloth" : "border-2 border-ink"}`}>
           {signalWord(now)}
         </p>
-        <p className="mt-1 text-ink-soft">{now.move ? now.move.label : "Every move of the plan is closed."}</p>
+        <p className="mt-1 text-ink-soft">{labelOf(now.move)}</p>
         {now.move && now.move.repeat > 1 ? <p className="font-bold">Repeat {now.move.repeat}</p> : null}
       </div>
       {isOpen ? <StillDue now={now} /> : null}
@@ -43,6 +43,12 @@ function StillDue({ now }: { now: MoveNow }) {
       )}
     </div>
   );
+}
+
+// a label that only repeats the number says nothing twice
+function labelOf(move: MoveNow["move"]): string {
+  if (!move) return "Every move of the plan is closed.";
+  return move.label === `Move ${move.no}` ? "" : move.label;
 }
 
 function signalWord({ kind, move }: MoveNow): string {

@@ -41,18 +41,23 @@ function Headline({ name, value, relative, of }: { name: string; value: number |
       <p className="text-ink-soft text-small">{name}</p>
       <p className="font-bold text-figure">
         {spread ? (
-          <Quantity value={value} unit="m" uncertainty={(of * spread.slopeUncertainty) / slope} />
+          <Quantity value={value} unit="m" uncertainty={withDrafts((of * spread.slopeUncertainty) / slope)} />
         ) : (
           <Quantity value={value} unit="m" decimals={2} />
         )}
       </p>
       {spread && value !== null ? (
         <p className="text-small">
-          ± <Quantity value={of * spread.halfWidth95} unit="m" uncertainty={of * spread.halfWidth95} /> (95 %)
+          ± <Quantity value={of * spread.halfWidth95} unit="m" uncertainty={withDrafts(of * spread.halfWidth95)} /> (95 %)
         </p>
       ) : null}
     </div>
   );
+}
+
+// the line alone would promise tenths of a millimetre that no draft mark keeps
+function withDrafts(uncertainty: number): number {
+  return Math.max(uncertainty, 0.01);
 }
 
 function Rest({ asInclined }: { asInclined: NonNullable<TestSoFar["asInclined"]> }) {

@@ -36,9 +36,10 @@ function Headline({ name, ...quantity }: { name: string } & QuantityProps) {
   );
 }
 
-/** What the line leaves open in KG stands in the lightship's VCG, enlarged as the deductions leave less mass. */
+/** What the line leaves open in KG stands in the lightship's VCG, enlarged as the deductions leave less mass; no draft mark keeps less than a millimetre. */
 function digitsOfVcg({ displacement }: Lightship, { line, asInclined }: InclinedShip) {
   const enlarged = asInclined.displacement / displacement;
   if (line.spread === null) return { decimals: 2 };
-  return { uncertainty: (enlarged * asInclined.gmFluid * line.spread.slopeUncertainty) / line.slope };
+  const ofLine = (enlarged * asInclined.gmFluid * line.spread.slopeUncertainty) / line.slope;
+  return { uncertainty: Math.max(ofLine, 0.01) };
 }
