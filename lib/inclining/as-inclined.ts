@@ -33,18 +33,33 @@ export function asInclined(
   if (!(line.slope > 0)) return refuse({ type: "HeelAgainstMoment", slope: line.slope });
   const { displacement, kmt } = afloat.hydrostatics;
   const gmFluid = (1 / line.slope + broughtToDrafts(aboard, waterAtFlotation(afloat))) / displacement;
-  const freeSurfaceCorrection = sum(liquids.map(({ density, freeSurfaceInertia }) => density * freeSurfaceInertia)) / displacement;
-  const gmSolid = gmFluid + freeSurfaceCorrection;
+  const surfaces = freeSurfaceCorrection(liquids, displacement);
+  const gmSolid = gmFluid + surfaces;
   const vcg = kmt - gmSolid;
   return answer({
     displacement,
     gmFluid,
-    freeSurfaceCorrection,
+    freeSurfaceCorrection: surfaces,
     gmSolid,
     vcg,
     lcg: lcgOf(afloat, vcg + longitudinalFreeSurface(liquids) / displacement),
     tcg: tcgOf(afloat, gmFluid),
   });
+}
+
+/**
+ * What the free surfaces of slack tanks take from GM [m].
+ *
+ *     FSC = Σ ρ·i/Δ
+ *
+ * ρ: density of each liquid [t/m³]; i: second moment of its surface about its own fore-and-aft axis [m⁴].
+ * Source: IMO 2008 IS Code, part B ch. 3 *from memory*.
+ */
+export function freeSurfaceCorrection(
+  liquids: readonly { readonly density: number; readonly freeSurfaceInertia: number }[],
+  displacement: number,
+): number {
+  return sum(liquids.map(({ density, freeSurfaceInertia }) => density * freeSurfaceInertia)) / displacement;
 }
 
 /**
