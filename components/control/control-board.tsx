@@ -10,6 +10,7 @@ import { LinePanel } from "./line-panel";
 import { MoveOrders } from "./move-orders";
 import { MoveSignal } from "./move-signal";
 import { MoveWork } from "./move-work";
+import { movesNotMeasured } from "./moves-not-measured";
 import { Phones } from "./phones";
 import { ReadingsGrid } from "./readings-grid";
 import { RoundProgress } from "./round-progress";
@@ -46,7 +47,7 @@ export function ControlBoard({ snapshot, acts, orders, link, enrol }: ControlBoa
         <ReadingsGrid snapshot={snapshot} />
         <div className="flex min-w-0 flex-col gap-5">
           <LinePanel record={snapshot.record} so={so} />
-          <StandingResult so={so} moves={snapshot.moves} />
+          <StandingResult so={so} moves={snapshot.moves} unmeasured={movesNotMeasured(snapshot.due, so)} />
         </div>
       </div>
       {acts ? (

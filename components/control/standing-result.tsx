@@ -5,11 +5,16 @@ import type { MomentTangentLine } from "@/lib/inclining/inclined-ship";
 import type { TestSoFar } from "@/lib/inclining/test-so-far";
 import type { MoveProgress } from "@/lib/sync/live";
 import { RefusalSentences } from "./refusal-sentences";
+import { runsInWords } from "./runs-in-words";
 
-type StandingResultProps = { so: TestSoFar; moves: readonly MoveProgress[] };
+type StandingResultProps = {
+  so: TestSoFar;
+  moves: readonly MoveProgress[] /** moves in the line whose weights stand where the plan put them */;
+  unmeasured: readonly number[];
+};
 
 /** GM and KG as they stand, how much they rest on, and what is missing: always preliminary. */
-export function StandingResult({ so, moves }: StandingResultProps) {
+export function StandingResult({ so, moves, unmeasured }: StandingResultProps) {
   const { asInclined, line } = so;
   return (
     <Panel title="As it stands" aside={<strong className="text-redlead-text">Preliminary, not for loading or sailing</strong>}>
@@ -21,6 +26,12 @@ export function StandingResult({ so, moves }: StandingResultProps) {
         {so.movesUsed} of {moves.length} moves in the line
         {line?.spread ? ", the interval from the scatter of the moves alone." : "; three are needed for an interval."}
       </p>
+      {unmeasured.length > 0 ? (
+        <p className="mb-2">
+          The weights were not measured at {unmeasured.length === 1 ? "move" : "moves"} <strong>{runsInWords(unmeasured)}</strong>: the
+          plan’s places are used.
+        </p>
+      ) : null}
       {asInclined ? <Rest asInclined={asInclined} /> : null}
       {so.missing.length > 0 ? (
         <div className="mt-3">

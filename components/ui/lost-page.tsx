@@ -1,26 +1,14 @@
-import Link from "next/link";
 import type { ReactNode } from "react";
-import { buttonClass } from "./button";
-import { Notice } from "./notice";
+import { LostWords } from "./lost-words";
 import { PageHeader } from "./page-header";
-import { PageTitle } from "./page-title";
 
-/** A page that can't be shown, in words, with the ways on. */
+/** A page that can't be shown, where no other page surrounds it. */
 export function LostPage({ title, children }: { title: string; children: ReactNode }) {
   return (
     <>
       <PageHeader home="/" />
-      <main id="main" className="mx-auto max-w-hand px-4 py-8">
-        <PageTitle title={title} />
-        <Notice>{children}</Notice>
-        <p className="mt-4 flex flex-wrap gap-3">
-          <Link href="/tests" prefetch={false} className={buttonClass("plain")}>
-            Your tests
-          </Link>
-          <Link href="/" prefetch={false} className={buttonClass("quiet")}>
-            Start
-          </Link>
-        </p>
+      <main id="main" className="mx-auto max-w-page px-4 py-5">
+        <LostWords title={title}>{children}</LostWords>
       </main>
     </>
   );

@@ -1,10 +1,10 @@
-import { LostPage } from "@/components/ui/lost-page";
+import { LostWords } from "@/components/ui/lost-words";
 
 export default function Forbidden() {
   return (
-    <LostPage title="This page is not open to you">
+    <LostWords title="This page is not open to you">
       You are signed in, but have no part in this test that shows it: readers must not see each other’s numbers, and the rest is for those
       who were given a part. Ask the lead or the engineer of the test.
-    </LostPage>
+    </LostWords>
   );
 }
