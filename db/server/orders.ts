@@ -1,5 +1,5 @@
 import { and, eq, inArray } from "drizzle-orm";
-import { eventBodySchema } from "@/lib/sync/event";
+import { type EventOf, eventBodySchema } from "@/lib/sync/event";
 import type { MoveEvent } from "@/lib/sync/move-progress";
 import { events } from "../schema/events";
 import { placedEvents } from "../schema/readings";
@@ -15,13 +15,18 @@ export function moveEvents(db: Database, test: string): MoveEvent[] {
   });
 }
 
-/** The length that was told with a new series of a station [m]; null where none was. */
+/** The series that were begun anew, each with the length told then. */
+export function seriesEvents(db: Database, test: string): EventOf<"station.series">[] {
+  return placedOf(db, test, ["station.series"]).flatMap(({ body }) => {
+    const read = eventBodySchema.parse(JSON.parse(body));
+    return read.type === "station.series" ? [read] : [];
+  });
+}
+
+/** The length that was told with a series of a station [m]; null where none was. */
 export function lengthOrdered(db: Database, test: string, station: string, series: number): number | null {
-  const told = placedOf(db, test, ["station.series"]).map(({ body }) => eventBodySchema.parse(JSON.parse(body)));
-  const ofSeries = told.findLast(
-    (event) => event.type === "station.series" && event.payload.station === station && event.payload.series === series,
-  );
-  return ofSeries?.type === "station.series" ? (ofSeries.payload.length ?? null) : null;
+  const told = seriesEvents(db, test).findLast(({ payload }) => payload.station === station && payload.series === series);
+  return told?.payload.length ?? null;
 }
 
 function placedOf(db: Database, test: string, types: readonly string[]) {
