@@ -17,6 +17,8 @@ export type NewAccount = {
   readonly isAdministrator?: boolean;
   readonly isEngineer?: boolean;
   readonly locale?: string;
+  /** closed from the start: a name in a record, not somebody who signs in */
+  readonly closedAt?: string;
 };
 
 export function accountById(db: Database, id: string): Account | undefined {

@@ -1,6 +1,7 @@
 import { randomUUID } from "node:crypto";
 import { eq } from "drizzle-orm";
 import { z } from "zod";
+import { canonicalJson } from "@/lib/ledger/canonical-json";
 import { testRecordSchema } from "@/lib/record/test-record";
 import { answer, type Result, refuse } from "@/lib/result";
 import type { VesselCopy } from "../schema/tests";
@@ -24,6 +25,13 @@ export function vesselById(db: Database, id: string): Vessel | undefined {
 export function vesselsByName(db: Database): { id: string; name: string; hullNumber: string | null; changedAt: string }[] {
   const { id, name, hullNumber, changedAt } = vessels;
   return db.select({ id, name, hullNumber, changedAt }).from(vessels).orderBy(name, id).all();
+}
+
+/** A vessel known already that is written down in exactly this way. */
+export function sameVessel(db: Database, given: VesselCopy): string | undefined {
+  const wanted = canonicalJson(copyOf({ ...rowOf(given), id: "", createdAt: "", changedAt: "" }));
+  const namesakes = db.select().from(vessels).where(eq(vessels.name, given.vessel.name)).all();
+  return namesakes.find((row) => canonicalJson(copyOf(row)) === wanted)?.id;
 }
 
 export function createVessel(db: Database, given: VesselCopy, act: Act, id: string = randomUUID()): string {

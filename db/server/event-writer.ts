@@ -1,0 +1,24 @@
+import { canonicalJson } from "@/lib/ledger/canonical-json";
+import type { EventBody } from "@/lib/sync/event";
+import type { Envelope } from "@/lib/sync/protocol";
+
+type Numbered = "v" | "seq" | "device" | "test" | "jobTag";
+
+/** What one act says; the writer adds device, number, test and job sheet. */
+export type WrittenAct = EventBody extends infer E ? (E extends EventBody ? Omit<E, Numbered> : never) : never;
+
+/** An act of the wheelhouse that fills no slot. */
+export const noReading = { reading: null, base: null, slot: null, source: null } as const;
+
+/** Writes the acts of one device that has no key: numbered without gaps from 1, in their one canonical text. */
+export class EventWriter {
+  private seq = 0;
+
+  constructor(private readonly from: { readonly device: string; readonly test: string; readonly jobTag: string }) {}
+
+  /** The next envelope of this device. */
+  written(act: WrittenAct): Envelope {
+    this.seq += 1;
+    return { body: canonicalJson({ v: 1, seq: this.seq, ...this.from, ...act }), signature: null };
+  }
+}
