@@ -1,5 +1,6 @@
 import { asc, eq } from "drizzle-orm";
 import { z } from "zod";
+import { canonicalJson } from "@/lib/ledger/canonical-json";
 import { type TestRecord, testRecordSchema } from "@/lib/record/test-record";
 import { answer, type Result, refuse } from "@/lib/result";
 import { planAboard, planHydrometers, planItems, planMoves, planSeries, planStations, planWeights } from "../schema/plan";
@@ -148,6 +149,6 @@ function namedParts(
 /** The parts of one plan that stand otherwise in another: what the ledger keeps of a change. */
 function changedParts(plan: Plan, other: Plan): Partial<Plan> {
   const parts = Object.keys(planSchema.shape) as (keyof Plan)[];
-  const changed = parts.filter((part) => JSON.stringify(plan[part]) !== JSON.stringify(other[part]));
+  const changed = parts.filter((part) => canonicalJson(plan[part] ?? null) !== canonicalJson(other[part] ?? null));
   return Object.fromEntries(changed.map((part) => [part, plan[part] ?? null]));
 }
