@@ -1,0 +1,62 @@
+import { randomUUID } from "node:crypto";
+import type { Visitor } from "./visitors";
+
+const everybody: readonly Visitor[] = ["reader", "lead", "engineer", "witness", "administrator"];
+const allButReaders = everybody.filter((visitor) => visitor !== "reader");
+const office: readonly Visitor[] = ["engineer", "administrator"];
+
+/** Who may, and what a request of theirs looks like and is answered. */
+export type Row = {
+  /** "all": nobody need sign in */
+  readonly allowed: readonly Visitor[] | "all";
+  readonly body?: () => unknown;
+  /** the answer to those who may; 200 where left out */
+  readonly status?: number;
+};
+
+/** Pages that hold nothing of anybody and work without a server. */
+const shells = [
+  "",
+  "join/",
+  "offline/",
+  "readings/",
+  "readings/batten/",
+  "readings/conditions/",
+  "readings/draft/",
+  "readings/held/",
+  "readings/sounding/",
+  "readings/water/",
+];
+
+/** Pages: who may see them. A page that is not here fails the walk. */
+export const pages: Readonly<Record<string, Row["allowed"]>> = {
+  ...Object.fromEntries(shells.map((folder) => [`app/${folder}page.tsx`, "all" as const])),
+  "app/sign-in/page.tsx": "all",
+  "app/(office)/tests/page.tsx": everybody,
+  "app/(office)/tests/[id]/page.tsx": everybody,
+  "app/(office)/tests/[id]/control/page.tsx": allButReaders,
+  "app/(office)/tests/[id]/lightship/page.tsx": ["lead", "engineer", "witness"],
+};
+
+const newCode = { role: "reader", personName: "Rolf" };
+const newDevice = () => ({ device: randomUUID(), name: "Wheelhouse", publicKey: null });
+
+/** Route handlers, method by method. One that is not here fails the walk. */
+export const handlers: Readonly<Record<string, Readonly<Record<string, Row>>>> = {
+  "app/api/health/route.ts": { GET: { allowed: "all" } },
+  "app/api/v1/jobs/route.ts": { GET: { allowed: everybody } },
+  "app/api/v1/devices/route.ts": { POST: { allowed: everybody, body: newDevice, status: 201 } },
+  "app/api/v1/records/route.ts": { POST: { allowed: office, body: () => ({}), status: 422 } },
+  "app/api/v1/sync/route.ts": { POST: { allowed: everybody, body: () => ({ protocol: 1, device: randomUUID(), holds: 0, events: [] }) } },
+  "app/api/v1/tests/[id]/job/route.ts": { GET: { allowed: everybody } },
+  "app/api/v1/tests/[id]/live/route.ts": { GET: { allowed: allButReaders } },
+  "app/api/v1/tests/[id]/record/route.ts": { GET: { allowed: allButReaders } },
+  "app/api/v1/tests/[id]/enrolments/route.ts": {
+    GET: { allowed: ["lead", "engineer", "administrator"] },
+    POST: { allowed: ["lead", "engineer", "administrator"], body: () => newCode, status: 201 },
+  },
+  "app/api/v1/tests/[id]/enrolments/[enrolment]/route.ts": { DELETE: { allowed: ["lead", "engineer", "administrator"], status: 204 } },
+};
+
+/** Answered by the session library itself, which asks for no session. */
+export const signInRoute = "app/api/auth/[...nextauth]/route.ts";
