@@ -1,7 +1,9 @@
 import { isOffice, personOrRefusal, refused } from "@/app/access";
 import { database } from "@/db/server/connection";
 import { importRecord } from "@/db/server/record-import";
-import { testRecordSchema } from "@/lib/record/test-record";
+import { faultsOf } from "@/lib/inclining/faults";
+import { parseRecord } from "@/lib/record/parse-record";
+import { refusalLine } from "@/lib/report/refusal-sentence";
 
 const largest = 32 * 1024 * 1024;
 const mostFaults = 50;
@@ -13,12 +15,8 @@ export async function POST(request: Request): Promise<Response> {
   if (!isOffice(person)) return refused(403, "Only an engineer or an administrator reads records in.");
   const text = await request.text();
   if (text.length > largest) return refusedFile(413, [`A record file may hold ${largest} characters; this one has ${text.length}.`]);
-  const read = testRecordSchema.safeParse(parsed(text));
-  if (!read.success)
-    return refusedFile(
-      422,
-      read.error.issues.map((issue) => inWords(issue.path.join("."), issue.message)),
-    );
+  const read = parseRecord(text);
+  if (!read.ok) return refusedFile(422, faultsOf(read).map(refusalLine));
   const imported = importRecord(database(), read.data, { by: person.id, at: new Date().toISOString() });
   if (!imported.ok)
     return refusedFile(
@@ -34,12 +32,4 @@ function refusedFile(status: number, faults: readonly string[]): Response {
 
 function inWords(path: string, message: string): string {
   return `${path || "document"}: ${message}`;
-}
-
-function parsed(text: string): unknown {
-  try {
-    return JSON.parse(text);
-  } catch {
-    return undefined;
-  }
 }
