@@ -4,8 +4,8 @@ import { sessionSecret } from "./secrets";
 /** Opens and migrates the database before the first request; a server that can't is no server and ends. */
 export function startServer(): void {
   try {
-    process.env.NEXTAUTH_SECRET ??= sessionSecret();
-    process.env.NEXTAUTH_URL ??= `http://localhost:${process.env.PORT ?? 3000}`;
+    process.env.NEXTAUTH_SECRET = sessionSecret();
+    process.env.NEXTAUTH_URL ||= `http://localhost:${process.env.PORT ?? 3000}`;
     database();
   } catch (error) {
     console.error(`Battenbook can't start: ${error instanceof Error ? error.message : String(error)}`);
