@@ -17,7 +17,7 @@ export async function POST(request: Request): Promise<Response> {
   if (text.length > largest) return refusedFile(413, [`A record file may hold ${largest} characters; this one has ${text.length}.`]);
   const read = parseRecord(text);
   if (!read.ok) return refusedFile(422, faultsOf(read).map(refusalLine));
-  const imported = importRecord(database(), read.data, { by: person.id, at: new Date().toISOString() });
+  const imported = importRecord(database(), read.value, { by: person.id, at: new Date().toISOString() });
   if (!imported.ok)
     return refusedFile(
       422,
