@@ -1,5 +1,4 @@
 import { ticks } from "d3-array";
-import { scaleLinear } from "d3-scale";
 import { figure } from "@/lib/report/rounding";
 
 export type BattenMark = { readonly value: number; readonly label: string };
@@ -23,10 +22,7 @@ const EDGE = 16;
 
 /** The batten as it stands below deck, seen from above, port on the left: each mark where it is, the mean and the zero. */
 export function BattenStrip({ unit, marks, mean, zero, span, className = "" }: BattenStripProps) {
-  const along = scaleLinear()
-    .domain([...span])
-    .range([EDGE, WIDTH - EDGE])
-    .clamp(true);
+  const along = placeOnStrip(span);
   return (
     <svg
       viewBox={`0 0 ${WIDTH} ${HEIGHT}`}
@@ -51,6 +47,11 @@ export function BattenStrip({ unit, marks, mean, zero, span, className = "" }: B
 }
 
 type Along = (value: number) => number;
+
+// a mark beyond the part shown stands at its end
+function placeOnStrip([from, to]: readonly [number, number]): Along {
+  return (value) => EDGE + ((WIDTH - 2 * EDGE) * (Math.min(Math.max(value, from), to) - from)) / (to - from);
+}
 
 function Wood({ along, span, unit }: { along: Along; span: readonly [number, number]; unit: "mm" | "°" }) {
   const fine = ticks(span[0], span[1], 40);

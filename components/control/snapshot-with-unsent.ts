@@ -1,6 +1,6 @@
 import type { EventBody, EventOf } from "@/lib/sync/event";
 import type { LiveSnapshot, MoveProgress, ReadingDue, StandingReading } from "@/lib/sync/live";
-import { slotKey } from "@/lib/sync/slot";
+import { slotKey } from "@/lib/sync/slot-key";
 
 /**
  * The snapshot with what this device has saved and not yet sent: the lead sees orders and values take effect while the

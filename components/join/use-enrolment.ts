@@ -1,5 +1,6 @@
 import { useState } from "react";
-import { enrolledIdentity, publicKeyOf, updateIdentity } from "@/db/device/device-identity";
+import { type DeviceIdentity, enrolledIdentity, publicKeyOf, renewedIdentity, updateIdentity } from "@/db/device/device-identity";
+import { isForked } from "@/db/device/event-queue";
 import { jobSheets } from "@/db/device/job-sheets";
 import { fetchAllJobSheets } from "@/worker/job-sheet-refresh";
 import { signedIn } from "./signed-in";
@@ -33,7 +34,7 @@ export function useEnrolment() {
 }
 
 async function enrolled(code: string, deviceName: string, tell: (state: Enrolment) => void): Promise<void> {
-  const identity = await enrolledIdentity(deviceName);
+  const identity = await ownIdentity(deviceName);
   const signed = identity.keys !== null;
   await signedIn({ code, device: identity.device, deviceName, publicKey: JSON.stringify(await publicKeyOf(identity)) });
   tell({ ...nothing, step: "fetching", signed });
@@ -46,6 +47,11 @@ async function enrolled(code: string, deviceName: string, tell: (state: Enrolmen
   await updateIdentity({ persisted });
   const pages = await pagesKept();
   tell({ step: "done", sentence: null, tests, persisted, signed, pages });
+}
+
+async function ownIdentity(deviceName: string): Promise<DeviceIdentity> {
+  const identity = await enrolledIdentity(deviceName);
+  return (await isForked(identity.device)) ? ((await renewedIdentity()) ?? identity) : identity;
 }
 
 // a worker is ready once every page and file is in its store

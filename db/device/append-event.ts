@@ -2,7 +2,7 @@ import "client-only";
 import { v7 as newEventId } from "uuid";
 import { canonicalJson } from "@/lib/ledger/canonical-json";
 import type { EventBody } from "@/lib/sync/event";
-import { slotKey } from "@/lib/sync/slot";
+import { slotKey } from "@/lib/sync/slot-key";
 import { type DeviceDatabase, deviceDatabase } from "./device-database";
 import type { DeviceIdentity } from "./device-identity";
 import { underDeviceLock } from "./device-lock";

@@ -32,6 +32,11 @@ export function eventsOfDevice(device: string): Promise<HeldEvent[]> {
   return deviceDatabase().events.where("[device+seq]").between([device, 0], [device, Number.POSITIVE_INFINITY]).toArray();
 }
 
+/** Whether the server has met another phone with this one's number: a copied profile. */
+export async function isForked(device: string): Promise<boolean> {
+  return (await eventsOfDevice(device)).some(({ receipt }) => receipt?.code === "forked-device");
+}
+
 export async function unsentCount(): Promise<number> {
   return deviceDatabase().events.filter(isUnsent).count();
 }

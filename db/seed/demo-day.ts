@@ -3,7 +3,8 @@ import { noReading, type WrittenAct } from "@/db/server/event-writer";
 import type { TestRecord } from "@/lib/record/test-record";
 import type { ReadingValue } from "@/lib/sync/event";
 import { recordedReadings } from "@/lib/sync/recorded-reading";
-import { type Slot, slotKey } from "@/lib/sync/slot";
+import type { Slot } from "@/lib/sync/slot";
+import { slotKey } from "@/lib/sync/slot-key";
 import { type DemoDevice, holderOf } from "./demo-devices";
 
 /** An act of the demo's day: on which device, when it was done, when the server heard of it. */

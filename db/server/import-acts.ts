@@ -1,7 +1,7 @@
 import { v5 } from "uuid";
 import type { TestRecord } from "@/lib/record/test-record";
 import { type RecordedReading, recordedReadings } from "@/lib/sync/recorded-reading";
-import { slotKey } from "@/lib/sync/slot";
+import { slotKey } from "@/lib/sync/slot-key";
 import { noReading, type WrittenAct } from "./event-writer";
 
 /** An act that brings a part of a record into the events, and the place of that part in the document. */

@@ -1,4 +1,5 @@
-import { BATCH_BYTES, BATCH_EVENTS, type Receipt, type SyncAnswer } from "./protocol";
+import { BATCH_BYTES, BATCH_EVENTS } from "./batch-limits";
+import type { Receipt, SyncAnswer } from "./protocol";
 
 /**
  * The phone's queue as plain rules: what is sent next, and what an answer makes of it. The page and the service worker

@@ -1,10 +1,9 @@
 import { z } from "zod";
 import { ordinal, time, wholeNumber } from "@/lib/record/quantities";
+import { BATCH_EVENTS } from "./batch-limits";
 
 /** `POST /api/v1/sync`: what a phone sends and what it hears. Bodies travel as the exact canonical text they were signed over. */
 export const PROTOCOL = 1;
-export const BATCH_EVENTS = 50;
-export const BATCH_BYTES = 256 * 1024;
 
 export const envelopeSchema = z.strictObject({
   body: z

@@ -2,7 +2,7 @@
 
 import { useRouter } from "next/navigation";
 import type { BattenValue } from "@/lib/inclining/test-readings";
-import { slotKey } from "@/lib/sync/slot";
+import { slotKey } from "@/lib/sync/slot-key";
 import { DueOfTask } from "../due/due-of-task";
 import { ReadingFlow } from "../task/reading-flow";
 import { SheetGate } from "../task/sheet-gate";

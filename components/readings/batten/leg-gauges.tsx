@@ -1,6 +1,6 @@
 "use client";
 
-import { scaleLinear } from "d3-scale";
+import { ticks } from "d3-array";
 import { Side } from "@/components/ui/side";
 import { figure } from "@/lib/report/rounding";
 import { type BattenEntry, type Leg, restOf } from "./batten-entry";
@@ -48,14 +48,12 @@ function LegGauge({ side, level, scale, active, onChoose }: LegGaugeProps) {
 }
 
 function Gauge({ level, scale }: { level: number | null; scale: readonly [number, number] }) {
-  const up = scaleLinear()
-    .domain([...scale])
-    .range([96, 6])
-    .clamp(true);
+  const [least, most] = scale;
+  const up = (value: number) => 96 - (90 * (Math.min(Math.max(value, least), most) - least)) / (most - least);
   return (
     <svg viewBox="0 0 38 102" className="h-[102px] shrink-0" aria-hidden="true">
       <rect x="16" y="2" width="20" height="98" rx="2" className="fill-batten stroke-batten-edge" />
-      {up.ticks(10).map((tick) => (
+      {ticks(least, most, 10).map((tick) => (
         <line key={tick} x1="16" x2="23" y1={up(tick)} y2={up(tick)} className="stroke-batten-ink" />
       ))}
       <rect x="3" y="2" width="10" height="98" rx="5" className="fill-sailcloth-sunken stroke-ink-soft" />

@@ -38,16 +38,3 @@ export function formOfConditions(value: ReadingValue): ConditionsForm {
     note: seen.note ?? "",
   };
 }
-
-export function conditionsInWords(value: ReadingValue): string {
-  const seen = value as Conditions;
-  const words = [
-    seen.wind && `wind ${seen.wind}`,
-    seen.moorings && `moorings ${seen.moorings}`,
-    seen.underKeel !== undefined && `${seen.underKeel} m under the keel`,
-    seen.headcount !== undefined && `${seen.headcount} aboard`,
-    seen.bobFree !== undefined && (seen.bobFree ? "bob free" : "bob not free"),
-    seen.note,
-  ];
-  return words.filter(Boolean).join(", ");
-}

@@ -1,6 +1,6 @@
 "use client";
 
-import { slotKey } from "@/lib/sync/slot";
+import { slotKey } from "@/lib/sync/slot-key";
 import { DueOfTask } from "../due/due-of-task";
 import { NextDue } from "../due/next-due";
 import { ReadingFlow } from "../task/reading-flow";
@@ -8,7 +8,8 @@ import { SheetGate } from "../task/sheet-gate";
 import { conditionSlot } from "../task/slot-query";
 import { TaskHead } from "../task/task-head";
 import type { SheetHere } from "../task/use-job-sheet";
-import { conditionsInWords, emptyConditions, formOfConditions } from "./conditions-form";
+import { emptyConditions, formOfConditions } from "./conditions-form";
+import { conditionsInWords } from "./conditions-in-words";
 import { ConditionsScreen } from "./conditions-screen";
 import { NoteScreen } from "./note-screen";
 

@@ -1,7 +1,8 @@
 import Link from "next/link";
 import { Sign } from "@/components/ui/sign";
 import type { JobSheet } from "@/lib/sync/job-sheet";
-import { type Slot, slotKey } from "@/lib/sync/slot";
+import type { Slot } from "@/lib/sync/slot";
+import { slotKey } from "@/lib/sync/slot-key";
 import { slotHref } from "../task/slot-query";
 
 type BattenGridProps = { sheet: JobSheet; read: ReadonlySet<string> };

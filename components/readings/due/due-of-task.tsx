@@ -1,6 +1,6 @@
 "use client";
 
-import { slotKey } from "@/lib/sync/slot";
+import { slotKey } from "@/lib/sync/slot-key";
 import { type Task, taskNames } from "../task/cautions";
 import type { SheetHere } from "../task/use-job-sheet";
 import { BattenGrid } from "./batten-grid";

@@ -3,7 +3,8 @@
 import Link from "next/link";
 import { buttonClass } from "@/components/ui/button";
 import type { JobSheet } from "@/lib/sync/job-sheet";
-import { type Slot, slotKey } from "@/lib/sync/slot";
+import type { Slot } from "@/lib/sync/slot";
+import { slotKey } from "@/lib/sync/slot-key";
 import { slotHref } from "../task/slot-query";
 import { useDeviceNote } from "../task/use-device-note";
 import type { SheetHere } from "../task/use-job-sheet";

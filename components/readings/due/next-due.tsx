@@ -2,7 +2,8 @@
 
 import Link from "next/link";
 import { buttonClass } from "@/components/ui/button";
-import { type Slot, slotKey } from "@/lib/sync/slot";
+import type { Slot } from "@/lib/sync/slot";
+import { slotKey } from "@/lib/sync/slot-key";
 import type { Task } from "../task/cautions";
 import { slotHref } from "../task/slot-query";
 import type { SheetHere } from "../task/use-job-sheet";

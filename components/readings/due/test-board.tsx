@@ -3,7 +3,7 @@
 import Link from "next/link";
 import { Sign } from "@/components/ui/sign";
 import { TimeOfDay } from "@/components/ui/time-of-day";
-import { slotKey } from "@/lib/sync/slot";
+import { slotKey } from "@/lib/sync/slot-key";
 import { type Task, taskNames } from "../task/cautions";
 import type { SheetHere } from "../task/use-job-sheet";
 import { MyStation } from "./my-station";

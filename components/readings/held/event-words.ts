@@ -4,7 +4,7 @@ import type { EventBody, ReadingValue } from "@/lib/sync/event";
 import type { EventState } from "@/lib/sync/outbox";
 import type { Receipt } from "@/lib/sync/protocol";
 import { battenInWords } from "../batten/batten-in-words";
-import { conditionsInWords } from "../conditions/conditions-form";
+import { conditionsInWords } from "../conditions/conditions-in-words";
 import { slotName } from "../due/sheet-slots";
 
 /** Where an event stands on its way, in words. */

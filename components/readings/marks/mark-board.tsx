@@ -26,7 +26,7 @@ export function MarkBoard({ estimates, mean, kind }: MarkBoardProps) {
       {marks.map((mark) => (
         <g key={mark} className={mean === null ? "opacity-40" : ""}>
           <line x1="84" x2="112" y1={yOf(mark)} y2={yOf(mark)} className="stroke-ink" strokeWidth="2" />
-          <text x="76" y={yOf(mark) + 4} textAnchor="end" className="fill-ink font-mono text-[12px]">
+          <text x="76" y={yOf(mark) + 4} textAnchor="end" className="fill-ink text-[13px]">
             {mean === null ? "·" : figure(mark, 1)}
           </text>
         </g>

@@ -2,7 +2,7 @@
 
 import { Notice } from "@/components/ui/notice";
 import { figure } from "@/lib/report/rounding";
-import { slotKey } from "@/lib/sync/slot";
+import { slotKey } from "@/lib/sync/slot-key";
 import { DueOfTask } from "../due/due-of-task";
 import { NextDue } from "../due/next-due";
 import { ReadingFlow } from "../task/reading-flow";

@@ -18,7 +18,7 @@ export function SavedCard({ shown, corrected, next, onChange, onTakeBack }: Save
     <div className="flex flex-1 flex-col gap-3">
       <div
         role="status"
-        className="flex flex-1 flex-col items-center justify-center gap-3 rounded-lg bg-ink px-4 py-8 text-center text-sailcloth"
+        className="flex flex-1 flex-col items-center justify-center gap-3 rounded-lg border-2 border-batten-edge bg-batten px-4 py-8 text-center text-batten-ink"
       >
         <svg viewBox="0 0 48 48" className="h-16 w-16" aria-hidden="true">
           <path d="M8 26l11 11L40 12" fill="none" stroke="currentColor" strokeWidth="6" strokeLinecap="round" strokeLinejoin="round" />

@@ -21,7 +21,7 @@ export function TypedDigits({ typed, unit, taken = [], onDrop }: TypedDigitsProp
                 type="button"
                 onClick={() => onDrop?.(no - 1)}
                 aria-label={`Take out number ${no}, ${text} ${unit}`}
-                className="flex min-h-tap min-w-tap flex-col items-center justify-center rounded border border-ink-line px-1.5 font-mono text-small leading-tight"
+                className="flex min-h-tap min-w-tap flex-col items-center justify-center rounded border border-ink-line px-1.5 text-base leading-tight"
               >
                 <span className="text-[0.65rem] text-ink-soft">{no}</span>
                 {text}

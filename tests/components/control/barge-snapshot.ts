@@ -4,8 +4,9 @@ import type { EventOf, ReadingValue } from "@/lib/sync/event";
 import type { LiveSnapshot, MoveProgress, ReadingDue } from "@/lib/sync/live";
 import { type MoveEvent, moveProgress } from "@/lib/sync/move-progress";
 import { type DuePlan, ordered, readingsDue } from "@/lib/sync/readings-due";
-import { type Slot, slotKey } from "@/lib/sync/slot";
+import type { Slot } from "@/lib/sync/slot";
 import type { SlotEvent } from "@/lib/sync/slot-heads";
+import { slotKey } from "@/lib/sync/slot-key";
 import { slotProjection } from "@/lib/sync/slot-projection";
 import { bargeRecord } from "./barge";
 

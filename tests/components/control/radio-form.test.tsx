@@ -3,7 +3,7 @@ import { afterEach, describe, expect, test } from "vitest";
 import type { RadioReading } from "@/components/control/radio-entry";
 import { RadioForm } from "@/components/control/radio-form";
 import type { Slot } from "@/lib/sync/slot";
-import { slotKey } from "@/lib/sync/slot";
+import { slotKey } from "@/lib/sync/slot-key";
 import { bargeSnapshot, battenSlot } from "./barge-snapshot";
 
 afterEach(cleanup);
