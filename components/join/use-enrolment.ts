@@ -2,7 +2,6 @@ import { useState } from "react";
 import { type DeviceIdentity, enrolledIdentity, publicKeyOf, renewedIdentity, updateIdentity } from "@/db/device/device-identity";
 import { isForked } from "@/db/device/event-queue";
 import { jobSheets } from "@/db/device/job-sheets";
-import { fetchAllJobSheets } from "@/worker/job-sheet-refresh";
 import { signedIn } from "./signed-in";
 
 export type Step = "idle" | "signing-in" | "fetching" | "keeping" | "done" | "refused";
@@ -40,6 +39,7 @@ async function enrolled(code: string, deviceName: string, tell: (state: Enrolmen
   tell({ ...nothing, step: "fetching", signed });
   // whoever enrols now is the reader from now on; the first sheet names the person
   await updateIdentity({ person: null, server: null });
+  const { fetchAllJobSheets } = await import("@/worker/job-sheet-refresh");
   await fetchAllJobSheets();
   const tests = (await jobSheets()).length;
   tell({ ...nothing, step: "keeping", tests, signed });

@@ -1,8 +1,7 @@
 import { z } from "zod";
 import { numberSchema } from "@/components/ui/number-schema";
-import { typedNumber, typedText } from "@/components/ui/typed-number";
+import { typedNumber } from "@/components/ui/typed-number";
 import { conditionValueSchema } from "@/lib/record/readings-schema";
-import type { ReadingValue } from "@/lib/sync/event";
 
 export type Conditions = z.infer<typeof conditionValueSchema>;
 const optional = (typed: string) => (typed.trim() === "" ? undefined : typed.trim());
@@ -25,16 +24,3 @@ export const conditionsFormSchema = z
   .refine((seen) => Object.keys(seen).length > 0, { message: "Write down at least one thing you see.", path: ["note"] });
 
 export type ConditionsForm = z.input<typeof conditionsFormSchema>;
-export const emptyConditions: ConditionsForm = { wind: "", moorings: "", underKeel: "", headcount: "", bobFree: "", note: "" };
-
-export function formOfConditions(value: ReadingValue): ConditionsForm {
-  const seen = value as Conditions;
-  return {
-    wind: seen.wind ?? "",
-    moorings: seen.moorings ?? "",
-    underKeel: seen.underKeel === undefined ? "" : typedText(seen.underKeel),
-    headcount: seen.headcount === undefined ? "" : String(seen.headcount),
-    bobFree: seen.bobFree === undefined ? "" : seen.bobFree ? "yes" : "no",
-    note: seen.note ?? "",
-  };
-}

@@ -1,5 +1,6 @@
 "use client";
 
+import { lazy, Suspense } from "react";
 import { slotKey } from "@/lib/sync/slot-key";
 import { DueOfTask } from "../due/due-of-task";
 import { NextDue } from "../due/next-due";
@@ -8,10 +9,12 @@ import { SheetGate } from "../task/sheet-gate";
 import { conditionSlot } from "../task/slot-query";
 import { TaskHead } from "../task/task-head";
 import type { SheetHere } from "../task/use-job-sheet";
-import { emptyConditions, formOfConditions } from "./conditions-form";
 import { conditionsInWords } from "./conditions-in-words";
-import { ConditionsScreen } from "./conditions-screen";
+import { emptyConditions, formOfConditions } from "./conditions-typed";
 import { NoteScreen } from "./note-screen";
+
+// the form's library and the schema are loaded when a form is opened
+const ConditionsScreen = lazy(() => import("./conditions-screen").then(({ ConditionsScreen }) => ({ default: ConditionsScreen })));
 
 /** What the weather, the moorings and the people were at a move; or a note in words. */
 export function ConditionsTask() {
@@ -51,7 +54,11 @@ function ConditionsReading({ here, query }: { here: SheetHere; query: URLSearchP
         shown={conditionsInWords}
         next={next}
       >
-        {(entry) => <ConditionsScreen entry={entry} />}
+        {(entry) => (
+          <Suspense fallback={null}>
+            <ConditionsScreen entry={entry} />
+          </Suspense>
+        )}
       </ReadingFlow>
     </>
   );
