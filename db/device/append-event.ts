@@ -22,11 +22,10 @@ export type EventDraft = Drafted<EventBody>;
  * The event as it now stands on this phone's disk. It is answered only after the transaction has completed.
  *
  * Signing can't run inside an IndexedDB transaction, so it runs before, under a lock, and the counter is compared inside:
- * the sequence stays without gaps even where the lock is not kept. The id is made once, so that a try whose success was
- * not heard is not made twice. Throws `StorageFailed` after three fresh connections.
+ * the sequence stays without gaps even where the lock is not kept. The id stays the same from try to try, so that one whose
+ * success was not heard is not made twice. Throws `StorageFailed` after three fresh connections.
  */
-export function appendEvent(draft: EventDraft): Promise<HeldEvent> {
-  const id = newEventId();
+export function appendEvent(draft: EventDraft, id: string = newEventId()): Promise<HeldEvent> {
   return underDeviceLock("append", async () => {
     const event = await keptTrying(() => appended(deviceDatabase(), id, draft));
     markStored(event.device, event.seq);

@@ -3,7 +3,7 @@
 import { useEffect, useRef } from "react";
 import { Button } from "@/components/ui/button";
 import { useExportFile } from "./use-export-file";
-import type { Failure } from "./use-reading";
+import type { Failure } from "./use-saving";
 
 type StorageAlarmProps = { failure: Failure; shown: string; onTryAgain: () => void };
 

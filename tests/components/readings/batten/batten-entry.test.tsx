@@ -16,8 +16,8 @@ const uTube: Station = { ...pendulum, id: "U", instrument: "u-tube", scale: [0, 
 
 const typing = (entry: BattenEntry, text: string) =>
   [...text].reduce((now, key) => withKey(now, (key === "-" ? "sign" : key) as PadKey), entry);
-const swing = (...texts: string[]) =>
-  texts.reduce((entry, text) => withMarkTaken(typing(entry, text)), { ...emptyBattenEntry("pendulum"), mode: "turning-points" as const });
+const swinging: BattenEntry = { ...emptyBattenEntry("pendulum"), mode: "turning-points" };
+const swing = (...texts: string[]) => texts.reduce((entry, text) => withMarkTaken(typing(entry, text)), swinging);
 
 describe("a batten reading while it is typed", () => {
   test("is the number that stands in the digits", () => {
