@@ -1,22 +1,16 @@
 "use client";
 
 import Link from "next/link";
-import { usePathname, useSearchParams } from "next/navigation";
-import { Suspense } from "react";
+import { usePathname } from "next/navigation";
 import { BobSign } from "@/components/ui/bob-sign";
+import { useQuery } from "../task/use-query";
 
 /** Back to the readings due of the same test; on that page, the house's own sign. */
 export function HomeLink() {
-  return (
-    <Suspense fallback={<span className="h-11 w-11" />}>
-      <Back />
-    </Suspense>
-  );
-}
-
-function Back() {
-  const test = useSearchParams().get("test");
+  const query = useQuery();
   const isHome = usePathname() === "/readings";
+  if (!query) return <span className="h-11 w-11 shrink-0" />;
+  const test = query.get("test");
   if (isHome && !test) return <BobSign className="m-1.5 h-8 w-8 shrink-0" />;
   return (
     <Link

@@ -1,29 +1,21 @@
 "use client";
 
 import Link from "next/link";
-import { useSearchParams } from "next/navigation";
-import { type ReactNode, Suspense } from "react";
+import type { ReactNode } from "react";
 import { buttonClass } from "@/components/ui/button";
 import { Notice } from "@/components/ui/notice";
 import type { Task } from "./cautions";
 import { CautionsGate } from "./cautions-gate";
 import { type SheetHere, useJobSheet } from "./use-job-sheet";
+import { useQuery } from "./use-query";
 
 type SheetGateProps = { task: Task; children: (here: SheetHere, query: URLSearchParams) => ReactNode };
 
 /** Opens a task once its test is known on this phone and its cautions are confirmed. */
-export function SheetGate(props: SheetGateProps) {
-  return (
-    <Suspense fallback={<Looking />}>
-      <Gate {...props} />
-    </Suspense>
-  );
-}
-
-function Gate({ task, children }: SheetGateProps) {
-  const query = useSearchParams();
-  const here = useJobSheet(query.get("test"));
-  if (here === undefined) return <Looking />;
+export function SheetGate({ task, children }: SheetGateProps) {
+  const query = useQuery();
+  const here = useJobSheet(query?.get("test") ?? null);
+  if (here === undefined || query === null) return <Looking />;
   if (here === null) return <NoSheet />;
   return (
     <CautionsGate task={task} test={here.sheet.test.id} person={here.person.id}>
