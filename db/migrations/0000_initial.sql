@@ -27,6 +27,14 @@ CREATE TABLE `role_grants` (
 );
 --> statement-breakpoint
 CREATE INDEX `role_grants_of_account` ON `role_grants` (`account`,`test`);--> statement-breakpoint
+CREATE TABLE `device_holders` (
+	`device` text NOT NULL,
+	`account` text NOT NULL,
+	PRIMARY KEY(`device`, `account`),
+	FOREIGN KEY (`device`) REFERENCES `devices`(`id`) ON UPDATE no action ON DELETE no action,
+	FOREIGN KEY (`account`) REFERENCES `accounts`(`id`) ON UPDATE no action ON DELETE no action
+);
+--> statement-breakpoint
 CREATE TABLE `devices` (
 	`id` text PRIMARY KEY NOT NULL,
 	`name` text NOT NULL,
@@ -66,6 +74,7 @@ CREATE TABLE `events` (
 	`seq` integer,
 	`test` text,
 	`type` text,
+	`basis` text,
 	`body` text NOT NULL,
 	`body_hash` text NOT NULL,
 	`signature` text,
@@ -77,6 +86,7 @@ CREATE TABLE `events` (
 );
 --> statement-breakpoint
 CREATE INDEX `events_id` ON `events` (`id`);--> statement-breakpoint
+CREATE INDEX `events_basis` ON `events` (`basis`);--> statement-breakpoint
 CREATE INDEX `events_body_hash` ON `events` (`body_hash`);--> statement-breakpoint
 CREATE INDEX `events_device_seq` ON `events` (`device`,`seq`);--> statement-breakpoint
 CREATE INDEX `events_test` ON `events` (`test`,`type`);--> statement-breakpoint

@@ -1,4 +1,4 @@
-import { integer, sqliteTable, text } from "drizzle-orm/sqlite-core";
+import { integer, primaryKey, sqliteTable, text } from "drizzle-orm/sqlite-core";
 import type { Role } from "@/lib/sync/job-sheet";
 import { accounts } from "./accounts";
 import { tests } from "./tests";
@@ -18,6 +18,20 @@ export const devices = sqliteTable("devices", {
   /** events it says it still holds unsent */
   holds: integer("holds").notNull().default(0),
 });
+
+/** Everybody who ever held a device: what it says in another name is not theirs. */
+export const deviceHolders = sqliteTable(
+  "device_holders",
+  {
+    device: text("device")
+      .notNull()
+      .references(() => devices.id),
+    account: text("account")
+      .notNull()
+      .references(() => accounts.id),
+  },
+  (table) => [primaryKey({ columns: [table.device, table.account] })],
+);
 
 /** A code that lets one phone in, once. Only its hash is kept. */
 export const enrolmentCodes = sqliteTable("enrolment_codes", {

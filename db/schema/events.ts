@@ -14,6 +14,8 @@ export const events = sqliteTable(
     seq: integer("seq"),
     test: text("test"),
     type: text("type"),
+    /** the act it stands on, or that it lets in */
+    basis: text("basis"),
     body: text("body").notNull(),
     bodyHash: text("body_hash").notNull(),
     signature: text("signature"),
@@ -26,6 +28,7 @@ export const events = sqliteTable(
   },
   (table) => [
     index("events_id").on(table.id),
+    index("events_basis").on(table.basis),
     index("events_body_hash").on(table.bodyHash),
     index("events_device_seq").on(table.device, table.seq),
     index("events_test").on(table.test, table.type),

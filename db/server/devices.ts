@@ -1,7 +1,7 @@
-import { desc, eq, inArray } from "drizzle-orm";
+import { and, desc, eq, inArray } from "drizzle-orm";
 import { z } from "zod";
 import { answer, type Result, refuse } from "@/lib/result";
-import { devices, enrolmentCodes } from "../schema/devices";
+import { deviceHolders, devices, enrolmentCodes } from "../schema/devices";
 import type { Act } from "./act";
 import { type Database, inTransaction } from "./connection";
 import { writeEntry } from "./ledger-entries";
@@ -48,9 +48,26 @@ export function registerDevice(db: Database, given: NewDevice, account: string, 
       .onConflictDoUpdate({ target: devices.id, set: { name: row.name, account } })
       .returning()
       .get();
+    noteHolder(db, device.id, account);
     if (known?.account !== account) writeEntry(db, null, { ...act, what: "device.register", after: shown(device) });
     return answer(device);
   });
+}
+
+/** One more person in whose name a device may speak. */
+export function noteHolder(db: Database, device: string, account: string): void {
+  db.insert(deviceHolders).values({ device, account }).onConflictDoNothing().run();
+}
+
+/** Whether a person has ever held a device. */
+export function isHolder(db: Database, device: string, account: string): boolean {
+  const held = and(eq(deviceHolders.device, device), eq(deviceHolders.account, account));
+  return db.select().from(deviceHolders).where(held).get() !== undefined;
+}
+
+/** Hears of a device: when, and how many events it still holds unsent. */
+export function noteHeard(db: Database, id: string, holds: number, at: string): void {
+  db.update(devices).set({ lastHeardAt: at, holds }).where(eq(devices.id, id)).run();
 }
 
 /** Why this device may not be registered; null where it may. */

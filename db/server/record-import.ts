@@ -8,7 +8,7 @@ import { slots } from "../schema/readings";
 import { createAccount } from "./accounts";
 import type { Act } from "./act";
 import { type Database, inTransaction } from "./connection";
-import { registerDevice } from "./devices";
+import { noteHolder, registerDevice } from "./devices";
 import { EventWriter } from "./event-writer";
 import {
   type Authors,
@@ -105,7 +105,7 @@ function takeReadings(db: Database, record: TestRecord, act: Act & { by: string 
   const device = actId(record.test.id, "import");
   promised(registerDevice(db, { device, name: "Record file", publicKey: null }, act.by, act));
   const writer = new EventWriter({ device, test: record.test.id, jobTag: "import" });
-  const authors = authorsOf(db, record, act);
+  const authors = authorsOf(db, record, device, act);
   const send = (acts: readonly ImportAct[]) => sent(db, acts, writer, device, act);
   send([...movesToActs(record, authors), ...seriesToActs(record, authors)]);
   const readings = readingsToActs(record, authors);
@@ -139,14 +139,16 @@ function disagreementsSettled(db: Database, record: TestRecord, authors: Authors
 }
 
 /** An account for every reader the record names: closed from the start, nobody signs in with it. */
-function authorsOf(db: Database, record: TestRecord, act: Act & { by: string }): Authors {
+function authorsOf(db: Database, record: TestRecord, device: string, act: Act & { by: string }): Authors {
   const { battens, drafts, freeboards = [], soundings, water, conditions = [] } = record.readings;
   const all = [...battens, ...drafts, ...freeboards, ...soundings, ...water, ...conditions];
   const named = new Map<string, string>();
   for (const { reader } of all) {
     if (reader === undefined || named.has(reader)) continue;
     const isRelay = all.some((one) => one.reader === reader && (one.source ?? "station") !== "station");
-    named.set(reader, accountFor(db, record.test.id, reader, isRelay ? "lead" : "reader", act));
+    const account = accountFor(db, record.test.id, reader, isRelay ? "lead" : "reader", act);
+    noteHolder(db, device, account);
+    named.set(reader, account);
   }
   return { importer: act.by, of: (reader) => named.get(reader ?? "") ?? act.by };
 }

@@ -21,6 +21,7 @@ export function seawaterDensity(temperatureCelsius: number, salinity: number): n
   return perCubicMetre / 1000;
 }
 
+/** Whether the formula holds there: −2 to 40 °C, salinity 0 to 42. Source: UNESCO Technical Papers in Marine Science 44 (1983). */
 export function isWithinSeawaterRange(temperatureCelsius: number, salinity: number): boolean {
   return temperatureCelsius >= -2 && temperatureCelsius <= 40 && salinity >= 0 && salinity <= 42;
 }

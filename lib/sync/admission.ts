@@ -14,6 +14,10 @@ export type AdmissionFacts = {
   readonly isSignatureGood: boolean | null;
   readonly isIdTakenByOtherBytes: boolean;
   readonly isSeqTaken: boolean;
+  /** the author is one of those who ever held the phone */
+  readonly isAuthorHolder: boolean;
+  /** who sends it held the phone, or has the wheelhouse: what is not signed is believed of nobody else */
+  readonly isSenderTrusted: boolean;
   readonly rolesHeld: readonly Role[];
   /** null: the test is not on this server */
   readonly plan: { readonly plan: DuePlan; readonly ordered: Ordered } | null;
@@ -41,18 +45,21 @@ export function admission(event: EventBody, facts: AdmissionFacts): Result<Event
 
 function senderRefusal(
   event: EventBody,
-  { device, isSignatureGood, isIdTakenByOtherBytes, isSeqTaken, plan }: AdmissionFacts,
+  { device, isSignatureGood, isIdTakenByOtherBytes, isSeqTaken, isAuthorHolder, isSenderTrusted, plan }: AdmissionFacts,
 ): Quarantine | null {
   if (!device.isKnown) return quarantine("unknown-device", "This phone is not enrolled on this server");
   if (device.isRevoked) return quarantine("revoked-device", "This phone was revoked");
   if (isSignatureGood === false) return quarantine("bad-signature", "The signature does not fit the event's bytes");
   if (isSignatureGood === null && device.hasKey) return quarantine("bad-signature", "This phone has a key, but the event is not signed");
+  if (isSignatureGood === null && !isSenderTrusted) return quarantine("bad-signature", "It is not signed, and somebody else sent it");
+  if (!isAuthorHolder) return quarantine("role-not-held", "The author never held this phone");
   if (isIdTakenByOtherBytes) return quarantine("same-id-other-bytes", "Another event has this id");
   if (isSeqTaken) return quarantine("forked-device", `Number ${event.seq} of this phone is another event: enrol the phone again`);
   return plan ? null : quarantine("unknown-test", "The test is not on this server");
 }
 
-const wheelhouse: readonly Role[] = ["lead", "engineer"];
+/** Who may act on anybody's reading. */
+export const wheelhouse: readonly Role[] = ["lead", "engineer"];
 
 function roleRefusal(event: EventBody, { rolesHeld, base }: AdmissionFacts): Quarantine | null {
   if (isAllowed(event, rolesHeld, base.author)) return null;
@@ -77,7 +84,8 @@ function placeRefusal(event: EventBody, { plan, base }: AdmissionFacts): Quarant
   return isFit ? null : quarantine("value-does-not-fit-slot", "The value is of another kind than the reading due");
 }
 
-function isValueOfSlot(event: ReadingEvent, slot: Slot, plan: DuePlan): boolean {
+/** Whether a value is of the kind that a reading due asks for, down to the instrument of its station. */
+export function isValueOfSlot(event: Pick<ReadingEvent, "payload">, slot: Slot, plan: DuePlan): boolean {
   if (!valueSchemas[slot.kind].safeParse(event.payload).success) return false;
   if (slot.kind !== "batten") return true;
   const instrument = plan.stations.find(({ id }) => id === slot.station)?.instrument;

@@ -63,6 +63,7 @@ export function afterComparison(events: readonly QueuedEvent[], known: SyncAnswe
 
 export type QueueCount = { readonly unsent: number; readonly onServer: number; readonly quarantined: number };
 
+/** How many events of a phone are here only, on the server, and set aside there. */
 export function queueCount(events: Iterable<Pick<QueuedEvent, "state">>): QueueCount {
   const count = { unsent: 0, onServer: 0, quarantined: 0 };
   for (const event of events) {

@@ -39,6 +39,8 @@ export const quarantineCodeSchema = z.enum([
   "role-not-held",
   "base-quarantined",
   "value-does-not-fit-slot",
+  "not-set-aside",
+  "server-fault",
 ]);
 export type QuarantineCode = z.infer<typeof quarantineCodeSchema>;
 

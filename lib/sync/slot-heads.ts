@@ -17,6 +17,7 @@ export type SlotHeads = {
   readonly byId: ReadonlyMap<string, SlotEvent>;
 };
 
+/** How the acts of one slot stand on each other. */
 export function slotHeads(events: readonly SlotEvent[]): SlotHeads {
   const known = new Map(events.map((event) => [event.body.id, event]));
   const deferred = events.filter((event) => !isRooted(event, known, new Set()));

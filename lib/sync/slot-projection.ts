@@ -34,8 +34,8 @@ export type SlotProjection = {
 
 export type SlotRules = {
   readonly limits: AgreementLimits;
-  /** what arrived after this number came after the test was reconciled; null while it is not */
-  readonly reconciledSeq: number | null;
+  /** when the test was reconciled, by the server's clock: a reading received after it opens its slot again; null while it is not */
+  readonly reconciledAt: string | null;
 };
 
 /**
@@ -69,13 +69,13 @@ function slotState(isOpen: boolean, speaking: readonly SlotEvent[], readings: re
 function isDisagreement(kind: SlotKind, standing: SlotHeads, speaking: readonly SlotEvent[], rules: SlotRules): boolean {
   if (speaking.some(({ body }) => standing.forkedHeads.has(body.id))) return true;
   if (speaking.length > 1 && speaking.some(({ body }) => body.type === "resolve")) return true;
-  if (speaking.some((head) => isAfterReconciled(head, rules.reconciledSeq))) return true;
+  if (speaking.some((head) => isAfterReconciled(head, rules.reconciledAt))) return true;
   const own = speaking.filter((head) => sourceOf(head) === "station");
   return !isAgreed(kind, (own.length > 0 ? own : speaking).flatMap(valueOfHead), rules.limits);
 }
 
-function isAfterReconciled({ body, serverSeq }: SlotEvent, reconciledSeq: number | null): boolean {
-  return reconciledSeq !== null && serverSeq > reconciledSeq && body.type !== "resolve";
+function isAfterReconciled({ body, receivedAt }: SlotEvent, reconciledAt: string | null): boolean {
+  return reconciledAt !== null && receivedAt > reconciledAt && body.type !== "resolve";
 }
 
 function valueOfHead({ body }: SlotEvent): ReadingValue[] {

@@ -7,16 +7,14 @@ import { createAccount } from "@/db/server/accounts";
 import { tellChange } from "@/db/server/changes";
 import { type Database, openDatabase } from "@/db/server/connection";
 import { registerDevice } from "@/db/server/devices";
-import { nextServerSeq, storeEvent } from "@/db/server/event-store";
 import { liveSnapshot } from "@/db/server/live-snapshot";
 import { liveStream } from "@/db/server/live-stream";
-import { slotRules } from "@/db/server/slot-rules";
-import { placeEvent } from "@/db/server/slot-standing";
+import { grantRole } from "@/db/server/role-grants";
+import { takeEvents } from "@/db/server/take-events";
 import { planOf, savePlan } from "@/db/server/test-plan";
 import { createTest } from "@/db/server/tests";
 import { createVessel } from "@/db/server/vessels";
 import { canonicalJson } from "@/lib/ledger/canonical-json";
-import { sha256Hex } from "@/lib/ledger/sha256";
 import { promised } from "@/lib/result";
 import type { EventBody } from "@/lib/sync/event";
 import type { Slot } from "@/lib/sync/slot";
@@ -40,6 +38,7 @@ beforeEach(() => {
   const given = { title: record.test.title, date: record.test.date, place: record.test.place, timeZone: "Europe/Oslo" };
   id = promised(createTest(db, ship, given, { by: author, at })).id;
   promised(savePlan(db, id, planOf(bargeRecord(-1)), null, { by: author, at }));
+  grantRole(db, { test: id, account: author, role: "lead" }, { by: author, at });
   promised(registerDevice(db, { device, name: "Deck phone", publicKey: null }, author, { by: author, at }));
 });
 afterEach(() => {
@@ -50,18 +49,17 @@ afterEach(() => {
 type Own = "v" | "id" | "device" | "seq" | "test" | "jobTag" | "author" | "capturedAt" | "clockOffsetMs" | "reason";
 type Given = EventBody extends infer E ? (E extends unknown ? Omit<E, Own> : never) : never;
 
-/** An event as the server keeps it once it is admitted. */
+/** An event as the lead's own device sends it. */
 function taken(given: Given): void {
   seq += 1;
   const act = { v: 1, id: randomUUID(), device, seq, test: id, jobTag: "plan", author, capturedAt: at, clockOffsetMs: 0, reason: null };
   const body = { ...act, ...given } as EventBody;
-  const text = canonicalJson(body);
-  const serverSeq = nextServerSeq(db);
-  const envelope = { body: text, bodyHash: sha256Hex(text), signature: null, sentBy: author, receivedAt: at };
-  const { type } = body;
-  storeEvent(db, { serverSeq, id: body.id, device, seq, test: id, type, ...envelope, outcome: "applied", code: null, message: null });
-  placeEvent(db, { body, serverSeq, slot: body.slot }, slotRules(db, id));
-  tellChange(id);
+  const { results } = takeEvents(
+    db,
+    { device, holds: 1, events: [{ body: canonicalJson(body), signature: null }] },
+    { account: author, at },
+  );
+  expect(results[0]?.outcome).not.toBe("quarantined");
 }
 
 const noReading = { reading: null, base: null, slot: null, source: null } as const;

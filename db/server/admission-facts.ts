@@ -1,0 +1,61 @@
+import { createPublicKey, verify } from "node:crypto";
+import { eq } from "drizzle-orm";
+import { type AdmissionFacts, wheelhouse } from "@/lib/sync/admission";
+import type { EventBody } from "@/lib/sync/event";
+import { capturedAt } from "@/lib/sync/lateness";
+import type { Envelope } from "@/lib/sync/protocol";
+import { placedEvents } from "../schema/readings";
+import type { Database } from "./connection";
+import { type Device, deviceById, isHolder } from "./devices";
+import { duePlan } from "./due-plan";
+import { eventById, isIdTaken, isSeqTaken } from "./event-store";
+import { isRoleHeldAt, rolesOf } from "./role-grants";
+
+/** What this server knows of an event's sender and of what stands already, at the moment it arrives. */
+export function admissionFacts(
+  db: Database,
+  event: EventBody,
+  { envelope, bodyHash }: { envelope: Envelope; bodyHash: string },
+  { account, at }: { account: string; at: string },
+): AdmissionFacts {
+  const device = deviceById(db, event.device);
+  return {
+    device: { isKnown: device !== undefined, isRevoked: device?.revokedAt != null, hasKey: device?.publicKey != null },
+    isSignatureGood: isSignatureGood(device, envelope),
+    isIdTakenByOtherBytes: isIdTaken(db, event.id, bodyHash),
+    isSeqTaken: isSeqTaken(db, event.device, event.seq, bodyHash),
+    isAuthorHolder: isHolder(db, event.device, event.author),
+    isSenderTrusted: isHolder(db, event.device, account) || isRoleHeldAt(db, account, event.test, wheelhouse, at),
+    rolesHeld: rolesOf(db, event.author, event.test, momentOf(event, device, at)),
+    plan: duePlan(db, event.test) ?? null,
+    base: baseFacts(db, event),
+  };
+}
+
+/** The act's moment by the server's clock, never before the phone was let in nor after the event arrived: a wrong clock is no crime. */
+function momentOf(event: EventBody, device: Device | undefined, at: string): string {
+  const moment = Math.min(capturedAt(event), Date.parse(at));
+  const enrolled = device ? Date.parse(device.enrolledAt) : moment;
+  return new Date(Math.max(moment, enrolled)).toISOString();
+}
+
+/** Null where nothing is signed or no key is known; a signature over other bytes is false. Source: FIPS 186-5, ECDSA on P-256. */
+export function isSignatureGood(device: Pick<Device, "publicKey"> | undefined, envelope: Envelope): boolean | null {
+  if (!device?.publicKey || envelope.signature === null) return null;
+  const key = createPublicKey({ key: device.publicKey, format: "jwk" });
+  const signature = Buffer.from(envelope.signature, "base64url");
+  return verify("sha256", Buffer.from(envelope.body, "utf8"), { key, dsaEncoding: "ieee-p1363" }, signature);
+}
+
+function baseFacts(db: Database, event: EventBody): AdmissionFacts["base"] {
+  if (typeof event.base !== "string") return { isQuarantined: false, author: null };
+  const base = eventById(db, event.base);
+  if (!base) return { isQuarantined: false, author: null };
+  const isPlaced = db.select().from(placedEvents).where(eq(placedEvents.event, event.base)).get() !== undefined;
+  return { isQuarantined: !isPlaced, author: authorOf(base.body) };
+}
+
+function authorOf(body: string): string | null {
+  const { author } = JSON.parse(body) as { author?: unknown };
+  return typeof author === "string" ? author : null;
+}

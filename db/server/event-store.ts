@@ -1,0 +1,70 @@
+import { and, asc, desc, eq, isNull, max, ne, notInArray, or } from "drizzle-orm";
+import type { Envelope, QuarantineCode, Receipt, SyncAnswer } from "@/lib/sync/protocol";
+import { events } from "../schema/events";
+import type { Database } from "./connection";
+
+export type StoredEvent = typeof events.$inferSelect;
+
+/** Keeps an event with the receipt it gets. The number is given, because the receipt is worked out before. */
+export function storeEvent(db: Database, event: StoredEvent): void {
+  db.insert(events).values(event).run();
+}
+
+export function nextServerSeq(db: Database): number {
+  const last = db
+    .select({ value: max(events.serverSeq) })
+    .from(events)
+    .get();
+  return (last?.value ?? 0) + 1;
+}
+
+/** The event that was sent before with exactly these bytes and this signature; its receipt is given again. */
+export function sameEvent(db: Database, { signature }: Envelope, bodyHash: string): StoredEvent | undefined {
+  const same = and(eq(events.bodyHash, bodyHash), signature === null ? isNull(events.signature) : eq(events.signature, signature));
+  return db.select().from(events).where(same).orderBy(asc(events.serverSeq)).get();
+}
+
+/** Whether another event has this id. */
+export function isIdTaken(db: Database, id: string, bodyHash: string): boolean {
+  const taken = and(eq(events.id, id), ne(events.bodyHash, bodyHash), isGenuine());
+  return db.select({ id: events.id }).from(events).where(taken).get() !== undefined;
+}
+
+/** Whether another event of the device has this number. */
+export function isSeqTaken(db: Database, device: string, seq: number, bodyHash: string): boolean {
+  const taken = and(eq(events.device, device), eq(events.seq, seq), ne(events.bodyHash, bodyHash), isGenuine());
+  return db.select({ id: events.id }).from(events).where(taken).get() !== undefined;
+}
+
+// what anybody may have written, or what broke on its way, takes no name or number from the real event
+function isGenuine() {
+  return or(isNull(events.code), notInArray(events.code, ["bad-signature", "unknown-device", "malformed-body"]));
+}
+
+/** An event by its id; of several with one id (all but the first are set aside) the last. */
+export function eventById(db: Database, id: string): StoredEvent | undefined {
+  return db.select().from(events).where(eq(events.id, id)).orderBy(desc(events.serverSeq)).get();
+}
+
+/** Events that stand on an act, or that want to let it in. */
+export function eventsOn(db: Database, basis: string): StoredEvent[] {
+  return db.select().from(events).where(eq(events.basis, basis)).orderBy(asc(events.serverSeq)).all();
+}
+
+/** What has arrived from a device: its highest number, and the numbers below it that have not. */
+export function receivedFrom(db: Database, device: string): SyncAnswer["device"] & { received: number } {
+  const rows = db.selectDistinct({ seq: events.seq }).from(events).where(eq(events.device, device)).orderBy(asc(events.seq)).all();
+  const seen = new Set(rows.flatMap(({ seq }) => (seq === null ? [] : [seq])));
+  const highestSeq = Math.max(0, ...seen);
+  const missing = Array.from({ length: highestSeq }, (_, i) => i + 1).filter((seq) => !seen.has(seq));
+  return { highestSeq, missing, received: seen.size };
+}
+
+export function receiptOf(event: Pick<StoredEvent, "id" | "outcome" | "serverSeq" | "code" | "message">): Receipt {
+  const { id, outcome, serverSeq, code, message } = event;
+  return { id, outcome, serverSeq, ...aside(code, message) };
+}
+
+function aside(code: QuarantineCode | null, message: string | null): { code?: QuarantineCode; message?: string } {
+  return code === null ? {} : { code, message: message ?? "" };
+}

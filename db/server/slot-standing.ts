@@ -1,0 +1,89 @@
+import { and, eq } from "drizzle-orm";
+import { basisOf, isLettingIn } from "@/lib/sync/basis";
+import { type EventBody, eventBodySchema } from "@/lib/sync/event";
+import type { Slot } from "@/lib/sync/slot";
+import type { SlotEvent, Stamped } from "@/lib/sync/slot-heads";
+import { slotKey } from "@/lib/sync/slot-key";
+import { type SlotProjection, slotProjection } from "@/lib/sync/slot-projection";
+import { events } from "../schema/events";
+import { placedEvents, readings, slots } from "../schema/readings";
+import type { Database } from "./connection";
+import { slotRules } from "./slot-rules";
+
+/** An event that takes part, as it stands in the file of events or is about to. */
+export type Arriving = Stamped<EventBody>;
+
+/**
+ * Gives an event its place and works out anew what stands there; null where it fills no slot (the acts of the
+ * wheelhouse). A slot that it stood in before, while it waited for its base, is worked out as well.
+ */
+export function placeEvent(db: Database, arriving: Arriving, slot: Slot | null): SlotProjection | null {
+  const { body, serverSeq } = arriving;
+  const earlier = placeOf(db, body.id);
+  const row = { event: body.id, serverSeq, test: body.test, type: body.type, slotKey: slot ? slotKey(slot) : null };
+  db.insert(placedEvents).values(row).onConflictDoUpdate({ target: placedEvents.event, set: row }).run();
+  if (earlier && earlier.slotKey !== row.slotKey) standing(db, body.test, earlier.slot);
+  return slot ? standing(db, body.test, slot, arriving) : null;
+}
+
+export function isPlaced(db: Database, event: string): boolean {
+  return db.select().from(placedEvents).where(eq(placedEvents.event, event)).get() !== undefined;
+}
+
+/** The slot in which an act belongs: that of the act it stands on, else its own. */
+export function slotOfEvent(db: Database, body: EventBody): Slot | null {
+  const basis = basisOf(body);
+  const place = basis === null || isLettingIn(body) ? undefined : placeOf(db, basis);
+  return place?.test === body.test ? place.slot : isLettingIn(body) ? null : body.slot;
+}
+
+/** The slots of a test in which events stand. */
+export function slotsStanding(db: Database, test: string): Slot[] {
+  const rows = db.select({ slot: slots.slot }).from(slots).where(eq(slots.test, test)).all();
+  return rows.map(({ slot }) => slot);
+}
+
+/** Works out what stands in a slot and writes it over what stood there. An arriving event need not be in the file yet. */
+export function standing(db: Database, test: string, slot: Slot, arriving?: Arriving): SlotProjection {
+  const projection = slotProjection(slot.kind, eventsOfSlot(db, test, slot, arriving), slotRules(db, test));
+  const place = { test, slotKey: slotKey(slot) };
+  const row = { ...place, slot, state: projection.state, heads: projection.heads };
+  db.insert(slots)
+    .values(row)
+    .onConflictDoUpdate({ target: [slots.test, slots.slotKey], set: row })
+    .run();
+  db.delete(readings)
+    .where(and(eq(readings.test, test), eq(readings.slotKey, place.slotKey)))
+    .run();
+  if (projection.readings.length > 0) {
+    db.insert(readings)
+      .values(projection.readings.map((reading) => ({ ...reading, ...place })))
+      .run();
+  }
+  return projection;
+}
+
+function placeOf(db: Database, event: string): { test: string; slotKey: string; slot: Slot } | undefined {
+  return db
+    .select({ test: placedEvents.test, slotKey: slots.slotKey, slot: slots.slot })
+    .from(placedEvents)
+    .innerJoin(slots, and(eq(slots.test, placedEvents.test), eq(slots.slotKey, placedEvents.slotKey)))
+    .where(eq(placedEvents.event, event))
+    .get();
+}
+
+function eventsOfSlot(db: Database, test: string, slot: Slot, arriving?: Arriving): SlotEvent[] {
+  const rows = db
+    .select({ body: events.body, serverSeq: events.serverSeq, receivedAt: events.receivedAt })
+    .from(placedEvents)
+    .innerJoin(events, eq(events.serverSeq, placedEvents.serverSeq))
+    .where(and(eq(placedEvents.test, test), eq(placedEvents.slotKey, slotKey(slot))))
+    .all();
+  const stored = rows.map(({ body, ...stamp }) => ({ body: eventBodySchema.parse(JSON.parse(body)), ...stamp }));
+  const others = stored.filter(({ serverSeq }) => serverSeq !== arriving?.serverSeq);
+  return [...others, ...(arriving ? [arriving] : [])].flatMap(({ body, ...stamp }) => (isOfSlot(body) ? [{ body, ...stamp }] : []));
+}
+
+function isOfSlot(event: EventBody): event is SlotEvent["body"] {
+  return event.type === "record" || event.type === "correct" || event.type === "void" || event.type === "resolve";
+}
