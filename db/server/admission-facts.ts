@@ -1,15 +1,15 @@
 import { createPublicKey, verify } from "node:crypto";
-import { eq } from "drizzle-orm";
 import { type AdmissionFacts, wheelhouse } from "@/lib/sync/admission";
+import { basisOf } from "@/lib/sync/basis";
 import type { EventBody } from "@/lib/sync/event";
 import { capturedAt } from "@/lib/sync/lateness";
 import type { Envelope } from "@/lib/sync/protocol";
-import { placedEvents } from "../schema/readings";
 import type { Database } from "./connection";
 import { type Device, deviceById, isHolder } from "./devices";
 import { duePlan } from "./due-plan";
 import { eventById, isIdTaken, isSeqTaken } from "./event-store";
 import { isRoleHeldAt, rolesOf } from "./role-grants";
+import { isPlaced, slotOfEvent } from "./slot-standing";
 
 /** What this server knows of an event's sender and of what stands already, at the moment it arrives. */
 export function admissionFacts(
@@ -48,11 +48,12 @@ export function isSignatureGood(device: Pick<Device, "publicKey"> | undefined, e
 }
 
 function baseFacts(db: Database, event: EventBody): AdmissionFacts["base"] {
-  if (typeof event.base !== "string") return { isQuarantined: false, author: null };
-  const base = eventById(db, event.base);
-  if (!base) return { isQuarantined: false, author: null };
-  const isPlaced = db.select().from(placedEvents).where(eq(placedEvents.event, event.base)).get() !== undefined;
-  return { isQuarantined: !isPlaced, author: authorOf(base.body) };
+  const none = { isQuarantined: false, author: null, slot: null };
+  const basis = event.base === null ? null : basisOf(event);
+  const base = basis === null ? undefined : eventById(db, basis);
+  if (basis === null || !base) return none;
+  const isQuarantined = !isPlaced(db, basis);
+  return { isQuarantined, author: authorOf(base.body), slot: isQuarantined ? null : slotOfEvent(db, event) };
 }
 
 function authorOf(body: string): string | null {

@@ -37,12 +37,6 @@ export function slotOfEvent(db: Database, body: EventBody): Slot | null {
   return place?.test === body.test ? place.slot : isLettingIn(body) ? null : body.slot;
 }
 
-/** The slots of a test in which events stand. */
-export function slotsStanding(db: Database, test: string): Slot[] {
-  const rows = db.select({ slot: slots.slot }).from(slots).where(eq(slots.test, test)).all();
-  return rows.map(({ slot }) => slot);
-}
-
 /** Works out what stands in a slot and writes it over what stood there. An arriving event need not be in the file yet. */
 export function standing(db: Database, test: string, slot: Slot, arriving?: Arriving): SlotProjection {
   const projection = slotProjection(slot.kind, eventsOfSlot(db, test, slot, arriving), slotRules(db, test));

@@ -1,9 +1,10 @@
-import { eventFromText } from "@/lib/sync/admission";
+import { eventFromText, isFitting } from "@/lib/sync/admission";
 import { basisOf, isLettingIn } from "@/lib/sync/basis";
 import type { EventBody } from "@/lib/sync/event";
 import type { QuarantineCode } from "@/lib/sync/protocol";
 import type { Slot } from "@/lib/sync/slot";
 import type { Database } from "./connection";
+import { duePlan } from "./due-plan";
 import { eventById, eventsOn, type StoredEvent } from "./event-store";
 import { isPlaced, placeEvent, slotOfEvent } from "./slot-standing";
 
@@ -50,6 +51,8 @@ function placeFollowers(db: Database, basis: string, seen: Set<string>): void {
     const body = bodyOf(follower);
     if (body === null || isLettingIn(body) || basisOf(body) !== basis || !mayFollow(db, follower)) continue;
     const slot = slotOfEvent(db, body);
+    const plan = duePlan(db, body.test)?.plan;
+    if (slot !== null && plan && !isFitting(body, slot, plan)) continue;
     placeEvent(db, { body, ...stampOf(follower) }, slot);
     placeFollowers(db, body.id, seen);
   }

@@ -1,5 +1,5 @@
 import { answer, type Result, refuse } from "@/lib/result";
-import { type EventBody, eventBodySchema, type ReadingEvent, valueSchemas } from "./event";
+import { type EventBody, eventBodySchema, type ReadingEvent, type ReadingValue, valueSchemas } from "./event";
 import type { Role } from "./job-sheet";
 import type { QuarantineCode } from "./protocol";
 import { type DuePlan, isInPlan, type Ordered } from "./readings-due";
@@ -21,7 +21,8 @@ export type AdmissionFacts = {
   readonly rolesHeld: readonly Role[];
   /** null: the test is not on this server */
   readonly plan: { readonly plan: DuePlan; readonly ordered: Ordered } | null;
-  readonly base: { readonly isQuarantined: boolean; readonly author: string | null };
+  /** the act it stands on; its slot is where both belong, whatever the later one says */
+  readonly base: { readonly isQuarantined: boolean; readonly author: string | null; readonly slot: Slot | null };
 };
 
 /** An event's body out of its text, or why it can't be read. The text itself is kept either way. */
@@ -77,20 +78,28 @@ function isAllowed(event: EventBody, held: readonly Role[], baseAuthor: string |
 }
 
 function placeRefusal(event: EventBody, { plan, base }: AdmissionFacts): Quarantine | null {
-  if (event.slot === null || plan === null) return null;
   if (base.isQuarantined) return quarantine("base-quarantined", "The reading it stands on is set aside");
-  if (!isInPlan(plan.plan, plan.ordered, event.slot)) return quarantine("unknown-slot", "The plan has no such reading due");
-  const isFit = event.type === "record" || event.type === "correct" ? isValueOfSlot(event, event.slot, plan.plan) : true;
-  return isFit ? null : quarantine("value-does-not-fit-slot", "The value is of another kind than the reading due");
+  const slot = base.slot ?? event.slot;
+  if (slot === null || plan === null) return null;
+  if (!isInPlan(plan.plan, plan.ordered, slot)) return quarantine("unknown-slot", "The plan has no such reading due");
+  return isFitting(event, slot, plan.plan)
+    ? null
+    : quarantine("value-does-not-fit-slot", "The value is of another kind than the reading due");
 }
 
-/** Whether a value is of the kind that a reading due asks for, down to the instrument of its station. */
-export function isValueOfSlot(event: Pick<ReadingEvent, "payload">, slot: Slot, plan: DuePlan): boolean {
-  if (!valueSchemas[slot.kind].safeParse(event.payload).success) return false;
+/** Whether an act may stand in a slot: one that gives a value gives one of the slot's kind. */
+export function isFitting(event: EventBody, slot: Slot, plan: DuePlan): boolean {
+  if (event.type === "resolve" && event.payload.choice === "new") return isValueOfSlot({ payload: event.payload.value }, slot, plan);
+  return event.type === "record" || event.type === "correct" ? isValueOfSlot(event, slot, plan) : true;
+}
+
+/** The kind that a reading due asks for, down to the instrument of its station. */
+function isValueOfSlot({ payload }: { readonly payload: ReadingValue }, slot: Slot, plan: DuePlan): boolean {
+  if (!valueSchemas[slot.kind].safeParse(payload).success) return false;
   if (slot.kind !== "batten") return true;
   const instrument = plan.stations.find(({ id }) => id === slot.station)?.instrument;
   const shape = { pendulum: "valuesMm", "u-tube": "portMm", inclinometer: "valuesDegrees" } as const;
-  return instrument !== undefined && shape[instrument] in event.payload;
+  return instrument !== undefined && shape[instrument] in payload;
 }
 
 function isOnReading(event: EventBody): event is ReadingEvent {

@@ -1,4 +1,4 @@
-import { isValueOfSlot, type Quarantine } from "./admission";
+import { isFitting, type Quarantine } from "./admission";
 import type { EventBody, EventOf } from "./event";
 import type { QuarantineCode } from "./protocol";
 import { type DuePlan, isInPlan, type Ordered } from "./readings-due";
@@ -30,7 +30,6 @@ export function lettingInRefusal(
   const slot = act.slot ?? body.slot;
   if (slot === null) return null;
   if (!isInPlan(plan, ordered, slot)) return { type: "unknown-slot", message: "The plan has no such reading due: give it another place" };
-  const hasValue = body.type === "record" || body.type === "correct";
-  if (!hasValue || isValueOfSlot(body, slot, plan)) return null;
+  if (isFitting(body, slot, plan)) return null;
   return { type: "value-does-not-fit-slot", message: "The value is of another kind than the reading due there" };
 }

@@ -1,0 +1,27 @@
+import { asc, eq } from "drizzle-orm";
+import { eventFromText } from "@/lib/sync/admission";
+import { isLettingIn } from "@/lib/sync/basis";
+import { events } from "../schema/events";
+import { placedEvents, readings, slots } from "../schema/readings";
+import { type Database, inTransaction } from "./connection";
+import { placeEvent, slotOfEvent } from "./slot-standing";
+import { placeWaiting } from "./waiting-events";
+
+/**
+ * Forgets what stands in a test and works it out again from its events, in the order in which they came. What was set
+ * aside when it came stays so, unless an act let it in.
+ */
+export function rebuildProjection(db: Database, test: string): void {
+  inTransaction(db, () => {
+    for (const table of [placedEvents, slots, readings]) db.delete(table).where(eq(table.test, test)).run();
+    const stored = db.select().from(events).where(eq(events.test, test)).orderBy(asc(events.serverSeq)).all();
+    for (const event of stored) {
+      const read = eventFromText(event.body);
+      if (!read.ok) continue;
+      const { serverSeq, receivedAt } = event;
+      const slot = isLettingIn(read.value) ? null : slotOfEvent(db, read.value);
+      if (event.outcome !== "quarantined") placeEvent(db, { body: read.value, serverSeq, receivedAt }, slot);
+      placeWaiting(db, event);
+    }
+  });
+}
