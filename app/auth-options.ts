@@ -3,7 +3,7 @@ import Credentials from "next-auth/providers/credentials";
 import { database } from "@/db/server/connection";
 import { sessionSecret } from "@/db/server/secrets";
 import { standingPerson } from "@/db/server/sessions";
-import { type SignedIn, sessionOfAccount, sessionOfEnrolment } from "@/db/server/sign-in";
+import { type SignedIn, sessionOfAccount, sessionOfDevice, sessionOfEnrolment } from "@/db/server/sign-in";
 
 const days = 24 * 60 * 60;
 
@@ -25,6 +25,12 @@ export function authOptions(): NextAuthOptions {
         name: "enrolment",
         credentials: { code: {}, device: {}, deviceName: {}, publicKey: {} },
         authorize: async (given) => sessionOfEnrolment(database(), given, now()),
+      }),
+      Credentials({
+        id: "device",
+        name: "device",
+        credentials: { device: {}, signature: {} },
+        authorize: async (given) => sessionOfDevice(database(), given, now()),
       }),
     ],
     callbacks: {

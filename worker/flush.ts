@@ -7,6 +7,7 @@ import { afterAnswer, afterComparison, afterSilence, nextBatch, type StateChange
 import { PROTOCOL, type SyncAnswer } from "@/lib/sync/protocol";
 import type { Reach } from "@/lib/sync/queue-words";
 import { retryDelay } from "@/lib/sync/retry";
+import { signedInByKey } from "./sign-in";
 import { browser, type Heard, type Surroundings, sync } from "./sync-request";
 
 /** A phone with nothing to send still asks now and then: the server may have been restored and miss what it had. */
@@ -38,6 +39,7 @@ async function drained({ urgent }: Wish, around: Surroundings): Promise<Reach> {
 
 async function sendUntilQuiet(around: Surroundings): Promise<Reach> {
   let most = BATCH_EVENTS;
+  let hasSignedIn = false;
   for (;;) {
     const device = await deviceToSend();
     if (device === null) return "unknown";
@@ -47,6 +49,11 @@ async function sendUntilQuiet(around: Surroundings): Promise<Reach> {
       await keepStates(afterSilence(sending(batch)));
       most = Math.max(1, Math.floor(batch.length / 2));
       continue;
+    }
+    if (heard.type === "sign-in-needed" && !hasSignedIn) {
+      hasSignedIn = true;
+      await keepStates(afterSilence(sending(batch)));
+      if (await signedInByKey(around)) continue;
     }
     const moved = await takenIn(device, batch, heard, around);
     if (moved !== "more") return moved;

@@ -2,7 +2,6 @@ import { useState } from "react";
 import { type DeviceIdentity, enrolledIdentity, publicKeyOf, renewedIdentity, updateIdentity } from "@/db/device/device-identity";
 import { isForked } from "@/db/device/event-queue";
 import { jobSheets } from "@/db/device/job-sheets";
-import { signedIn } from "./signed-in";
 
 export type Step = "idle" | "signing-in" | "fetching" | "keeping" | "done" | "refused";
 export type Enrolment = {
@@ -35,7 +34,8 @@ export function useEnrolment() {
 async function enrolled(code: string, deviceName: string, tell: (state: Enrolment) => void): Promise<void> {
   const identity = await ownIdentity(deviceName);
   const signed = identity.keys !== null;
-  await signedIn({ code, device: identity.device, deviceName, publicKey: JSON.stringify(await publicKeyOf(identity)) });
+  const { signedInByCode } = await import("@/worker/sign-in");
+  await signedInByCode({ code, device: identity.device, deviceName, publicKey: JSON.stringify(await publicKeyOf(identity)) });
   tell({ ...nothing, step: "fetching", signed });
   // whoever enrols now is the reader from now on; the first sheet names the person
   await updateIdentity({ person: null, server: null });

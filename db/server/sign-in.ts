@@ -1,8 +1,10 @@
 import { z } from "zod";
-import { type Account, accountSigningIn } from "./accounts";
+import { signInText } from "@/lib/sync/key-sign-in";
+import { type Account, accountById, accountSigningIn } from "./accounts";
+import { isSignatureGood } from "./admission-facts";
 import { Attempts } from "./attempts";
 import type { Database } from "./connection";
-import { newDeviceSchema } from "./devices";
+import { deviceById, newDeviceSchema } from "./devices";
 import { type EnrolmentRefusal, enrol } from "./enrolments";
 import type { Seal } from "./sessions";
 
@@ -53,6 +55,20 @@ export function sessionOfEnrolment(db: Database, given: unknown, at: string): Si
   if (enrolled.ok) return signedIn(enrolled.value.account, device.data.device, phoneHours, at);
   codeAttempts.failed("code", at);
   throw new Error(enrolmentSentences[enrolled.refusal.type]);
+}
+
+const deviceSchema = z.object({ device: z.uuid(), csrfToken: z.string().max(200), signature: z.string().max(200) });
+
+/** A session for a phone that signs the server's own token with its key; null where it is unknown, revoked, or can't. */
+export function sessionOfDevice(db: Database, given: unknown, at: string): SignedIn | null {
+  const read = deviceSchema.safeParse(given);
+  if (!read.success) return null;
+  const { device: id, csrfToken, signature } = read.data;
+  const device = deviceById(db, id);
+  if (!device || device.revokedAt !== null) return null;
+  if (!isSignatureGood(device, { body: signInText(id, csrfToken), signature })) return null;
+  const account = accountById(db, device.account);
+  return account && account.closedAt === null ? signedIn(account, id, phoneHours, at) : null;
 }
 
 function deviceOf({ device, deviceName, publicKey }: z.infer<typeof enrolmentSchema>): unknown {

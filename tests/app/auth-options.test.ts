@@ -1,6 +1,6 @@
 // Next looks for its storage of requests when it is first loaded: this must come before anything of it
 import "next/dist/server/node-environment-baseline";
-import { randomUUID } from "node:crypto";
+import { generateKeyPairSync, randomUUID, sign } from "node:crypto";
 import { mkdtempSync, rmSync } from "node:fs";
 import { tmpdir } from "node:os";
 import path from "node:path";
@@ -9,12 +9,13 @@ import { afterAll, beforeAll, expect, test } from "vitest";
 import { skerryTern } from "@/db/seed/skerry-tern";
 import { createAccount } from "@/db/server/accounts";
 import { database } from "@/db/server/connection";
-import { revokeDevice } from "@/db/server/devices";
+import { publicKeySchema, registerDevice, revokeDevice } from "@/db/server/devices";
 import { makeEnrolment } from "@/db/server/enrolments";
 import { passwordHash } from "@/db/server/passwords";
 import { createTest } from "@/db/server/tests";
 import { createVessel } from "@/db/server/vessels";
 import { promised } from "@/lib/result";
+import { signInText } from "@/lib/sync/key-sign-in";
 import { inRequest } from "./request-scope";
 
 const origin = "http://localhost:3000";
@@ -73,6 +74,27 @@ test("lets a phone in by its code once, and out at once when it is revoked", asy
   expect((await phone.session()).user).toBeUndefined();
 });
 
+test("lets an enrolled phone in again by its key, with no other signature, and not once it is revoked", async () => {
+  const { publicKey, privateKey } = generateKeyPairSync("ec", { namedCurve: "P-256" });
+  const device = randomUUID();
+  const act = { by: engineer, at: new Date().toISOString() };
+  const key = publicKeySchema.parse(publicKey.export({ format: "jwk" }));
+  promised(registerDevice(database(), { device, name: "Deck phone", publicKey: key }, engineer, act));
+  const signed = (text: string) => sign("sha256", Buffer.from(text), { key: privateKey, dsaEncoding: "ieee-p1363" }).toString("base64url");
+  const signIn = async (signature: (token: string) => string) => {
+    const phone = new Browser();
+    const answer = await phone.post("callback/device", (token) => ({ device, signature: signature(token) }));
+    return { phone, status: answer.status };
+  };
+  const { phone, status } = await signIn((token) => signed(signInText(device, token)));
+  expect(status).toBe(200);
+  expect((await phone.session()).user).toEqual({ id: engineer, name: "Ellen Moe" });
+  expect((await signIn(() => signed(signInText(device, "another token")))).status).toBe(401);
+  expect((await signIn(() => "")).status).toBe(401);
+  revokeDevice(database(), device, act);
+  expect((await signIn((token) => signed(signInText(device, token)))).status).toBe(401);
+});
+
 test("refuses a sign-in that no page of ours has begun", async () => {
   const { POST } = await import("@/app/api/auth/[...nextauth]/route");
   const body = new URLSearchParams({ email: "ellen@yard.example", password: "batten-and-bob", csrfToken: "forged", json: "true" });
@@ -81,12 +103,15 @@ test("refuses a sign-in that no page of ours has begun", async () => {
   expect(answer.headers.getSetCookie().some((cookie) => cookie.startsWith("next-auth.session-token="))).toBe(false);
 });
 
+type Fields = Record<string, string>;
+
 /** Holds cookies as a browser does. */
 class Browser {
   private readonly jar = new Map<string, string>();
 
-  async post(action: string, fields: Record<string, string>): Promise<Response> {
+  async post(action: string, given: Fields | ((token: string) => Fields)): Promise<Response> {
     const { csrfToken } = await (await this.sent("GET", "csrf")).json();
+    const fields = typeof given === "function" ? given(csrfToken) : given;
     return this.sent("POST", action, new URLSearchParams({ ...fields, csrfToken, json: "true" }));
   }
 

@@ -3,6 +3,7 @@ import { appendEvent } from "@/db/device/append-event";
 import { deviceDatabase } from "@/db/device/device-database";
 import { deviceIdentity } from "@/db/device/device-identity";
 import { keepStates, lastSending } from "@/db/device/event-queue";
+import { signInText } from "@/lib/sync/key-sign-in";
 import { flush } from "@/worker/flush";
 import { batten, freshPhone } from "../db/device/phone";
 import { simulatedServer } from "./simulated-server";
@@ -146,6 +147,27 @@ describe("what is no answer", () => {
 });
 
 describe("a server that wants to know who is sending", () => {
+  test("is answered by the phone's own key, and then takes everything", async () => {
+    await appendEvent(batten(101.5));
+    const server = simulatedServer();
+    const forms: URLSearchParams[] = [];
+    const asking: typeof fetch = async (input, init) => {
+      if (String(input) === "/api/auth/csrf") return Response.json({ csrfToken: "token" });
+      if (String(input) === "/api/v1/sync") return forms.length > 0 ? server.fetch(input, init) : Response.json({}, { status: 401 });
+      forms.push(init?.body as URLSearchParams);
+      return Response.json({ url: "http://localhost/readings" });
+    };
+    expect(await flush({ urgent: true }, around(asking))).toBe("reached");
+    expect(await states()).toEqual(["on-server"]);
+    const identity = await deviceIdentity();
+    const [form] = forms;
+    expect(form?.get("device")).toBe(identity?.device);
+    const text = new TextEncoder().encode(signInText(identity?.device ?? "", "token"));
+    const signature = Buffer.from(form?.get("signature") ?? "", "base64url");
+    const key = identity?.keys?.publicKey as CryptoKey;
+    expect(await crypto.subtle.verify({ name: "ECDSA", hash: "SHA-256" }, key, signature, text)).toBe(true);
+  });
+
   test.each([401, 403])("pauses the sending by %s, and keeps the queue until somebody has signed in", async (status) => {
     await appendEvent(batten(101.5));
     const server = simulatedServer();

@@ -4,7 +4,7 @@ import Link from "next/link";
 import type { ReactNode } from "react";
 import { buttonClass } from "@/components/ui/button";
 import { Notice } from "@/components/ui/notice";
-import type { Task } from "./cautions";
+import { type Task, taskNames } from "./cautions";
 import { CautionsGate } from "./cautions-gate";
 import { type SheetHere, useJobSheet } from "./use-job-sheet";
 import { useQuery } from "./use-query";
@@ -15,8 +15,8 @@ type SheetGateProps = { task: Task; children: (here: SheetHere, query: URLSearch
 export function SheetGate({ task, children }: SheetGateProps) {
   const query = useQuery();
   const here = useJobSheet(query?.get("test") ?? null);
-  if (here === undefined || query === null) return <Looking />;
-  if (here === null) return <NoSheet />;
+  if (here === undefined || query === null) return <Looking task={task} />;
+  if (here === null) return <NoSheet task={task} />;
   return (
     <CautionsGate task={task} test={here.sheet.test.id} person={here.person.id}>
       {children(here, new URLSearchParams(query))}
@@ -24,13 +24,19 @@ export function SheetGate({ task, children }: SheetGateProps) {
   );
 }
 
-function Looking() {
-  return <p className="py-8 text-center text-ink-soft">Opening the job sheet on this phone</p>;
+function Looking({ task }: { task: Task }) {
+  return (
+    <>
+      <h1 className="font-bold text-title">{taskNames[task]}</h1>
+      <p className="py-8 text-center text-ink-soft">Opening the job sheet on this phone</p>
+    </>
+  );
 }
 
-function NoSheet() {
+function NoSheet({ task }: { task: Task }) {
   return (
     <div className="flex flex-col gap-4 py-4">
+      <h1 className="font-bold text-title">{taskNames[task]}</h1>
       <Notice tone="caution" title="This test is not on this phone">
         Pick one that is, or fetch it where there is signal: enrol the phone with a code from the lead.
       </Notice>
