@@ -14,5 +14,7 @@ export function heardInWords(lastHeardAt: string | null, now: number): string {
   if (minutes < 1) return "Heard just now";
   if (minutes < 60) return `Heard ${minutes} min ago`;
   const hours = Math.floor(minutes / 60);
-  return `Heard ${hours} h ${minutes % 60} min ago`;
+  if (hours < 24) return `Heard ${hours} h ${minutes % 60} min ago`;
+  const days = Math.floor(hours / 24);
+  return `Heard ${days} ${days === 1 ? "day" : "days"} ago`;
 }

@@ -8,6 +8,7 @@ const unreachable =
 export class ConsoleWatch {
   private readonly heard: string[] = [];
   private isServerDown = false;
+  private questionsExpected = 0;
 
   constructor(context: BrowserContext) {
     context.on("console", (message) => this.hearMessage(message));
@@ -28,9 +29,21 @@ export class ConsoleWatch {
     this.isServerDown = false;
   }
 
+  /** A browser killed before it had written its cookies is asked once who it is, and says so in its console. */
+  mayBeAskedToSignIn(): void {
+    this.questionsExpected += 1;
+  }
+
   private hearMessage(message: ConsoleMessage): void {
     if (message.type() !== "error") return;
-    const isExpected = this.isServerDown && unreachable.test(message.text());
+    const isExpected = (this.isServerDown && unreachable.test(message.text())) || this.isQuestion(message);
     if (!isExpected) this.heard.push(`${message.text()} (${message.location().url})`);
+  }
+
+  private isQuestion(message: ConsoleMessage): boolean {
+    const isAsked = message.text().includes("401") && message.location().url.endsWith("/api/v1/sync");
+    if (!isAsked || this.questionsExpected === 0) return false;
+    this.questionsExpected -= 1;
+    return true;
   }
 }

@@ -14,10 +14,15 @@ export async function demoShip(): Promise<DemoShip> {
   return { server, accounts: accountsIn(printed) };
 }
 
-/** Signs a person of this role in, as the sign-in page does. */
-export async function signIn(context: BrowserContext, ship: DemoShip, role: Role): Promise<void> {
+export function accountOf(ship: DemoShip, role: Role): Account {
   const account = ship.accounts.get(role);
   if (!account) throw new Error(`the demo tells of no account for the ${role}`);
+  return account;
+}
+
+/** Signs a person of this role in, as the sign-in page does. */
+export async function signIn(context: BrowserContext, ship: DemoShip, role: Role): Promise<void> {
+  const account = accountOf(ship, role);
   const { csrfToken } = await (await context.request.get(`${ship.server.url}/api/auth/csrf`)).json();
   const form = { csrfToken, ...account, json: "true" };
   await context.request.post(`${ship.server.url}/api/auth/callback/credentials`, { form });
