@@ -7,8 +7,8 @@ export type SlotEvent = Stamped<EventOf<"record" | "correct" | "void" | "resolve
 
 /**
  * The acts of one slot as they stand on each other: a correction or a void stands on one act, a resolve on every act it
- * settles. `heads` are those that nothing stands on; `forks` are acts on which two or more stand that still lead to
- * different heads; `deferred` wait for an act that has not arrived. The order of arrival plays no part.
+ * settles. `heads` are those that nothing stands on; `forkedHeads` are heads reached from one act by ways that part, of
+ * which not all are voids; `deferred` wait for an act that has not arrived. The order of arrival plays no part.
  */
 export type SlotHeads = {
   readonly heads: readonly SlotEvent[];
@@ -20,12 +20,24 @@ export type SlotHeads = {
 /** How the acts of one slot stand on each other. */
 export function slotHeads(events: readonly SlotEvent[]): SlotHeads {
   const known = new Map(events.map((event) => [event.body.id, event]));
-  const deferred = events.filter((event) => !isRooted(event, known, new Set()));
+  const deferred = [...known.values()].filter((event) => !isRooted(event, known, new Set()));
   const waiting = new Set(deferred.map(({ body }) => body.id));
   const byId = new Map([...known].filter(([id]) => !waiting.has(id)));
   const above = childrenOf(byId);
   const heads = [...byId.values()].filter(({ body }) => !above.has(body.id)).sort(inOrderOfIds);
   return { heads, forkedHeads: forkedHeads(above, heads), deferred, byId };
+}
+
+/** Every act that an act stands on, down to the first ones. */
+export function actsBeneath(event: SlotEvent, byId: ReadonlyMap<string, SlotEvent>): ReadonlySet<string> {
+  const found = new Set<string>();
+  const toVisit = [...basesOf(event)];
+  for (const id of toVisit) {
+    const base = found.has(id) ? undefined : byId.get(id);
+    found.add(id);
+    if (base) toVisit.push(...basesOf(base));
+  }
+  return found;
 }
 
 /** The acts that an act stands on. */
@@ -51,14 +63,15 @@ function childrenOf(byId: ReadonlyMap<string, SlotEvent>): Map<string, string[]>
   return above;
 }
 
-/** Heads that contradict a head of the same base: two corrections, two resolves, a correction and a void. */
+/** Heads that contradict a head of the same base: two corrections, two resolves, a correction and a void. Two voids say the same. */
 function forkedHeads(above: ReadonlyMap<string, string[]>, heads: readonly SlotEvent[]): Set<string> {
   const isHead = new Set(heads.map(({ body }) => body.id));
+  const isVoid = new Set(heads.flatMap(({ body }) => (body.type === "void" ? [body.id] : [])));
   const forked = new Set<string>();
   for (const children of above.values()) {
     const reached = children.map((child) => headsAbove(child, above, isHead));
     const all = new Set(reached.flat());
-    if (all.size > 1 && reached.filter((some) => some.length > 0).length > 1) for (const head of all) forked.add(head);
+    if (all.size > 1 && ![...all].every((head) => isVoid.has(head))) for (const head of all) forked.add(head);
   }
   return forked;
 }
