@@ -2,7 +2,7 @@ import { type AgreementLimits, isAgreed } from "./agreement";
 import type { EventOf, ReadingValue } from "./event";
 import type { SlotState } from "./live";
 import type { SlotKind } from "./slot";
-import { basesOf, type SlotEvent, type SlotHeads, slotHeads } from "./slot-heads";
+import { actsBeneath, basesOf, type SlotEvent, type SlotHeads, slotHeads } from "./slot-heads";
 
 export type ReadingStatus = "accepted" | "superseded" | "void" | "disagrees";
 
@@ -43,19 +43,20 @@ export type SlotRules = {
  * under any duplication.
  *
  * Two corrections of one base, a correction against a void, two resolves of the same heads, a head that a resolve did not
- * name, station readings further apart than the limit, a reading after reconciliation: a disagreement. Further readings
+ * name, station readings further apart than the limit, a value or a void after reconciliation: a disagreement. Further readings
  * within the limit stand as replicates. A value by radio or on paper counts only until the station's own is there.
  */
 export function slotProjection(kind: SlotKind, events: readonly SlotEvent[], rules: SlotRules): SlotProjection {
   const standing = slotHeads(events);
-  const speaking = standing.heads.filter(({ body }) => body.type !== "void" || standing.forkedHeads.has(body.id));
+  const speaking = standing.heads.filter((head) => head.body.type !== "void" || isContradiction(head, standing, rules));
   const isOpen = isDisagreement(kind, standing, speaking, rules);
   const accepted = new Set(isOpen ? [] : speaking.flatMap((head) => chosenValues(head, standing)));
   const readings = [...standing.byId.values()].flatMap((event) => projected(event, standing, accepted, isOpen ? speaking : []));
   return {
     state: slotState(isOpen, speaking, readings),
     readings: withoutRelayed(readings).sort(byEvent),
-    heads: speaking.map(({ body }) => body.id),
+    // a void that nobody contests is named too: left out, it would stand against the decision
+    heads: (isOpen ? standing.heads : speaking).map(({ body }) => body.id),
     deferred: standing.deferred.map(({ body }) => body.id).sort(),
   };
 }
@@ -67,15 +68,22 @@ function slotState(isOpen: boolean, speaking: readonly SlotEvent[], readings: re
 }
 
 function isDisagreement(kind: SlotKind, standing: SlotHeads, speaking: readonly SlotEvent[], rules: SlotRules): boolean {
-  if (speaking.some(({ body }) => standing.forkedHeads.has(body.id))) return true;
+  if (speaking.some((head) => isContradiction(head, standing, rules))) return true;
   if (speaking.length > 1 && speaking.some(({ body }) => body.type === "resolve")) return true;
-  if (speaking.some((head) => isAfterReconciled(head, rules.reconciledAt))) return true;
   const own = speaking.filter((head) => sourceOf(head) === "station");
   return !isAgreed(kind, (own.length > 0 ? own : speaking).flatMap(valueOfHead), rules.limits);
 }
 
-function isAfterReconciled({ body, receivedAt }: SlotEvent, reconciledAt: string | null): boolean {
-  return reconciledAt !== null && receivedAt > reconciledAt && body.type !== "resolve";
+/** A head that contradicts another one, or a result that was agreed before it came. */
+function isContradiction(head: SlotEvent, standing: SlotHeads, { reconciledAt }: SlotRules): boolean {
+  return standing.forkedHeads.has(head.body.id) || (reconciledAt !== null && isAfter(reconciledAt, head, standing));
+}
+
+/** An act, or one that it had to wait for, came after that moment; what a resolve has settled is not asked again. */
+function isAfter(moment: string, event: SlotEvent, { byId }: Pick<SlotHeads, "byId">): boolean {
+  if (event.body.type === "resolve") return false;
+  const bases = basesOf(event).flatMap((id) => byId.get(id) ?? []);
+  return event.receivedAt > moment || bases.some((base) => isAfter(moment, base, { byId }));
 }
 
 function valueOfHead({ body }: SlotEvent): ReadingValue[] {
@@ -87,16 +95,23 @@ function sourceOf({ body }: SlotEvent): "station" | "radio" | "paper" {
 }
 
 /** The events whose values count when this head stands: its own, or those that a resolve has chosen. */
-function chosenValues({ body }: SlotEvent, standing: SlotHeads): string[] {
+function chosenValues(head: SlotEvent, standing: SlotHeads): string[] {
+  const { body } = head;
   if (body.type === "void") return [];
   if (body.type !== "resolve") return [body.id];
   if (body.payload.choice === "none") return [];
   if (body.payload.choice === "new") return [body.id];
-  const chosen = body.payload.choice === "one" ? [body.payload.head] : body.base;
-  return chosen.flatMap((id) => {
-    const head = standing.byId.get(id);
-    return head ? chosenValues(head, standing) : [];
+  return chosenActs(head, standing).flatMap((id) => {
+    const chosen = standing.byId.get(id);
+    return chosen ? chosenValues(chosen, standing) : [];
   });
+}
+
+/** Every head for their mean; one of them, or of what they stand on: what an open void would take back can be chosen too. */
+function chosenActs(resolve: SlotEvent, { byId }: SlotHeads): readonly string[] {
+  const { type, payload } = resolve.body;
+  if (type !== "resolve" || payload.choice !== "one") return basesOf(resolve);
+  return actsBeneath(resolve, byId).has(payload.head) ? [payload.head] : [];
 }
 
 function projected(event: SlotEvent, standing: SlotHeads, accepted: ReadonlySet<string>, open: readonly SlotEvent[]): ProjectedReading[] {
