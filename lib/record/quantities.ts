@@ -7,9 +7,12 @@ export const nonNegative = z.number().nonnegative();
 export const wholeNumber = z.number().int().nonnegative();
 export const ordinal = z.number().int().positive();
 
+// half a surrogate pair has no bytes in UTF-8, so nobody could hash or sign it. Source: RFC 3629 §3
+const wholeCharacters = z.string().refine((given) => given.isWellFormed(), "Half a character stands in it");
+
 /** A name used as a reference: a station, mark, weight or tank. */
-export const name = z.string().trim().min(1).max(60);
-export const text = z.string().trim().min(1).max(2000);
+export const name = wholeCharacters.trim().min(1).max(60);
+export const text = wholeCharacters.trim().min(1).max(2000);
 export const time = z.iso.datetime();
 
 /** [x, y, z] of a centre in the ship's frame. */
