@@ -99,7 +99,7 @@ export const eventBodySchema = z.discriminatedUnion("type", [
     ...act,
     type: z.literal("resolve"),
     reading: z.null(),
-    base: z.array(eventId).min(2),
+    base: z.array(eventId).min(1),
     slot: slotSchema.nullable(),
     payload: choiceSchema,
     source: z.null(),
