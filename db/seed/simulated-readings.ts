@@ -1,8 +1,8 @@
 import { type Waterplane, waterplaneHeight } from "@/lib/frame";
 import { gathered } from "@/lib/inclining/faults";
+import type { Noise } from "@/lib/numerics/seeded-noise";
 import type { TestRecord } from "@/lib/record/test-record";
 import { answer, type Result } from "@/lib/result";
-import type { Noise } from "./seeded-noise";
 import { restAt, type SimulatedShip } from "./simulated-ship";
 
 /** How well a simulated crew reads: standard deviations. Every reading is given to its own smallest division. */

@@ -1,6 +1,6 @@
+import { seededNoise } from "@/lib/numerics/seeded-noise";
 import type { TestRecord } from "@/lib/record/test-record";
 import { promised } from "@/lib/result";
-import { seededNoise } from "./seeded-noise";
 import { carefulReadings, type ReadingQuality, simulatedReadings } from "./simulated-readings";
 import { type SimulatedTruth, simulatedShip } from "./simulated-ship";
 import { skerryTernSections } from "./skerry-tern-hull";

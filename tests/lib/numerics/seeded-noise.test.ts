@@ -1,5 +1,5 @@
 import { describe, expect, it } from "vitest";
-import { seededNoise } from "@/db/seed/seeded-noise";
+import { seededNoise } from "@/lib/numerics/seeded-noise";
 
 const drawn = (seed: number, count: number) => {
   const { normal } = seededNoise(seed);

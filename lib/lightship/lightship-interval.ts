@@ -1,0 +1,92 @@
+import type { Faults } from "@/lib/inclining/faults";
+import type { JudgedLine } from "@/lib/inclining/inclining-test";
+import { type InclinedShip, incliningTest } from "@/lib/inclining/inclining-test";
+import { studentTTwoSided95 } from "@/lib/numerics/student-t";
+import { mean, sum } from "@/lib/numerics/sum";
+import { answer, type Result } from "@/lib/result";
+import { type BudgetLine, budgetOf } from "@/lib/uncertainty/budget";
+import { type LocalExpansion, localExpansion } from "@/lib/uncertainty/local-expansion";
+import type { LightshipTestData } from "./inclining-result";
+import { lightshipBalance, lightshipOf } from "./lightship";
+import { statedUncertainty } from "./stated-uncertainty";
+import { type Cause, type LineUncertainty, type TestInput, uncertainInputs } from "./uncertain-inputs";
+
+/** The numbers of a lightship that get an interval, in the order in which an expansion holds them. */
+export const numbersWithInterval = ["displacement", "vcg", "lcg"] as const;
+
+/** A test's result with all that is uncertain in it, ready to be drawn from. */
+export type UncertainLightship = {
+  readonly expansion: LocalExpansion;
+  /** the last one is the metacentre's height, which shifts nothing in the test itself */
+  readonly inputs: readonly TestInput[];
+};
+
+/**
+ * How the lightship follows from everything that is not known exactly. The whole reduction is done again for each input,
+ * a standard uncertainty up and down; the metacentre's own uncertainty stands in KG as it is.
+ *
+ * Refused: what the reduction refuses. See `uncertainInputs` for what is uncertain and by how much.
+ */
+export function uncertainLightship(test: LightshipTestData & Stating): Result<UncertainLightship, Faults> {
+  const ship = incliningTest(test);
+  if (!ship.ok) return ship;
+  const stated = statedUncertainty(test.uncertainty);
+  const inputs = uncertainInputs(test, stated, lineUncertainty(ship.value.line));
+  const expansion = localExpansion<LightshipTestData, Faults>(
+    (given, input) => (input?.cause === "items" ? lightshipNumbers(ship.value, given) : reducedNumbers(given)),
+    test,
+    inputs,
+  );
+  if (!expansion.ok) return expansion;
+  const { displacement } = ship.value.asInclined;
+  const inVcg = (stated.kmt * displacement) / (expansion.value.values[0] ?? displacement);
+  return answer({
+    expansion: {
+      values: expansion.value.values,
+      linear: [...expansion.value.linear, [0, inVcg, 0]],
+      quadratic: [...expansion.value.quadratic, [0, 0, 0]],
+    },
+    inputs: [...inputs, { cause: "hydrostatics", standard: stated.kmt, degreesOfFreedom: null, shifted: (given) => given }],
+  });
+}
+
+type Stating = { readonly uncertainty?: Parameters<typeof statedUncertainty>[0] };
+
+/** What contributes how much to the lightship's KG, the largest first. */
+export function budgetOfVcg({ expansion, inputs }: UncertainLightship): readonly (BudgetLine & { readonly cause: Cause })[] {
+  return budgetOf(expansion, inputs, numbersWithInterval.indexOf("vcg")) as readonly (BudgetLine & { readonly cause: Cause })[];
+}
+
+function reducedNumbers(test: LightshipTestData): Result<readonly number[], Faults> {
+  const ship = incliningTest(test);
+  return ship.ok ? lightshipNumbers(ship.value, test) : ship;
+}
+
+function lightshipNumbers(ship: InclinedShip, test: LightshipTestData): Result<readonly number[], Faults> {
+  const balance = lightshipBalance(ship, test);
+  if (!balance.ok) return { ok: false, refusal: { type: "Faults", faults: [balance.refusal] } };
+  const lightship = lightshipOf(balance.value);
+  return answer(numbersWithInterval.map((number) => lightship[number]));
+}
+
+/**
+ * How well the slope is known: by its scatter with Student's t of its degrees of freedom, or by what the readings' own
+ * uncertainty gives, whichever leaves the wider 95 % interval. What scatter shows holds for gusts that every station felt
+ * as well as for each reading's own error.
+ */
+function lineUncertainty({ slope, spread, moves }: JudgedLine): LineUncertainty {
+  const { betweenMoves, degreesOfFreedom, slopeUncertainty } = spread;
+  const scattered = betweenMoves / Math.sqrt(sum(leversOf(moves).map((lever) => lever ** 2)));
+  const isScatter = studentTTwoSided95(degreesOfFreedom) * scattered >= 1.959964 * slopeUncertainty;
+  if (isScatter) return { relative: scattered / slope, degreesOfFreedom };
+  return { relative: slopeUncertainty / slope, degreesOfFreedom: null };
+}
+
+function leversOf(moves: JudgedLine["moves"]): number[] {
+  const sessions = [...new Set(moves.map(({ session }) => session))];
+  return sessions.flatMap((session) => {
+    const moments = moves.filter((move) => move.session === session).map(({ moment }) => moment);
+    const centre = mean(moments);
+    return moments.map((moment) => moment - centre);
+  });
+}
