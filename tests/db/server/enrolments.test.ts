@@ -6,7 +6,7 @@ import { enrol, enrolmentsOf, makeEnrolment, revokeEnrolment } from "@/db/server
 import { ledgerOf } from "@/db/server/ledger-entries";
 import { rolesOf } from "@/db/server/role-grants";
 import { promised } from "@/lib/result";
-import { after, at, personWith, testIn, type Yard, yard } from "./yard";
+import { at, hoursLater, personWith, testIn, type Yard, yard } from "./yard";
 
 const phone = () => ({ device: randomUUID(), name: "Deck phone", publicKey: null });
 
@@ -18,12 +18,12 @@ test("lets one phone in, with its person and role, from that moment on", () => {
   const here = yard();
   const { db, test: id } = here;
   const deck = phone();
-  const { account, device, test: joined } = promised(enrol(db, codeFor(here).code, deck, after(1)));
+  const { account, device, test: joined } = promised(enrol(db, codeFor(here).code, deck, hoursLater(1)));
   expect(joined).toBe(id);
   expect(account).toMatchObject({ name: "Rolf", email: null, passwordHash: null });
-  expect(device).toMatchObject({ id: deck.device, account: account.id, enrolledAt: after(1) });
+  expect(device).toMatchObject({ id: deck.device, account: account.id, enrolledAt: hoursLater(1) });
   expect(rolesOf(db, account.id, id, at)).toEqual([]);
-  expect(rolesOf(db, account.id, id, after(1))).toEqual(["reader"]);
+  expect(rolesOf(db, account.id, id, hoursLater(1))).toEqual(["reader"]);
   expect(devicesEnrolledIn(db, id).map(({ id }) => id)).toEqual([deck.device]);
   expect(ledgerOf(db, id).at(-1)).toMatchObject({ what: "enrolment.use", who: account.id, device: deck.device });
 });
@@ -31,38 +31,38 @@ test("lets one phone in, with its person and role, from that moment on", () => {
 test("works once", () => {
   const here = yard();
   const { code } = codeFor(here);
-  expect(enrol(here.db, code, phone(), after(1)).ok).toBe(true);
-  expect(enrol(here.db, code, phone(), after(2))).toEqual({ ok: false, refusal: { type: "CodeUsed", usedAt: after(1) } });
+  expect(enrol(here.db, code, phone(), hoursLater(1)).ok).toBe(true);
+  expect(enrol(here.db, code, phone(), hoursLater(2))).toEqual({ ok: false, refusal: { type: "CodeUsed", usedAt: hoursLater(1) } });
 });
 
 test("expires after a day", () => {
   const here = yard();
   const { code, expiresAt } = codeFor(here);
-  expect(expiresAt).toBe(after(24));
-  expect(enrol(here.db, code, phone(), after(24))).toEqual({ ok: false, refusal: { type: "CodeExpired", expiresAt } });
-  expect(enrol(here.db, code, phone(), after(23.99)).ok).toBe(true);
+  expect(expiresAt).toBe(hoursLater(24));
+  expect(enrol(here.db, code, phone(), hoursLater(24))).toEqual({ ok: false, refusal: { type: "CodeExpired", expiresAt } });
+  expect(enrol(here.db, code, phone(), hoursLater(23.99)).ok).toBe(true);
 });
 
 test("is worthless once it was taken back, or when nobody made it", () => {
   const here = yard();
   const { code, id } = codeFor(here);
-  revokeEnrolment(here.db, here.test, id, { by: here.engineer.id, at: after(1) });
-  expect(enrol(here.db, code, phone(), after(2))).toEqual({ ok: false, refusal: { type: "CodeRevoked", revokedAt: after(1) } });
-  expect(enrol(here.db, "3333-3333", phone(), after(2))).toEqual({ ok: false, refusal: { type: "CodeUnknown" } });
+  revokeEnrolment(here.db, here.test, id, { by: here.engineer.id, at: hoursLater(1) });
+  expect(enrol(here.db, code, phone(), hoursLater(2))).toEqual({ ok: false, refusal: { type: "CodeRevoked", revokedAt: hoursLater(1) } });
+  expect(enrol(here.db, "3333-3333", phone(), hoursLater(2))).toEqual({ ok: false, refusal: { type: "CodeUnknown" } });
 });
 
 test("can't be taken back from another test", () => {
   const here = yard();
   const { code, id } = codeFor(here);
   const other = testIn(here.db, here.vessel, here.engineer.id);
-  revokeEnrolment(here.db, other, id, { by: here.engineer.id, at: after(1) });
-  expect(enrol(here.db, code, phone(), after(2)).ok).toBe(true);
+  revokeEnrolment(here.db, other, id, { by: here.engineer.id, at: hoursLater(1) });
+  expect(enrol(here.db, code, phone(), hoursLater(2)).ok).toBe(true);
 });
 
 test("is taken as it is typed: small letters, without the hyphen", () => {
   const here = yard();
   const typed = codeFor(here).code.toLowerCase().replace("-", " ");
-  expect(enrol(here.db, typed, phone(), after(1)).ok).toBe(true);
+  expect(enrol(here.db, typed, phone(), hoursLater(1)).ok).toBe(true);
 });
 
 test("has eight characters that can't be taken for one another, and is kept nowhere", () => {
@@ -83,9 +83,9 @@ test("leaves no account, role or used code behind when the phone itself is refus
   revokeDevice(here.db, lost.device, { by: here.engineer.id, at });
   const { code } = codeFor(here);
   const before = accountsByName(here.db).length;
-  expect(enrol(here.db, code, lost, after(1))).toEqual({ ok: false, refusal: { type: "DeviceRevoked", device: lost.device } });
+  expect(enrol(here.db, code, lost, hoursLater(1))).toEqual({ ok: false, refusal: { type: "DeviceRevoked", device: lost.device } });
   expect(accountsByName(here.db)).toHaveLength(before);
-  expect(enrol(here.db, code, phone(), after(1)).ok).toBe(true);
+  expect(enrol(here.db, code, phone(), hoursLater(1)).ok).toBe(true);
 });
 
 test("opens only the maker's own account or that of somebody who reads in this test and does nothing else", () => {
@@ -109,14 +109,14 @@ test("lets nobody in on a closed account", () => {
   const reader = personWith(here, "reader");
   const { code } = codeFor(here, reader.id);
   closeAccount(here.db, reader.id, { by: null, at });
-  expect(enrol(here.db, code, phone(), after(1))).toEqual({ ok: false, refusal: { type: "AccountClosed" } });
+  expect(enrol(here.db, code, phone(), hoursLater(1))).toEqual({ ok: false, refusal: { type: "AccountClosed" } });
 });
 
 test("binds a second phone to the same person", () => {
   const here = yard();
   const reader = personWith(here, "reader");
   const deck = phone();
-  const { account } = promised(enrol(here.db, codeFor(here, reader.id).code, deck, after(1)));
+  const { account } = promised(enrol(here.db, codeFor(here, reader.id).code, deck, hoursLater(1)));
   expect(account.id).toBe(reader.id);
   expect(deviceById(here.db, deck.device)?.account).toBe(reader.id);
 });

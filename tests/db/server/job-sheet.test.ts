@@ -5,7 +5,7 @@ import { savePlan } from "@/db/server/test-plan";
 import { changeState } from "@/db/server/tests";
 import { promised } from "@/lib/result";
 import { jobSheetSchema } from "@/lib/sync/job-sheet";
-import { after, at, personWith, plan, yard } from "./yard";
+import { at, hoursLater, personWith, plan, yard } from "./yard";
 
 const act = { by: null, at };
 const words = {
@@ -52,7 +52,7 @@ test("warns of every tank that holds something else than clean water, unless the
 test("keeps its tag while the plan stands, and its ETag while nothing changes but the time", () => {
   const { sheet, db, test: id } = issued();
   const first = sheet();
-  expect(sheet(after(1)).etag).toBe(first.etag);
+  expect(sheet(hoursLater(1)).etag).toBe(first.etag);
   promised(changeState(db, id, "open", act));
   const opened = sheet();
   expect(opened.sheet.tag).toBe(first.sheet.tag);

@@ -3,7 +3,7 @@ import { expect, test } from "vitest";
 import { changePassword, closeAccount } from "@/db/server/accounts";
 import { registerDevice, revokeDevice } from "@/db/server/devices";
 import { standingPerson } from "@/db/server/sessions";
-import { after, at, yard } from "./yard";
+import { at, hoursLater, yard } from "./yard";
 
 const act = { by: null, at };
 
@@ -11,7 +11,7 @@ function signedIn(device: string | null = null) {
   const here = yard();
   if (device) registerDevice(here.db, { device, name: "Phone", publicKey: null }, here.engineer.id, act);
   const { id: sub, sessionVersion: version } = here.engineer;
-  return { ...here, seal: { sub, version, device, endsAt: after(24) } };
+  return { ...here, seal: { sub, version, device, endsAt: hoursLater(24) } };
 }
 
 test("knows the person of a session, and the phone", () => {
@@ -29,8 +29,8 @@ test("knows the person of a session, and the phone", () => {
 
 test("ends at its time", () => {
   const { db, seal } = signedIn();
-  expect(standingPerson(db, seal, after(23.99))).not.toBeNull();
-  expect(standingPerson(db, seal, after(24))).toBeNull();
+  expect(standingPerson(db, seal, hoursLater(23.99))).not.toBeNull();
+  expect(standingPerson(db, seal, hoursLater(24))).toBeNull();
 });
 
 test("ends at once when the account is closed, the password changed or the phone revoked", () => {

@@ -6,19 +6,19 @@ import { passwordHash } from "@/db/server/passwords";
 import { standingPerson } from "@/db/server/sessions";
 import { sessionOfAccount, sessionOfEnrolment, tooManyAttempts } from "@/db/server/sign-in";
 import { promised } from "@/lib/result";
-import { after, at, yard } from "./yard";
+import { at, hoursLater, yard } from "./yard";
 
 test("gives a day to a password and a month to a phone", async () => {
   const { db, test: id, engineer } = yard();
   const hash = await passwordHash("batten-and-bob");
   promised(createAccount(db, { name: "Ann", email: "ann@yard.example", passwordHash: hash }, { by: null, at }));
   const byPassword = await sessionOfAccount(db, { email: "Ann@yard.example", password: "batten-and-bob" }, at);
-  expect(byPassword).toMatchObject({ name: "Ann", seal: { device: null, endsAt: after(24) } });
+  expect(byPassword).toMatchObject({ name: "Ann", seal: { device: null, endsAt: hoursLater(24) } });
   const { code } = promised(makeEnrolment(db, id, { role: "reader", personName: "Rolf" }, { by: engineer.id, at }));
   const device = randomUUID();
   const byCode = sessionOfEnrolment(db, { code, device, deviceName: "Deck phone", publicKey: "null" }, at);
-  expect(byCode).toMatchObject({ name: "Rolf", seal: { device, endsAt: after(30 * 24) } });
-  expect(standingPerson(db, { sub: byCode.id, ...byCode.seal }, after(700))?.name).toBe("Rolf");
+  expect(byCode).toMatchObject({ name: "Rolf", seal: { device, endsAt: hoursLater(30 * 24) } });
+  expect(standingPerson(db, { sub: byCode.id, ...byCode.seal }, hoursLater(700))?.name).toBe("Rolf");
 });
 
 test("refuses what is no pair of address and password", async () => {

@@ -4,7 +4,7 @@ import { ledgerOf } from "@/db/server/ledger-entries";
 import { changeState, createTest, newTestSchema, testById, testsOf } from "@/db/server/tests";
 import { changeVessel, vesselById } from "@/db/server/vessels";
 import { promised } from "@/lib/result";
-import { after, at, personWith, testIn, yard } from "./yard";
+import { at, hoursLater, personWith, testIn, yard } from "./yard";
 
 const given = { title: "Second test", date: "2026-06-01", place: "Quay", timeZone: "Europe/Oslo" };
 
@@ -12,12 +12,14 @@ test("lists to a person the tests in which he has a part, the latest first", () 
   const here = yard();
   const later = promised(createTest(here.db, here.vessel, given, { by: null, at })).id;
   const reader = personWith(here, "reader");
-  expect(testsOf(here.db, reader.id, after(1)).map(({ id }) => id)).toEqual([here.test]);
+  expect(testsOf(here.db, reader.id, hoursLater(1)).map(({ id }) => id)).toEqual([here.test]);
   const lead = personWith({ db: here.db, test: later }, "lead");
-  expect(testsOf(here.db, lead.id, after(1))).toMatchObject([{ id: later, vessel: "MV Skerry Tern", roles: ["lead"], state: "planning" }]);
+  expect(testsOf(here.db, lead.id, hoursLater(1))).toMatchObject([
+    { id: later, vessel: "MV Skerry Tern", roles: ["lead"], state: "planning" },
+  ]);
   const both = testIn(here.db, here.vessel, here.engineer.id);
   expect(
-    testsOf(here.db, here.engineer.id, after(1))
+    testsOf(here.db, here.engineer.id, hoursLater(1))
       .map(({ id }) => id)
       .sort(),
   ).toEqual([here.test, both].sort());
@@ -26,7 +28,7 @@ test("lists to a person the tests in which he has a part, the latest first", () 
 test("keeps the vessel as she was when the test was made", () => {
   const { db, vessel, test: id, engineer } = yard();
   const { id: _, changedAt, ...ship } = vesselById(db, vessel) ?? expect.fail("no vessel");
-  promised(changeVessel(db, vessel, { ...ship, vessel: { ...ship.vessel, lbp: 99 } }, { by: engineer.id, at: after(1) }));
+  promised(changeVessel(db, vessel, { ...ship, vessel: { ...ship.vessel, lbp: 99 } }, { by: engineer.id, at: hoursLater(1) }));
   expect(vesselById(db, vessel)?.vessel.lbp).toBe(99);
   expect(testById(db, id)?.vesselCopy.vessel.lbp).toBe(54);
 });

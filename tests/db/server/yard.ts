@@ -41,6 +41,6 @@ export function personWith({ db, test }: Pick<Yard, "db" | "test">, role: Role, 
 }
 
 /** A moment some hours after the yard was opened. */
-export function after(hours: number): string {
+export function hoursLater(hours: number): string {
   return new Date(Date.parse(at) + hours * 3_600_000).toISOString();
 }
