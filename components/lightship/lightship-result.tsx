@@ -29,7 +29,7 @@ function Headline({ name, ...quantity }: { name: string } & QuantityProps) {
   return (
     <div>
       <p className="text-ink-soft text-small">{name}</p>
-      <p className="font-bold text-figure">
+      <p className="whitespace-nowrap font-bold text-title sm:text-figure">
         <Quantity {...quantity} />
       </p>
     </div>

@@ -14,7 +14,7 @@ export function SlotLink({ test, slot, name, read, className = "" }: SlotLinkPro
       prefetch={false}
       className={`flex min-h-key items-center justify-between gap-2 rounded border-2 px-3 font-bold ${look} ${className}`}
     >
-      <span className="min-w-0 truncate">{name}</span>
+      <span className="min-w-0 leading-tight">{name}</span>
       <Sign kind={read ? "read" : "due"} className="h-4 w-4" />
       <span className="sr-only">{read ? "read with this phone" : "not read with this phone"}</span>
     </Link>
