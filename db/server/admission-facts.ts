@@ -1,8 +1,8 @@
 import { createPublicKey, verify } from "node:crypto";
 import { type AdmissionFacts, wheelhouse } from "@/lib/sync/admission";
 import { basisOf } from "@/lib/sync/basis";
+import { capturedAt } from "@/lib/sync/captured-at";
 import type { EventBody } from "@/lib/sync/event";
-import { capturedAt } from "@/lib/sync/lateness";
 import type { Envelope } from "@/lib/sync/protocol";
 import type { Database } from "./connection";
 import { type Device, deviceById, isHolder } from "./devices";

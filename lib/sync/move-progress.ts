@@ -1,3 +1,4 @@
+import { capturedAt } from "./captured-at";
 import type { EventOf } from "./event";
 import type { Stamped } from "./slot-heads";
 
@@ -11,8 +12,11 @@ export type MoveRun = {
   readonly repeat: number;
   readonly state: RunState;
   readonly excluded: string | null;
+  /** the first act of its kind, in the words of its own phone's clock */
   readonly openedAt: string | null;
   readonly closedAt: string | null;
+  /** the first close by the server's clock [ms since 1970]; what was taken after it came too late */
+  readonly closedMoment: number | null;
   /** server's number of the first close; what arrives after it is late */
   readonly closedSeq: number | null;
 };
@@ -30,23 +34,23 @@ export function moveProgress(moves: readonly number[], events: readonly MoveEven
   return isContradicted ? runs.map((one) => (one.state === "open" ? { ...one, state: "disagrees" } : one)) : runs;
 }
 
+// the numbers that were told, not all up to the highest: one mistaken order must not make a million runs
 function repeatsOf(move: number, events: readonly MoveEvent[]): number[] {
-  const highest = Math.max(1, ...events.filter(({ body }) => body.payload.move === move).map(({ body }) => body.payload.repeat));
-  return Array.from({ length: highest }, (_, i) => i + 1);
+  const told = events.filter(({ body }) => body.payload.move === move).map(({ body }) => body.payload.repeat);
+  return [...new Set([1, ...told])].sort((a, b) => a - b);
 }
 
 function run(move: number, repeat: number, events: readonly MoveEvent[]): MoveRun {
   const acts = events.filter(({ body }) => body.payload.move === move && body.payload.repeat === repeat);
-  const opens = acts.filter(({ body }) => body.type === "move.open");
-  const closes = acts.filter(({ body }) => body.type === "move.close");
-  const excludes = acts.filter(({ body }) => body.type === "move.exclude").sort((a, b) => (a.body.id < b.body.id ? -1 : 1));
+  const [opens, closes, excludes] = [inTurn(acts, "move.open"), inTurn(acts, "move.close"), inTurn(acts, "move.exclude")];
   return {
     move,
     repeat,
     state: closes.length > 0 ? "closed" : opens.length > 0 ? "open" : "due",
     excluded: excludes[0] ? (excludes[0].body.reason ?? "excluded") : null,
-    openedAt: earliest(opens),
-    closedAt: earliest(closes),
+    openedAt: opens[0]?.body.capturedAt ?? null,
+    closedAt: closes[0]?.body.capturedAt ?? null,
+    closedMoment: closes[0] ? capturedAt(closes[0].body) : null,
     closedSeq: closes.length > 0 ? Math.min(...closes.map(({ serverSeq }) => serverSeq)) : null,
   };
 }
@@ -60,7 +64,8 @@ function isRunOf(one: MoveRun, payload: { move: number; repeat: number }): boole
   return one.move === payload.move && one.repeat === payload.repeat;
 }
 
-function earliest(events: readonly MoveEvent[]): string | null {
-  const times = events.map(({ body }) => body.capturedAt).sort();
-  return times[0] ?? null;
+/** Acts of one kind, earliest first by the server's clock; at one moment in the order of their ids. */
+function inTurn(acts: readonly MoveEvent[], type: MoveEvent["body"]["type"]): MoveEvent[] {
+  const byMoment = (a: MoveEvent, b: MoveEvent) => capturedAt(a.body) - capturedAt(b.body) || (a.body.id < b.body.id ? -1 : 1);
+  return acts.filter(({ body }) => body.type === type).sort(byMoment);
 }
