@@ -10,6 +10,7 @@ import { Notice } from "@/components/ui/notice";
 import { Panel } from "@/components/ui/panel";
 import type { TestRecord } from "@/lib/record/test-record";
 import { BalanceTable } from "./balance-table";
+import { DefencePanel } from "./defence-panel";
 import { FitPanel } from "./fit-panel";
 import { HydrostaticsPanel } from "./hydrostatics-panel";
 import { ItemsTable } from "./items-table";
@@ -33,6 +34,7 @@ function Found({ found, record }: { found: FoundLightship; record: TestRecord })
   return (
     <>
       <LightshipResult lightship={lightship} ship={ship} />
+      <DefencePanel record={record} />
       <Panel title="From as inclined to lightship">
         <BalanceTable lines={lines} />
       </Panel>

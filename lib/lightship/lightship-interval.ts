@@ -50,7 +50,8 @@ export function uncertainLightship(test: LightshipTestData & Stating): Result<Un
   });
 }
 
-type Stating = { readonly uncertainty?: Parameters<typeof statedUncertainty>[0] };
+/** A test that may state its uncertainties. */
+export type Stating = { readonly uncertainty?: Parameters<typeof statedUncertainty>[0] };
 
 /** What contributes how much to the lightship's KG, the largest first. */
 export function budgetOfVcg({ expansion, inputs }: UncertainLightship): readonly (BudgetLine & { readonly cause: Cause })[] {

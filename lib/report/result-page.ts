@@ -1,12 +1,15 @@
 import type { IncliningResult } from "@/lib/lightship/inclining-result";
+import { causeName } from "./cause-words";
+import type { ResultDocument } from "./result-document";
 import { decimalsFor, figure, figureWithin, signedFigure } from "./rounding";
 
 /**
  * The result of a test as lines of text for a person, each number with its unit.
  * Digits of what follows from the slope follow its 95 % interval; the others are those in which they are read.
  */
-export function resultPage(result: IncliningResult): readonly string[] {
-  return [...waterlineLines(result), "", ...fitLines(result), "", ...inclinedLines(result), "", ...lightshipLines(result)];
+export function resultPage(result: ResultDocument): readonly string[] {
+  const sections = [waterlineLines(result), fitLines(result), inclinedLines(result), lightshipLines(result), budgetLines(result)];
+  return [...sections.flatMap((lines) => [...lines, ""]), ...assumptionLines(result)];
 }
 
 type Row = readonly [label: string, value: string, unit: string];
@@ -57,14 +60,30 @@ function inclinedLines({ asInclined, fit }: IncliningResult): readonly string[] 
   ]);
 }
 
-function lightshipLines({ lightship, asInclined, fit }: IncliningResult): readonly string[] {
-  const uncertainty = (asInclined.gmFluid * asInclined.displacement * fit.slopeUncertainty) / fit.slope / lightship.displacement;
-  return section(`Lightship, ${lightship.headline} method`, [
-    ["Displacement", figure(lightship.displacement, 1), "t"],
-    ["VCG", figureWithin(lightship.vcg, uncertainty), "m"],
-    ["LCG", figure(lightship.lcg, 3), "m"],
+function lightshipLines({ lightship }: ResultDocument): readonly string[] {
+  const { displacement, vcg, lcg } = lightship.interval95;
+  return section(`Lightship, ${lightship.headline} method, with its 95 % interval`, [
+    within("Displacement", lightship.displacement, displacement, "t"),
+    within("VCG", lightship.vcg, vcg, "m"),
+    within("LCG", lightship.lcg, lcg, "m"),
     ["TCG to starboard", signedFigure(lightship.tcg, 3), "m"],
   ]);
+}
+
+function within(label: string, value: number, [low, high]: readonly [number, number], unit: string): Row {
+  const decimals = decimalsFor((high - low) / 4);
+  return [label, figure(value, decimals), `${unit}   ${figure(low, decimals)} to ${figure(high, decimals)}`];
+}
+
+function budgetLines({ budget }: ResultDocument): readonly string[] {
+  return section(
+    "What leaves VCG open",
+    budget.map(({ input, share }): Row => [causeName(input), figure(100 * share, 0), "%"]),
+  );
+}
+
+function assumptionLines({ assumptions }: ResultDocument): readonly string[] {
+  return ["Taken for granted", ...assumptions.map((sentence) => `  ${sentence}`)];
 }
 
 function section(title: string, rows: readonly Row[]): readonly string[] {

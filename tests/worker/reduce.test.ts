@@ -4,8 +4,10 @@ import { tmpdir } from "node:os";
 import path from "node:path";
 import { promisify } from "node:util";
 import { afterAll, beforeAll, describe, expect, it } from "vitest";
+import { defendedLightship } from "@/lib/lightship/defended-lightship";
 import { incliningResult } from "@/lib/lightship/inclining-result";
 import { recordFrom } from "@/lib/record/parse-record";
+import { resultDocument } from "@/lib/report/result-document";
 import { promised } from "@/lib/result";
 import { documentWith, sampleDocument } from "../lib/record/sample-document";
 
@@ -47,7 +49,9 @@ describe("the command reduce", () => {
     const document = sampleDocument();
     const { code, out, faults } = await ended("npm", ["run", "--silent", "reduce", "--", written(JSON.stringify(document))]);
     expect({ code, faults }).toEqual({ code: 0, faults: [] });
-    expect(JSON.parse(out)).toEqual(promised(incliningResult(promised(recordFrom(document)))));
+    const record = promised(recordFrom(document));
+    const whole = resultDocument(record, promised(incliningResult(record)), promised(defendedLightship(record)));
+    expect(JSON.parse(out)).toEqual(whole);
   });
 
   it("prints it for a person with --table", async () => {

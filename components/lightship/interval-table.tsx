@@ -1,0 +1,47 @@
+import { Cell, ColumnHead, DataTable, RowHead } from "@/components/ui/data-table";
+import { Quantity } from "@/components/ui/quantity";
+import type { Defence, Interval } from "@/lib/lightship/defended-lightship";
+
+type IntervalTableProps = { intervals: Defence["interval95"]; isAssumed: boolean };
+
+/** Between which values each number of the lightship lies, 95 times of a hundred. */
+export function IntervalTable({ intervals, isAssumed }: IntervalTableProps) {
+  return (
+    <div>
+      <DataTable caption="95 % intervals of the lightship" showCaption>
+        <thead>
+          <tr>
+            <ColumnHead>Number</ColumnHead>
+            <ColumnHead figure>from</ColumnHead>
+            <ColumnHead figure>to</ColumnHead>
+          </tr>
+        </thead>
+        <tbody>
+          <Row name="Displacement" interval={intervals.displacement} unit="t" />
+          <Row name="VCG above baseline" interval={intervals.vcg} unit="m" />
+          <Row name="LCG forward of AP" interval={intervals.lcg} unit="m" />
+        </tbody>
+      </DataTable>
+      <p className="mt-3 text-ink-soft text-small">
+        {isAssumed
+          ? "The test states no uncertainties: the program's own assumptions stand for them."
+          : "By the standard uncertainties that the test states; the scatter of the line is always counted."}
+      </p>
+    </div>
+  );
+}
+
+function Row({ name, interval: [low, high], unit }: { name: string; interval: Interval; unit: string }) {
+  const uncertainty = (high - low) / 4;
+  return (
+    <tr>
+      <RowHead>{name}</RowHead>
+      <Cell figure>
+        <Quantity value={low} unit={unit} uncertainty={uncertainty} />
+      </Cell>
+      <Cell figure>
+        <Quantity value={high} unit={unit} uncertainty={uncertainty} />
+      </Cell>
+    </tr>
+  );
+}
