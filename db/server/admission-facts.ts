@@ -32,6 +32,17 @@ export function admissionFacts(
   };
 }
 
+/**
+ * Whether an act may stand on its base, now that both are here: a reader corrects and takes back only what is his own. An
+ * act that came before its base could not be judged by it.
+ */
+export function mayStandOnBase(db: Database, event: EventBody, receivedAt: string): boolean {
+  if (event.type !== "correct" && event.type !== "void") return true;
+  const base = eventById(db, event.base);
+  if (!base || authorOf(base.body) === event.author) return true;
+  return isRoleHeldAt(db, event.author, event.test, wheelhouse, momentOf(event, deviceById(db, event.device), receivedAt));
+}
+
 /** The act's moment by the server's clock, never before the phone was let in nor after the event arrived: a wrong clock is no crime. */
 function momentOf(event: EventBody, device: Device | undefined, at: string): string {
   const moment = Math.min(capturedAt(event), Date.parse(at));

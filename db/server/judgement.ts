@@ -39,7 +39,7 @@ function judgedLettingIn(db: Database, act: EventOf<"assign" | "release">, stamp
   if (target && target.test !== act.test) return setAside({ type: "not-set-aside", message: "The event it lets in is of another test" });
   if (target && plan) {
     const read = eventFromText(target.body);
-    const facts = { body: read.ok ? read.value : null, code: target.code, isPlaced: isPlaced(db, act.payload.event) };
+    const facts = { body: read.ok ? read.value : null, code: target.code ?? "role-not-held", isPlaced: isPlaced(db, act.payload.event) };
     const refusal = lettingInRefusal(act, facts, plan);
     if (refusal) return setAside(refusal);
   }

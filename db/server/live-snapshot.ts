@@ -1,4 +1,4 @@
-import { and, eq, max } from "drizzle-orm";
+import { and, eq, isNull, max } from "drizzle-orm";
 import type { LiveSnapshot, MoveProgress, Quarantined } from "@/lib/sync/live";
 import { type MoveRun, moveProgress } from "@/lib/sync/move-progress";
 import { events } from "../schema/events";
@@ -52,17 +52,19 @@ function moveNow(no: number, repeat: number, runs: readonly MoveRun[], label: st
   return { no, repeat, label: label ?? (no === 0 ? "Reference" : `Move ${no}`), state, excluded, openedAt, closedAt };
 }
 
-/** What was set aside and has not been let in since. */
+/** What was set aside and has not been let in since; among it what came before its base and may not stand on it. */
 function quarantined(db: Database, test: string): Quarantined[] {
   const { id, serverSeq, device, code, message } = events;
   const rows = db
-    .select({ event: id, serverSeq, device, code, message, placed: placedEvents.event })
+    .select({ event: id, serverSeq, device, code, message })
     .from(events)
     .leftJoin(placedEvents, eq(placedEvents.serverSeq, serverSeq))
-    .where(and(eq(events.test, test), eq(events.outcome, "quarantined")))
+    .where(and(eq(events.test, test), isNull(placedEvents.event)))
     .orderBy(serverSeq)
     .all();
-  return rows
-    .filter(({ placed }) => placed === null)
-    .map(({ placed, code: kind, message: told, ...row }) => ({ ...row, code: kind ?? "", message: told ?? "" }));
+  return rows.map(({ code: kind, message: told, ...row }) => ({
+    ...row,
+    code: kind ?? "role-not-held",
+    message: told ?? "The author may not act on a reading of somebody else",
+  }));
 }

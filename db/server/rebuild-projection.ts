@@ -3,6 +3,7 @@ import { eventFromText } from "@/lib/sync/admission";
 import { isLettingIn } from "@/lib/sync/basis";
 import { events } from "../schema/events";
 import { placedEvents, readings, slots } from "../schema/readings";
+import { mayStandOnBase } from "./admission-facts";
 import { type Database, inTransaction } from "./connection";
 import { placeEvent, slotOfEvent } from "./slot-standing";
 import { placeWaiting } from "./waiting-events";
@@ -20,7 +21,8 @@ export function rebuildProjection(db: Database, test: string): void {
       if (!read.ok) continue;
       const { serverSeq, receivedAt } = event;
       const slot = isLettingIn(read.value) ? null : slotOfEvent(db, read.value);
-      if (event.outcome !== "quarantined") placeEvent(db, { body: read.value, serverSeq, receivedAt }, slot);
+      const stands = event.outcome !== "quarantined" && mayStandOnBase(db, read.value, receivedAt);
+      if (stands) placeEvent(db, { body: read.value, serverSeq, receivedAt }, slot);
       placeWaiting(db, event);
     }
   });

@@ -3,8 +3,8 @@ import { usualAgreement } from "@/lib/sync/agreement";
 import type { SlotRules } from "@/lib/sync/slot-projection";
 import { ledgerEntries } from "../schema/ledger";
 import { planSettings } from "../schema/plan";
+import { tests } from "../schema/tests";
 import type { Database } from "./connection";
-import { testById } from "./tests";
 
 /** The limits of a test within which readings agree, and when it was reconciled. */
 export function slotRules(db: Database, test: string): SlotRules {
@@ -13,7 +13,7 @@ export function slotRules(db: Database, test: string): SlotRules {
 }
 
 function reconciledAt(db: Database, test: string): string | null {
-  const state = testById(db, test)?.state;
+  const state = db.select({ state: tests.state }).from(tests).where(eq(tests.id, test)).get()?.state;
   if (state !== "reconciled" && state !== "issued") return null;
   const changes = db
     .select({ at: ledgerEntries.at, after: ledgerEntries.after })

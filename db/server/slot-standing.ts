@@ -37,6 +37,19 @@ export function slotOfEvent(db: Database, body: EventBody): Slot | null {
   return place?.test === body.test ? place.slot : isLettingIn(body) ? null : body.slot;
 }
 
+/** Works every slot of a test out anew, after its limits or its state have changed. */
+export function standAgain(db: Database, test: string): void {
+  const taken = db.select({ slot: slots.slot }).from(slots).where(eq(slots.test, test)).all();
+  for (const { slot } of taken) standing(db, test, slot);
+}
+
+/** Takes an event out of its place again: it was let in before it could be judged. */
+export function displaceEvent(db: Database, event: string): void {
+  const place = placeOf(db, event);
+  db.delete(placedEvents).where(eq(placedEvents.event, event)).run();
+  if (place) standing(db, place.test, place.slot);
+}
+
 /** Works out what stands in a slot and writes it over what stood there. An arriving event need not be in the file yet. */
 export function standing(db: Database, test: string, slot: Slot, arriving?: Arriving): SlotProjection {
   const projection = slotProjection(slot.kind, eventsOfSlot(db, test, slot, arriving), slotRules(db, test));

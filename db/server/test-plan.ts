@@ -11,6 +11,7 @@ import { writeEntry } from "./ledger-entries";
 import { aboardFromRow, hydrometerFromRow, itemFromRow, moveFromRow, present, some, stationFromRow, weightFromRow } from "./plan-rows";
 import { writePlanRows } from "./plan-writing";
 import { planSettingsOf, type SheetWords, sheetWords } from "./sheet-words";
+import { standAgain } from "./slot-standing";
 import { type Test, testById } from "./tests";
 
 const { shape } = testRecordSchema;
@@ -74,6 +75,7 @@ export function savePlan(db: Database, test: string, plan: Plan, words: SheetWor
     const { hydrostatics, draftMarks, freeboardMarks, tanks, previous } = plan;
     const vesselCopy = { vessel: row.vesselCopy.vessel, hydrostatics, draftMarks, freeboardMarks, tanks, previous };
     db.update(tests).set({ vesselCopy }).where(eq(tests.id, test)).run();
+    standAgain(db, test);
     writeEntry(db, test, { ...act, what: "plan.save", before: changedParts(before, plan), after: changedParts(plan, before) });
     return answer(test);
   });

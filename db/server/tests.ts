@@ -9,6 +9,7 @@ import type { Act } from "./act";
 import { type Database, inTransaction } from "./connection";
 import { writeEntry } from "./ledger-entries";
 import { rolesOf } from "./role-grants";
+import { standAgain } from "./slot-standing";
 import { vesselById } from "./vessels";
 
 export type Test = typeof tests.$inferSelect;
@@ -78,6 +79,7 @@ export function changeState(db: Database, id: string, to: TestState, act: Act): 
     if (refusal) return refuse(refusal);
     db.update(tests).set({ state: to }).where(eq(tests.id, id)).run();
     writeEntry(db, id, { ...act, what: "test.state", before: test.state, after: to });
+    standAgain(db, id);
     return answer(to);
   });
 }

@@ -3,10 +3,11 @@ import { basisOf, isLettingIn } from "@/lib/sync/basis";
 import type { EventBody } from "@/lib/sync/event";
 import type { QuarantineCode } from "@/lib/sync/protocol";
 import type { Slot } from "@/lib/sync/slot";
+import { mayStandOnBase } from "./admission-facts";
 import type { Database } from "./connection";
 import { duePlan } from "./due-plan";
 import { eventById, eventsOn, type StoredEvent } from "./event-store";
-import { isPlaced, placeEvent, slotOfEvent } from "./slot-standing";
+import { displaceEvent, isPlaced, placeEvent, slotOfEvent } from "./slot-standing";
 
 /** Set aside only because of what it stands on: it follows when that is let in. */
 const followsItsBase: readonly (QuarantineCode | null)[] = ["base-quarantined", "unknown-slot"];
@@ -36,7 +37,7 @@ function lettingIn(body: string) {
 
 function letIn(db: Database, event: string, slot: Slot | null): void {
   const target = eventById(db, event);
-  if (target?.outcome !== "quarantined" || isPlaced(db, event)) return;
+  if (!target || isPlaced(db, event)) return;
   const body = bodyOf(target);
   if (body === null) return;
   placeEvent(db, { body, ...stampOf(target) }, slot ?? slotOfEvent(db, body));
@@ -50,6 +51,10 @@ function placeFollowers(db: Database, basis: string, seen: Set<string>): void {
   for (const follower of eventsOn(db, basis)) {
     const body = bodyOf(follower);
     if (body === null || isLettingIn(body) || basisOf(body) !== basis || !mayFollow(db, follower)) continue;
+    if (!mayStandOnBase(db, body, follower.receivedAt)) {
+      displaceEvent(db, body.id);
+      continue;
+    }
     const slot = slotOfEvent(db, body);
     const plan = duePlan(db, body.test)?.plan;
     if (slot !== null && plan && !isFitting(body, slot, plan)) continue;

@@ -2,7 +2,10 @@ import { beforeEach, describe, expect, test } from "vitest";
 import { revokeDevice } from "@/db/server/devices";
 import { noReading } from "@/db/server/event-writer";
 import { liveSnapshot } from "@/db/server/live-snapshot";
+import { rebuildProjection } from "@/db/server/rebuild-projection";
 import { endRole } from "@/db/server/role-grants";
+import { changeState } from "@/db/server/tests";
+import { promised } from "@/lib/result";
 import type { Envelope } from "@/lib/sync/protocol";
 import type { Slot } from "@/lib/sync/slot";
 import { slotKey } from "@/lib/sync/slot-key";
@@ -93,6 +96,48 @@ describe("the role that counts is the one held when it was read", () => {
     const late = mara.reads(mark, { value: 3.382 }, { capturedAt: hoursLater(1.5) });
     expect(mara.sends([early, late], hoursLater(2)).results).toMatchObject([{ outcome: "applied" }, { code: "role-not-held" }]);
   });
+});
+
+describe("a correction that came before its base", () => {
+  const early = (phone: Phone, base: Envelope) =>
+    phone.says({ type: "correct", reading: readingOf(base), base: idOf(base), slot: mark, payload: { value: 3.281 }, source: "station" });
+
+  test("is judged when that comes: somebody else's may not be corrected by a reader", () => {
+    const base = mara.reads(mark, { value: 3.381 });
+    const change = early(nils, base);
+    expect(nils.sends([change]).results).toMatchObject([{ outcome: "deferred" }]);
+    mara.sends([base]);
+    expect(standing()?.readings.map(({ value, status }) => [value, status])).toEqual([[{ value: 3.381 }, "accepted"]]);
+    expect(liveSnapshot(ship.db, ship.test, at)?.quarantined).toMatchObject([{ event: idOf(change), code: "role-not-held" }]);
+    const before = standing();
+    rebuildProjection(ship.db, ship.test);
+    expect(standing()).toEqual(before);
+  });
+
+  test("and can be released by the lead", () => {
+    const base = mara.reads(mark, { value: 3.381 });
+    const change = early(nils, base);
+    nils.sends([change]);
+    mara.sends([base]);
+    const release = lead.says({ type: "release", ...noReading, payload: { event: idOf(change) }, reason: "Nils stood beside her" });
+    expect(lead.sends([release]).results).toMatchObject([{ outcome: "applied" }]);
+    expect(standing()?.readings.map(({ value, status }) => [value, status])).toEqual([
+      [{ value: 3.281 }, "accepted"],
+      [{ value: 3.381 }, "superseded"],
+    ]);
+    const before = standing();
+    rebuildProjection(ship.db, ship.test);
+    expect(standing()).toEqual(before);
+  });
+});
+
+test("a test taken back from reconciled has its slots worked out anew, as a rebuild would", () => {
+  const by = { by: lead.person, at };
+  for (const state of ["open", "closed", "reconciled"] as const) promised(changeState(ship.db, ship.test, state, by));
+  mara.sends([mara.reads(mark, { value: 3.381 })], hoursLater(1));
+  expect(standing()?.state).toBe("disagrees");
+  promised(changeState(ship.db, ship.test, "closed", { ...by, at: hoursLater(2), reason: "one more reading" }));
+  expect(standing()?.state).toBe("read");
 });
 
 describe("in whose name a phone may speak", () => {
