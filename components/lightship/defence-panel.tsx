@@ -1,14 +1,16 @@
 "use client";
 
 import { Button } from "@/components/ui/button";
+import { Disclosure } from "@/components/ui/disclosure";
 import { Panel } from "@/components/ui/panel";
 import type { TestRecord } from "@/lib/record/test-record";
 import { BudgetTable } from "./budget-table";
 import { IntervalTable } from "./interval-table";
+import { UncertaintyForm } from "./uncertainty-form";
 import { useDefence } from "./use-defence";
 
 /** How far the lightship can be trusted, and what to measure better. */
-export function DefencePanel({ record }: { record: TestRecord }) {
+export function DefencePanel({ record, mayState }: { record: TestRecord; mayState: boolean }) {
   const { stop, start, ...state } = useDefence(record);
   return (
     <Panel title="How well it is known" aside={state.type === "done" ? `${state.defence.draws} draws` : undefined}>
@@ -23,6 +25,13 @@ export function DefencePanel({ record }: { record: TestRecord }) {
         <div className="grid items-start gap-6 lg:grid-cols-2">
           <IntervalTable intervals={state.defence.interval95} isAssumed={record.uncertainty === undefined} />
           <BudgetTable budget={state.defence.budget} />
+        </div>
+      ) : null}
+      {mayState ? (
+        <div className="mt-4 border-ink-line border-t pt-2">
+          <Disclosure title="Standard uncertainties of this test">
+            <UncertaintyForm test={record.test.id} stated={record.uncertainty} />
+          </Disclosure>
         </div>
       ) : null}
     </Panel>

@@ -19,22 +19,22 @@ import { LightshipResult } from "./lightship-result";
 import { WaterlinePanel } from "./waterline-panel";
 
 /** From as inclined to lightship, with all that it rests on. */
-export function LightshipPage({ record }: { record: TestRecord }) {
+export function LightshipPage({ record, mayState }: { record: TestRecord; mayState: boolean }) {
   const found = useMemo(() => foundLightship(record), [record]);
   return (
     <div className="flex flex-col gap-5">
-      {found.ok ? <Found found={found.value} record={record} /> : <NotYet refusals={found.refusal.faults} />}
+      {found.ok ? <Found found={found.value} record={record} mayState={mayState} /> : <NotYet refusals={found.refusal.faults} />}
       <ItemsTable items={record.items} />
     </div>
   );
 }
 
-function Found({ found, record }: { found: FoundLightship; record: TestRecord }) {
+function Found({ found, record, mayState }: { found: FoundLightship; record: TestRecord; mayState: boolean }) {
   const { ship, lines, lightship } = found;
   return (
     <>
       <LightshipResult lightship={lightship} ship={ship} />
-      <DefencePanel record={record} />
+      <DefencePanel record={record} mayState={mayState} />
       <Panel title="From as inclined to lightship">
         <BalanceTable lines={lines} />
       </Panel>

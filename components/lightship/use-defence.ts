@@ -14,6 +14,7 @@ export function useDefence(record: TestRecord): DefenceState & { readonly stop: 
   const [run, setRun] = useState(1);
   useEffect(() => {
     if (run === 0) return;
+    if (typeof Worker === "undefined") return setState({ type: "stopped" });
     const worker = new Worker(new URL("../../worker/analysis.worker.ts", import.meta.url), { type: "module" });
     worker.addEventListener("message", ({ data }: MessageEvent<AnalysisAnswer>) =>
       setState(data.type === "progress" ? drawing(data.share) : ended(data)),

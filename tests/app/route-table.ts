@@ -51,6 +51,7 @@ export const handlers: Readonly<Record<string, Readonly<Record<string, Row>>>> =
   "app/api/v1/tests/[id]/job/route.ts": { GET: { allowed: everybody } },
   "app/api/v1/tests/[id]/live/route.ts": { GET: { allowed: allButReaders } },
   "app/api/v1/tests/[id]/record/route.ts": { GET: { allowed: allButReaders } },
+  "app/api/v1/tests/[id]/uncertainty/route.ts": { PUT: { allowed: ["engineer"], body: () => ({ draft: 0.003 }) } },
   "app/api/v1/tests/[id]/enrolments/route.ts": {
     GET: { allowed: ["lead", "engineer", "administrator"] },
     POST: { allowed: ["lead", "engineer", "administrator"], body: () => newCode, status: 201 },

@@ -10,11 +10,11 @@ export const metadata: Metadata = { title: "Lightship" };
 
 export default async function Page({ params }: { params: Promise<{ id: string }> }) {
   const { id } = await params;
-  const { test } = await requireRole(id, ["engineer", "lead", "witness"], `/tests/${id}/lightship`);
+  const { test, roles } = await requireRole(id, ["engineer", "lead", "witness"], `/tests/${id}/lightship`);
   return (
     <>
       <PageTitle title="Lightship" over={`${test.vesselCopy.vessel.name} · ${test.title}`} />
-      <LightshipPage record={recordOf(database(), id)} />
+      <LightshipPage record={recordOf(database(), id)} mayState={roles.includes("engineer")} />
       <RecordFile test={id} />
     </>
   );
