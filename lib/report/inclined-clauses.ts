@@ -14,6 +14,7 @@ export const inclinedClauses: Clauses<InclinedRefusal> = {
   NoBattenReadings: () => "no batten reading counts",
   NoSpreadInMoment: ({ points, moments }) =>
     `the ${points} readings have one moment only (${moments.map((moment) => shortFigure(moment)).join(", ")} t·m), no line can be laid through them`,
+  UncertaintyNotPositive: ({ uncertainty }) => `a tangent cannot be weighed by an uncertainty of ${shortFigure(uncertainty)}`,
   TooFewMoves: ({ got, needed }) => `at least ${needed} moves that were read, ${got} given`,
   HeelAgainstMoment: ({ slope }) =>
     `the ship does not heel towards the moment: slope ${shortFigure(slope)} per t·m; look for stations mounted the other way`,

@@ -15,6 +15,7 @@ import type { WrongKindOfValue } from "@/lib/inclining/reading-shown";
 import type { NoMarks, TooFewTurningPoints } from "@/lib/inclining/resting-point";
 import type { NoPosition, NoReferenceMove } from "@/lib/inclining/shift-moments";
 import type { NoZeroReading, UnknownStation } from "@/lib/inclining/station-series";
+import type { UncertaintyNotPositive } from "@/lib/inclining/weighted-slope";
 import type { NothingLeft } from "@/lib/lightship/lightship";
 import type { OutsideTable } from "@/lib/numerics/interpolation";
 import type { RankDeficient, TooFewRows } from "@/lib/numerics/least-squares";
@@ -37,6 +38,7 @@ export type InclinedRefusal =
   | NoPosition
   | NoBattenReadings
   | NoSpreadInMoment
+  | UncertaintyNotPositive
   | TooFewMoves
   | HeelAgainstMoment
   | NoSounding

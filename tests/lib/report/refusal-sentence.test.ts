@@ -52,6 +52,7 @@ const everyRefusal: { readonly [Type in KnownRefusal["type"]]: Extract<KnownRefu
   NoPosition: { type: "NoPosition", weight: "W1", move: 3 },
   NoBattenReadings: { type: "NoBattenReadings" },
   NoSpreadInMoment: { type: "NoSpreadInMoment", points: 4, moments: [0] },
+  UncertaintyNotPositive: { type: "UncertaintyNotPositive", uncertainty: 0 },
   TooFewMoves: { type: "TooFewMoves", got: 2, needed: 3 },
   HeelAgainstMoment: { type: "HeelAgainstMoment", slope: -0.001 },
   NoSounding: { type: "NoSounding", tank: "FO" },
