@@ -8,6 +8,7 @@ import type { ControlProps } from "./control";
 import { ControlBoard } from "./control-board";
 import { EnrolForm } from "./enrol-form";
 import { LinkState } from "./link-state";
+import { PhoneFile } from "./phone-file";
 import { snapshotWithUnsent } from "./snapshot-with-unsent";
 import { useEnrolmentCodes } from "./use-enrolment-codes";
 import { useLeadActs } from "./use-lead-acts";
@@ -35,8 +36,9 @@ export function LedControl({ test, person, first }: ControlProps) {
         </>
       }
       enrol={
-        <Panel title="Enrol a phone">
+        <Panel title="Enrol a phone, or read its file">
           <EnrolForm onMake={makeCode} />
+          <PhoneFile />
         </Panel>
       }
     />
