@@ -31,7 +31,7 @@ describe("the lightship page", () => {
   });
 
   test("shows each line of the way with its mass and moments", () => {
-    render(<LightshipPage record={bargeRecord(4)} />);
+    render(<LightshipPage mayState={false} record={bargeRecord(4)} />);
     const table = screen.getByRole("table", { name: "From as inclined to lightship" });
     expect(rowOf(table, "As inclined")).toEqual(["1476.00", "30.000", "0.000", "4.800", "44280.0", "0.0", "7084.8"]);
     expect(rowOf(table, "less test weights")).toEqual(["−10.00", "30.000", "0.000", "5.600", "−300.0", "0.0", "−56.0"]);
@@ -43,7 +43,7 @@ describe("the lightship page", () => {
       { action: "deduct" as const, label: "scaffolding", mass: 2, x: 10, y: 0, z: 8 },
       { action: "add" as const, label: "anchor, port", mass: 1.5, x: 57, y: -2, z: 5 },
     ];
-    render(<LightshipPage record={{ ...bargeRecord(4), items }} />);
+    render(<LightshipPage mayState={false} record={{ ...bargeRecord(4), items }} />);
     const table = screen.getByRole("table", { name: "From as inclined to lightship" });
     expect(rowOf(table, "less scaffolding").slice(0, 4)).toEqual(["−2.00", "10.000", "0.000", "8.000"]);
     expect(rowOf(table, "plus anchor, port").slice(0, 4)).toEqual(["+1.50", "57.000", "−2.000", "5.000"]);
@@ -51,14 +51,14 @@ describe("the lightship page", () => {
   });
 
   test("gives the residual of every mark", () => {
-    render(<LightshipPage record={bargeRecord(4)} />);
+    render(<LightshipPage mayState={false} record={bargeRecord(4)} />);
     const table = screen.getByRole("table", { name: "Residual of each mark" });
     expect(within(table).getAllByRole("row")).toHaveLength(1 + 6);
   });
 
   test("says in sentences what keeps the lightship from being known, and shows no figure", () => {
     const record = bargeRecord(4);
-    render(<LightshipPage record={{ ...record, readings: { ...record.readings, drafts: [], water: [] } }} />);
+    render(<LightshipPage mayState={false} record={{ ...record, readings: { ...record.readings, drafts: [], water: [] } }} />);
     expect(screen.getByText("The lightship can’t be worked out yet")).toBeDefined();
     expect(screen.queryByRole("table", { name: "From as inclined to lightship" })).toBeNull();
     expect(screen.getAllByRole("listitem").length).toBeGreaterThanOrEqual(2);
