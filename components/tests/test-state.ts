@@ -18,8 +18,10 @@ export function placesFor(roles: readonly Role[]): { readonly href: string; read
   const sees = (...allowed: Role[]) => roles.some((role) => allowed.includes(role));
   const control = { href: "control", title: "Central control", what: "Moves, readings as they arrive, the line" };
   const lightship = { href: "lightship", title: "Lightship", what: "From as inclined to lightship; the record file" };
+  const ledger = { href: "ledger", title: "Ledger", what: "Who did what and when, and whether it still fits" };
   return [
     ...(sees("lead", "engineer", "administrator", "witness") ? [control] : []),
     ...(sees("lead", "engineer", "witness") ? [lightship] : []),
+    ...(sees("lead", "engineer", "administrator", "witness") ? [ledger] : []),
   ];
 }

@@ -1,5 +1,6 @@
-import { asc, desc, eq } from "drizzle-orm";
+import { and, asc, desc, eq, lt } from "drizzle-orm";
 import { chained, GENESIS, type LedgerEntry, type LedgerMatter } from "@/lib/ledger/hash-chain";
+import { accounts } from "../schema/accounts";
 import { ledgerEntries } from "../schema/ledger";
 import type { Act } from "./act";
 import type { Database } from "./connection";
@@ -37,6 +38,25 @@ export function ledgerOf(db: Database, test: string | null): LedgerEntry[] {
     .orderBy(asc(ledgerEntries.seq))
     .all();
   return rows.map(({ id, chain, ...entry }) => entry);
+}
+
+/** A stretch of a test's chain, the last entry first, each with the name of who did it. */
+export function ledgerPage(
+  db: Database,
+  test: string,
+  before: number | null,
+  most: number,
+): (LedgerEntry & { readonly name: string | null })[] {
+  const ofChain = eq(ledgerEntries.chain, chainOf(test));
+  const rows = db
+    .select({ entry: ledgerEntries, name: accounts.name })
+    .from(ledgerEntries)
+    .leftJoin(accounts, eq(accounts.id, ledgerEntries.who))
+    .where(before === null ? ofChain : and(ofChain, lt(ledgerEntries.seq, before)))
+    .orderBy(desc(ledgerEntries.seq))
+    .limit(most)
+    .all();
+  return rows.map(({ entry: { id, chain, ...entry }, name }) => ({ ...entry, name }));
 }
 
 /** The tests that have a chain here. */

@@ -1,20 +1,13 @@
-import { asc } from "drizzle-orm";
-import { type ChainRefusal, chainHead, type LedgerEntry } from "@/lib/ledger/hash-chain";
+import { asc, eq } from "drizzle-orm";
+import { chainHead, type LedgerEntry } from "@/lib/ledger/hash-chain";
 import { sha256Hex } from "@/lib/ledger/sha256";
+import type { LedgerFault } from "@/lib/report/ledger-words";
 import { events } from "../schema/events";
 import { isSignatureGood } from "./admission-facts";
 import type { Database } from "./connection";
 import { deviceById } from "./devices";
 import type { StoredEvent } from "./event-store";
 import { chainsKept, ledgerOf } from "./ledger-entries";
-
-/** Why an entry does not fit, or an event has none. `seq` is the entry's number in its chain. */
-export type LedgerFault =
-  | ChainRefusal
-  | { readonly type: "EventMissing"; readonly seq: number; readonly serverSeq: number }
-  | { readonly type: "EventChanged"; readonly seq: number; readonly serverSeq: number }
-  | { readonly type: "SignatureBad"; readonly seq: number; readonly serverSeq: number }
-  | { readonly type: "EventNotEntered"; readonly seq: null; readonly serverSeq: number };
 
 export type ChainFound = {
   /** the test; null: the server's own chain */
@@ -40,6 +33,13 @@ export function verifiedLedger(db: Database): LedgerFound {
   };
 }
 
+/** One test's chain, its events' bytes and signatures. */
+export function verifiedChain(db: Database, test: string): ChainFound {
+  const ofTest = db.select().from(events).where(eq(events.test, test)).all();
+  return chainFound(db, test, ledgerOf(db, test), new Map(ofTest.map((event) => [event.serverSeq, event])));
+}
+
+/** Whether nothing at all is wrong. */
 export function isLedgerKept({ chains, notEntered }: LedgerFound): boolean {
   return notEntered.length === 0 && chains.every(({ fault }) => fault === null);
 }

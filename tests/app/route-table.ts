@@ -36,6 +36,7 @@ export const pages: Readonly<Record<string, Row["allowed"]>> = {
   "app/(office)/tests/[id]/page.tsx": everybody,
   "app/(office)/tests/[id]/control/page.tsx": allButReaders,
   "app/(office)/tests/[id]/lightship/page.tsx": ["lead", "engineer", "witness"],
+  "app/(office)/tests/[id]/ledger/page.tsx": allButReaders,
 };
 
 const newCode = { role: "reader", personName: "Rolf" };
