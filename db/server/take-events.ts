@@ -1,6 +1,7 @@
 import { sha256Hex } from "@/lib/ledger/sha256";
 import { eventFromText } from "@/lib/sync/admission";
 import { basisOf } from "@/lib/sync/basis";
+import { envelopeHash } from "@/lib/sync/envelope-hash";
 import type { EventBody } from "@/lib/sync/event";
 import type { Envelope, SyncAnswer, SyncRequest } from "@/lib/sync/protocol";
 import { receiptForRole } from "@/lib/sync/receipt-for-role";
@@ -37,6 +38,7 @@ export function takeEvents(db: Database, { device, holds, events }: Batch, sende
   return {
     server: { ...identityOf(db), time: sender.at },
     results: taken.map((event) => receiptForRole(receiptOf(event), rolesHere(db, event.test, sender))),
+    received: events.map(envelopeHash),
     device: { highestSeq, missing },
     ledgerHead: last === undefined ? null : ledgerHead(db, last),
   };

@@ -1,4 +1,5 @@
 import { BATCH_BYTES, BATCH_EVENTS } from "./batch-limits";
+import { envelopeHash } from "./envelope-hash";
 import type { Receipt, SyncAnswer } from "./protocol";
 
 /**
@@ -41,11 +42,15 @@ export function afterSilence(batch: readonly QueuedEvent[]): StateChange[] {
   return batch.filter((event) => event.state === "sending").map(({ id }) => ({ id, state: "saved", receipt: null }));
 }
 
-/** What the answer says of each event of the batch. An event without a receipt of its own goes back to saved. */
+/**
+ * What the answer says of each event of the batch. An event without a receipt of its own goes back to saved, and so does
+ * one that did not arrive as it was sent: the receipt is of something else.
+ */
 export function afterAnswer(batch: readonly QueuedEvent[], answer: SyncAnswer): StateChange[] {
-  return batch.map(({ id }, place) => {
+  return batch.map(({ id, envelope }, place) => {
     const receipt = answer.results[place];
-    if (!receipt || (receipt.id !== null && receipt.id !== id)) return { id, state: "saved", receipt: null };
+    const isWhole = answer.received[place] === envelopeHash(envelope);
+    if (!receipt || !isWhole || (receipt.id !== null && receipt.id !== id)) return { id, state: "saved", receipt: null };
     return { id, state: receipt.outcome === "quarantined" ? "quarantined" : "on-server", receipt };
   });
 }

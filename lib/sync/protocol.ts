@@ -58,6 +58,8 @@ export const syncAnswerSchema = z.strictObject({
   server: z.strictObject({ id: z.uuid(), epoch: z.uuid(), time }),
   /** one per event, in the order sent */
   results: z.array(receiptSchema),
+  /** the hash of each envelope as it arrived, see `envelopeHash`: what broke on its way is sent again */
+  received: z.array(z.string()),
   device: z.strictObject({ highestSeq: wholeNumber, missing: z.array(ordinal) }),
   /** head of the chain of the last test touched; null where none was */
   ledgerHead: z.string().nullable(),

@@ -1,3 +1,4 @@
+import { envelopeHash } from "@/lib/sync/envelope-hash";
 import { type Envelope, type Receipt, type SyncAnswer, syncRequestSchema } from "@/lib/sync/protocol";
 
 type Behaviour = { readonly id?: string; readonly quarantines?: readonly number[]; readonly mostEvents?: number };
@@ -18,6 +19,7 @@ export function simulatedServer({ id = "5b3f2c1e-0a4d-4b8e-9c55-6f0a1d2e3c90", q
     const answer: SyncAnswer = {
       server: { id, epoch: id, time },
       results: bodies.map(taken),
+      received: request.events.map(envelopeHash),
       device: known(),
       ledgerHead: null,
     };

@@ -1,6 +1,7 @@
 import fc from "fast-check";
 import { describe, expect, it } from "vitest";
 import { BATCH_BYTES, BATCH_EVENTS } from "@/lib/sync/batch-limits";
+import { envelopeHash } from "@/lib/sync/envelope-hash";
 import {
   afterAnswer,
   afterComparison,
@@ -31,7 +32,10 @@ function receipt(seq: number, outcome: Outcome = "applied"): Receipt {
 }
 
 function answer(results: readonly Receipt[], device: SyncAnswer["device"] = { highestSeq: 99, missing: [] }): SyncAnswer {
-  return { server: { id: testId, epoch: testId, time: "2026-05-04T10:00:00.000Z" }, results: [...results], device, ledgerHead: null };
+  const server = { id: testId, epoch: testId, time: "2026-05-04T10:00:00.000Z" };
+  // what was sent came whole: the batch is numbered from 1
+  const received = [1, 2, 3].map((seq) => envelopeHash(held(seq).envelope));
+  return { server, results: [...results], received, device, ledgerHead: null };
 }
 
 describe("the next batch", () => {
@@ -108,6 +112,11 @@ describe("after an answer", () => {
   it("an event whose id the server could not read is told by its place", () => {
     const unreadable: Receipt = { id: null, outcome: "quarantined", serverSeq: 9, code: "malformed-body" };
     expect(afterAnswer([held(1, "sending")], answer([unreadable]))).toEqual([{ id: idOf(1), state: "quarantined", receipt: unreadable }]);
+  });
+
+  it("an event that broke on its way is saved here, whatever its receipt says", () => {
+    const broken = { ...answer([receipt(1, "quarantined"), receipt(2)]), received: [envelopeHash({ body: "{]", signature: null })] };
+    expect(afterAnswer([held(1, "sending"), held(2, "sending")], broken)).toEqual([saved(1), saved(2)]);
   });
 
   it("receipts of events that were not sent change nothing", () => {

@@ -9,6 +9,7 @@ const receipt = { id: idOf(1), outcome: "applied", serverSeq: 412 };
 const answer = {
   server: { id: testId, epoch: testId, time: "2026-05-04T10:00:00.000Z" },
   results: [receipt, { id: null, outcome: "quarantined", serverSeq: 413, code: "malformed-body", message: "The event is not JSON" }],
+  received: ["a".repeat(64), "b".repeat(64)],
   device: { highestSeq: 17, missing: [3, 4] },
   ledgerHead: null,
 };
