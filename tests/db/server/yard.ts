@@ -15,7 +15,11 @@ export const plan = planOf(skerryTern().record);
 export type Yard = { readonly db: Database; readonly engineer: Account; readonly vessel: string; readonly test: string };
 
 export function yard(): Yard {
-  const db = openDatabase(":memory:");
+  return yardIn(openDatabase(":memory:"));
+}
+
+/** The same in a database that is there already. */
+export function yardIn(db: Database): Yard {
   const engineer = promised(
     createAccount(db, { name: "Ellen Moe", email: "ellen@yard.example", passwordHash: null, isEngineer: true }, { by: null, at }),
   );

@@ -1,0 +1,77 @@
+import { rebuildProjection } from "@/db/server/rebuild-projection";
+import { isLedgerKept, verifiedLedger } from "@/db/server/verify-ledger";
+import { type Noise, seededNoise } from "@/lib/numerics/seeded-noise";
+import { FaultCrew } from "./fault-crew";
+import { FaultServer } from "./fault-server";
+
+/** What a run has seen: everything but `events` and `faults` must be zero. */
+export type FaultCount = {
+  readonly events: number;
+  readonly faults: Readonly<Record<string, number>>;
+  readonly lost: number;
+  readonly doubled: number;
+  readonly stuck: number;
+  readonly setAside: number;
+  readonly unverified: number;
+  readonly projectionOff: number;
+};
+
+/**
+ * One day of readings under faults: phones read and send over lines on which things go wrong, the server is stopped, torn and
+ * restored from an older backup. Then it heals: every phone sends until it is quiet, and everything is counted.
+ */
+export async function faultRun(seed: number, steps: number): Promise<FaultCount> {
+  const chance = seededNoise(seed);
+  const server = new FaultServer();
+  try {
+    const crew = await FaultCrew.make(server, chance);
+    const faults: Record<string, number> = {};
+    const tell = (fault: string) => {
+      faults[fault] = (faults[fault] ?? 0) + 1;
+    };
+    server.backUp();
+    for (let step = 0; step < steps; step++) await oneStep(crew, server, chance, tell);
+    const stuck = await crew.settles();
+    return { ...counted(server, crew), faults, stuck };
+  } finally {
+    server.remove();
+  }
+}
+
+async function oneStep(crew: FaultCrew, server: FaultServer, chance: Noise, tell: (fault: string) => void): Promise<void> {
+  crew.reads();
+  if (chance.uniform() < 0.5) await crew.sends(0.6, tell);
+  if (chance.uniform() < 0.05) {
+    crew.onePhoneCrashes();
+    tell("phone killed while sending");
+  }
+  if (chance.uniform() < 0.02) server.backUp();
+  if (chance.uniform() < 0.01) {
+    server.restore();
+    tell("server restored from an older backup");
+  }
+}
+
+function counted(server: FaultServer, crew: FaultCrew): Omit<FaultCount, "faults" | "stuck"> {
+  const { db } = server;
+  const taking = new Map<string, number>();
+  for (const { id } of db.$client.prepare("select id from events where outcome <> 'quarantined'").all() as { id: string }[]) {
+    taking.set(id, (taking.get(id) ?? 0) + 1);
+  }
+  const ids = crew.phones.flatMap(({ events }) => events.map(({ id }) => id));
+  const before = projection(server);
+  rebuildProjection(db, crew.test);
+  return {
+    events: ids.length,
+    lost: ids.filter((id) => !taking.has(id)).length,
+    doubled: [...taking.values()].filter((count) => count > 1).length + (new Set(ids).size - ids.length),
+    setAside: crew.phones.flatMap(({ events }) => events.filter(({ state }) => state === "quarantined")).length,
+    unverified: isLedgerKept(verifiedLedger(db)) ? 0 : 1,
+    projectionOff: projection(server) === before ? 0 : 1,
+  };
+}
+
+function projection({ db }: FaultServer): string {
+  const rows = ["placed_events", "slots", "readings"].map((table) => db.$client.prepare(`select * from ${table} order by 1, 2`).all());
+  return JSON.stringify(rows);
+}

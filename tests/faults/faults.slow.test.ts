@@ -1,0 +1,25 @@
+import { describe, expect, test } from "vitest";
+import { faultRun } from "./fault-run";
+import { faults } from "./faulty-line";
+
+/** Runs that once failed, by what they found. */
+const pinned: Readonly<Record<string, number>> = {};
+
+describe("a day of readings under faults", () => {
+  test.each([1, 2, 3, ...Object.values(pinned)])(
+    "loses, doubles and forgets nothing (%i)",
+    async (seed) => {
+      const count = await faultRun(seed, 160);
+      expect(count).toMatchObject({ lost: 0, doubled: 0, stuck: 0, setAside: 0, unverified: 0, projectionOff: 0 });
+      expect(count.events).toBe(160);
+      expect(Object.values(count.faults).reduce((sum, times) => sum + times, 0)).toBeGreaterThan(20);
+    },
+    120_000,
+  );
+
+  test("has every fault in it, sooner or later", async () => {
+    const seen = new Set<string>();
+    for (const seed of [11, 12, 13]) for (const fault of Object.keys((await faultRun(seed, 200)).faults)) seen.add(fault);
+    expect(Object.keys(faults).filter((fault) => !seen.has(fault))).toEqual([]);
+  }, 240_000);
+});
