@@ -48,7 +48,7 @@ const words: { readonly [Id in CheckId]: Words<Id> } = {
   "zero-drift": {
     name: "Drift of zero",
     found: ({ drift, heel }) =>
-      drift === null ? "zero was read once only" : `${signedFigure(1000 * drift, 2)} mm per m, largest heel ${figure(1000 * heel, 1)}`,
+      drift === null ? "zero was read once only" : `${signedFigure(1000 * drift, 2)} mm per m of ${figure(1000 * heel, 1)} mm per m`,
     limit: ({ share }) => `at most ${percent(share, 0)} of the largest heel (a setting)`,
   },
   "initial-list": {

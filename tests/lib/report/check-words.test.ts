@@ -49,7 +49,7 @@ const every: { readonly [Id in CheckId]: FindingOf<Id> & { readonly words: reado
   "zero-drift": {
     found: { drift: -0.00025, heel: 0.0231 },
     limit: { share: 0.02 },
-    words: ["−0.25 mm per m, largest heel 23.1", "at most 2 % of the largest heel (a setting)"],
+    words: ["−0.25 mm per m of 23.1 mm per m", "at most 2 % of the largest heel (a setting)"],
   },
   "initial-list": { found: { degrees: -0.314 }, limit: { most: 0.5 }, words: ["0.31° to port", "at most 0.5°"] },
   trim: {
