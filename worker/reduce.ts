@@ -1,6 +1,7 @@
 import { readFileSync } from "node:fs";
 import { type Faults, faultsOf } from "@/lib/inclining/faults";
 import { defendedLightship } from "@/lib/lightship/defended-lightship";
+import { examined } from "@/lib/lightship/examination";
 import { incliningResult } from "@/lib/lightship/inclining-result";
 import { parseRecord } from "@/lib/record/parse-record";
 import type { TestRecord } from "@/lib/record/test-record";
@@ -38,7 +39,9 @@ function reduced(record: TestRecord): Result<ResultDocument, Faults> {
   const result = incliningResult(record);
   if (!result.ok) return result;
   const defence = defendedLightship(record);
-  return defence.ok ? answer(resultDocument(record, result.value, defence.value)) : defence;
+  if (!defence.ok) return defence;
+  const examination = examined(record);
+  return examination.ok ? answer(resultDocument(record, result.value, defence.value, examination.value)) : examination;
 }
 
 function textOf(path: string): string | null {

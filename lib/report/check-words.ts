@@ -104,7 +104,7 @@ const words: { readonly [Id in CheckId]: Words<Id> } = {
     limit: ({ least }) => `clear of the bottom; at least ${figure(least, 1)} m (a setting)`,
   },
   certificates: {
-    name: "Certificates of weights and hydrometers",
+    name: "Certificates",
     found: ({ without }) => (without.length === 0 ? "named for all" : `not named: ${without.join(", ")}`),
     limit: () => "named for each; their age is for the surveyor to see",
   },

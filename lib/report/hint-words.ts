@@ -39,7 +39,8 @@ export function hintName(cause: HintCause): string {
 
 /** What speaks for a hint, with its numbers. */
 export function hintEvidence(hint: Hint): string {
-  return `${words[hint.cause].evidence(hint)}; scatter alone shows as much in ${chance(hint.evidence.probability)}`;
+  const session = hint.session > 1 ? `session ${hint.session}: ` : "";
+  return `${session}${words[hint.cause].evidence(hint)}; scatter alone shows as much in ${chance(hint.evidence.probability)}`;
 }
 
 /** What to look for, and the moves to repeat. */

@@ -1,5 +1,7 @@
 import type { IncliningResult } from "@/lib/lightship/inclining-result";
 import { causeName } from "./cause-words";
+import { checkName, verdictWord } from "./check-words";
+import { hintName, movesInWords } from "./hint-words";
 import type { ResultDocument } from "./result-document";
 import { decimalsFor, figure, figureWithin, signedFigure } from "./rounding";
 
@@ -8,7 +10,14 @@ import { decimalsFor, figure, figureWithin, signedFigure } from "./rounding";
  * Digits of what follows from the slope follow its 95 % interval; the others are those in which they are read.
  */
 export function resultPage(result: ResultDocument): readonly string[] {
-  const sections = [waterlineLines(result), fitLines(result), inclinedLines(result), lightshipLines(result), budgetLines(result)];
+  const sections = [
+    waterlineLines(result),
+    fitLines(result),
+    inclinedLines(result),
+    lightshipLines(result),
+    budgetLines(result),
+    ...examinationSections(result),
+  ];
   return [...sections.flatMap((lines) => [...lines, ""]), ...assumptionLines(result)];
 }
 
@@ -80,6 +89,12 @@ function budgetLines({ budget }: ResultDocument): readonly string[] {
     "What leaves VCG open",
     budget.map(({ input, share }): Row => [causeName(input), figure(100 * share, 0), "%"]),
   );
+}
+
+function examinationSections({ checks, hints }: ResultDocument): readonly (readonly string[])[] {
+  const findings = checks.map(({ id, verdict, found, limit }): Row => [checkName(id), verdictWord(verdict), ` ${found}; ${limit}`]);
+  const told = hints.flatMap(({ cause, moves, evidence }) => [`  ${hintName(cause)}: ${movesInWords(moves)}`, `    ${evidence}`]);
+  return [section("Checks", findings), ...(told.length === 0 ? [] : [["What the plot tells", ...told]])];
 }
 
 function assumptionLines({ assumptions }: ResultDocument): readonly string[] {

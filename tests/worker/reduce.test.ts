@@ -5,6 +5,7 @@ import path from "node:path";
 import { promisify } from "node:util";
 import { afterAll, beforeAll, describe, expect, it } from "vitest";
 import { defendedLightship } from "@/lib/lightship/defended-lightship";
+import { examined } from "@/lib/lightship/examination";
 import { incliningResult } from "@/lib/lightship/inclining-result";
 import { recordFrom } from "@/lib/record/parse-record";
 import { resultDocument } from "@/lib/report/result-document";
@@ -50,7 +51,12 @@ describe("the command reduce", () => {
     const { code, out, faults } = await ended("npm", ["run", "--silent", "reduce", "--", written(JSON.stringify(document))]);
     expect({ code, faults }).toEqual({ code: 0, faults: [] });
     const record = promised(recordFrom(document));
-    const whole = resultDocument(record, promised(incliningResult(record)), promised(defendedLightship(record)));
+    const whole = resultDocument(
+      record,
+      promised(incliningResult(record)),
+      promised(defendedLightship(record)),
+      promised(examined(record)),
+    );
     expect(JSON.parse(out)).toEqual(whole);
   });
 

@@ -28,6 +28,10 @@ describe("the words of a hint", () => {
     expect([[3], [2, 6], [1, 2, 3]].map(movesInWords)).toEqual(["move 3", "moves 2 and 6", "moves 1, 2 and 3"]);
   });
 
+  it("name the session after the first", () => {
+    expect(hintEvidence({ ...hint("gust", 0.001, [1]), session: 2 })).toMatch(/^session 2: /);
+  });
+
   it("don't print a chance that has no digits left", () => {
     const { evidence, ...rest } = hint("gust", 0.001, [1]);
     expect(hintEvidence({ ...rest, evidence: { ...evidence, probability: 1e-9 } })).toContain("fewer than 1 of 10 000 cases");
