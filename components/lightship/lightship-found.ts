@@ -1,13 +1,19 @@
 import type { Faults } from "@/lib/inclining/faults";
 import { inside } from "@/lib/inclining/faults";
 import { type InclinedShip, incliningTest } from "@/lib/inclining/inclining-test";
+import { type Examination, examinationOf } from "@/lib/lightship/examination";
 import { type Lightship, type LightshipBalance, lightshipBalance, lightshipOf } from "@/lib/lightship/lightship";
 import { type Moments, momentsOf } from "@/lib/lightship/weight-item";
 import type { TestRecord } from "@/lib/record/test-record";
 import { answer, type Result } from "@/lib/result";
 import type { BalanceLine } from "./balance-table";
 
-export type FoundLightship = { readonly ship: InclinedShip; readonly lines: readonly BalanceLine[]; readonly lightship: Lightship };
+export type FoundLightship = {
+  readonly ship: InclinedShip;
+  readonly lines: readonly BalanceLine[];
+  readonly lightship: Lightship;
+  readonly examination: Examination;
+};
 
 /** A test's lightship with each line of the way to it. */
 export function foundLightship(record: TestRecord): Result<FoundLightship, Faults> {
@@ -15,7 +21,9 @@ export function foundLightship(record: TestRecord): Result<FoundLightship, Fault
   if (!ship.ok) return ship;
   const balance = inside("items", lightshipBalance(ship.value, record));
   if (!balance.ok) return balance;
-  return answer({ ship: ship.value, lines: linesOf(balance.value, ship.value, record), lightship: lightshipOf(balance.value) });
+  const lightship = lightshipOf(balance.value);
+  const examination = examinationOf(record, ship.value, lightship);
+  return answer({ ship: ship.value, lines: linesOf(balance.value, ship.value, record), lightship, examination });
 }
 
 function linesOf(balance: LightshipBalance, ship: InclinedShip, { items }: TestRecord): BalanceLine[] {

@@ -4,12 +4,15 @@ import { useMemo } from "react";
 import { MomentTangentPlot } from "@/components/charts/moment-tangent-plot";
 import { PlotTable } from "@/components/charts/plot-table";
 import { lineSoFar } from "@/components/control/line-so-far";
+import { PlotHints } from "@/components/control/plot-hints";
 import { RefusalSentences } from "@/components/control/refusal-sentences";
 import { Disclosure } from "@/components/ui/disclosure";
 import { Notice } from "@/components/ui/notice";
 import { Panel } from "@/components/ui/panel";
+import type { Hint } from "@/lib/inclining/plot-hints";
 import type { TestRecord } from "@/lib/record/test-record";
 import { BalanceTable } from "./balance-table";
+import { ChecksPanel } from "./checks-panel";
 import { DefencePanel } from "./defence-panel";
 import { FitPanel } from "./fit-panel";
 import { HydrostaticsPanel } from "./hydrostatics-panel";
@@ -30,7 +33,7 @@ export function LightshipPage({ record, mayState }: { record: TestRecord; maySta
 }
 
 function Found({ found, record, mayState }: { found: FoundLightship; record: TestRecord; mayState: boolean }) {
-  const { ship, lines, lightship } = found;
+  const { ship, lines, lightship, examination } = found;
   return (
     <>
       <LightshipResult lightship={lightship} ship={ship} />
@@ -41,14 +44,15 @@ function Found({ found, record, mayState }: { found: FoundLightship; record: Tes
       <div className="grid items-start gap-5 lg:grid-cols-2">
         <WaterlinePanel waterline={ship.afloat.waterline} water={ship.afloat.water} />
         <HydrostaticsPanel hydrostatics={ship.afloat.hydrostatics} asInclined={ship.asInclined} />
-        <Plot record={record} />
+        <Plot record={record} hints={examination.hints} />
         <FitPanel line={ship.line} />
       </div>
+      <ChecksPanel checks={examination.checks} />
     </>
   );
 }
 
-function Plot({ record }: { record: TestRecord }) {
+function Plot({ record, hints }: { record: TestRecord; hints: readonly Hint[] }) {
   const so = useMemo(() => lineSoFar(record), [record]);
   if (!so) return null;
   return (
@@ -57,6 +61,7 @@ function Plot({ record }: { record: TestRecord }) {
       <Disclosure title="The points as figures">
         <PlotTable points={so.points} />
       </Disclosure>
+      <PlotHints hints={hints} />
     </Panel>
   );
 }
