@@ -3,11 +3,15 @@ import { Cell, ColumnHead, DataTable, RowHead } from "@/components/ui/data-table
 import { Panel } from "@/components/ui/panel";
 import { Quantity } from "@/components/ui/quantity";
 import type { MomentTangentLine } from "@/lib/inclining/inclined-ship";
+import type { InclinedShip } from "@/lib/inclining/inclining-test";
+import type { IncliningTestData } from "@/lib/inclining/test-data";
+import { MovesTable } from "./moves-table";
 
 const PER_METRE = 1000;
 
 /** The common slope with its interval, and what each station says by itself. */
-export function FitPanel({ line }: { line: MomentTangentLine }) {
+export function FitPanel({ test, ship }: { test: IncliningTestData; ship: InclinedShip }) {
+  const { line } = ship;
   const { spread } = line;
   return (
     <Panel title="The line" aside="tangent on moment, least squares, one intercept for each station">
@@ -31,39 +35,48 @@ export function FitPanel({ line }: { line: MomentTangentLine }) {
         )}
       </p>
       <div className="mt-3">
-        <DataTable caption="Slope of each station by itself" showCaption>
-          <thead>
-            <tr>
-              <ColumnHead>Station</ColumnHead>
-              <ColumnHead figure>Own slope, mm per m for each t·m</ColumnHead>
-              <ColumnHead figure>Largest residual</ColumnHead>
-            </tr>
-          </thead>
-          <tbody>
-            {line.stations.map((station) => (
-              <tr key={seriesName(station)}>
-                <RowHead>{seriesName(station)}</RowHead>
-                <Cell figure>
-                  <Quantity
-                    value={station.slope === null ? null : station.slope * PER_METRE}
-                    unit=""
-                    uncertainty={spread ? spread.slopeUncertainty * PER_METRE : line.slope}
-                  />
-                </Cell>
-                <Cell figure>
-                  <Quantity
-                    value={largest(station.commonResiduals.map((point) => point.residual)) * PER_METRE}
-                    unit="mm per m"
-                    decimals={3}
-                    signed
-                  />
-                </Cell>
-              </tr>
-            ))}
-          </tbody>
-        </DataTable>
+        <OwnSlopes line={line} />
+      </div>
+      <div className="mt-4">
+        <MovesTable test={test} ship={ship} />
       </div>
     </Panel>
+  );
+}
+
+function OwnSlopes({ line: { stations, slope, spread } }: { line: MomentTangentLine }) {
+  return (
+    <DataTable caption="Slope of each station by itself" showCaption>
+      <thead>
+        <tr>
+          <ColumnHead>Station</ColumnHead>
+          <ColumnHead figure>Own slope, mm per m for each t·m</ColumnHead>
+          <ColumnHead figure>Largest residual</ColumnHead>
+        </tr>
+      </thead>
+      <tbody>
+        {stations.map((station) => (
+          <tr key={seriesName(station)}>
+            <RowHead>{seriesName(station)}</RowHead>
+            <Cell figure>
+              <Quantity
+                value={station.slope === null ? null : station.slope * PER_METRE}
+                unit=""
+                uncertainty={spread ? spread.slopeUncertainty * PER_METRE : slope}
+              />
+            </Cell>
+            <Cell figure>
+              <Quantity
+                value={largest(station.commonResiduals.map((point) => point.residual)) * PER_METRE}
+                unit="mm per m"
+                decimals={3}
+                signed
+              />
+            </Cell>
+          </tr>
+        ))}
+      </tbody>
+    </DataTable>
   );
 }
 

@@ -45,7 +45,7 @@ function Found({ found, record, mayState }: { found: FoundLightship; record: Tes
         <WaterlinePanel waterline={ship.afloat.waterline} water={ship.afloat.water} />
         <HydrostaticsPanel hydrostatics={ship.afloat.hydrostatics} asInclined={ship.asInclined} />
         <Plot record={record} hints={examination.hints} />
-        <FitPanel line={ship.line} />
+        <FitPanel test={record} ship={ship} />
       </div>
       <ChecksPanel checks={examination.checks} />
     </>
