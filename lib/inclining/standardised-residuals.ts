@@ -10,7 +10,7 @@ export type StandardisedResidual = MeanResidual & {
 
 export type StandardisedResiduals = {
   readonly points: readonly StandardisedResidual[];
-  /** what the largest of all moves of a straight line exceeds with probability 0.05; null with too few moves */
+  /** what the largest of all moves of a straight line exceeds with the given probability; null with too few moves */
   readonly limit: number | null;
 };
 
@@ -19,18 +19,18 @@ export type StandardisedResiduals = {
  *
  *     tₖ = ēₖ / (s₍ₖ₎·√(1 − hₖ)),   s₍ₖ₎² = (Σ ē² − ēₖ²/(1 − hₖ)) / (ν − 1),   ν = K − 1 − S
  *
- * K moves in S sessions. Student's t of ν − 1 degrees of freedom; the limit is two-sided at 95 % for the largest of K
- * (Bonferroni). `floor` [tangent]: scatter is never taken for smaller than the readings' own uncertainty.
+ * K moves in S sessions. Student's t of ν − 1 degrees of freedom; the limit is two-sided for the largest of K
+ * (Bonferroni), at 95 % unless `probability` says otherwise. `floor` [tangent]: scatter is never taken for smaller than the readings' own uncertainty.
  * Null throughout below two degrees of freedom.
  * Source: R. D. Cook and S. Weisberg, Residuals and Influence in Regression (1982), externally studentised *from memory*.
  */
-export function standardisedResiduals(moves: readonly MoveOnLine[], floor = 0): StandardisedResiduals {
+export function standardisedResiduals(moves: readonly MoveOnLine[], floor = 0, probability = 0.05): StandardisedResiduals {
   const { points, degreesOfFreedom } = meanResiduals(moves);
   if (degreesOfFreedom < 2) return { points: points.map((point) => ({ ...point, standardised: null })), limit: null };
   const squares = sum(points.map(({ residual }) => residual ** 2));
   const least = Math.max(floor, roundingOf(moves));
   const standardised = points.map((point) => ({ ...point, standardised: standardise(point, squares, degreesOfFreedom, least) }));
-  return { points: standardised, limit: studentT(1 - 0.025 / moves.length, degreesOfFreedom - 1) };
+  return { points: standardised, limit: studentT(1 - probability / 2 / moves.length, degreesOfFreedom - 1) };
 }
 
 /** Below this tangent a residual is rounding and no scatter. */

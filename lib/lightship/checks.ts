@@ -32,7 +32,7 @@ export function checksOf(
   return [
     heelRange(line, limits),
     ...deflection(test, line, limits),
-    stationCount(line, limits),
+    stationCount(test, line, limits),
     ...unequalLengths(test, limits),
     movements(line, straight.verdict === "met", limits),
     straight,

@@ -5,6 +5,8 @@ export type CheckLimits = {
   readonly heel: Range;
   readonly deflectionMm: number;
   readonly stations: { readonly recommended: number; readonly least: number };
+  /** below this length class may accept one station less */
+  readonly smallShip: number;
   /** lengths closer than this share are equal */
   readonly equalLengths: number;
   readonly stationSlope: number;
@@ -37,6 +39,7 @@ export const usualLimits: CheckLimits = {
   heel: [1, 4],
   deflectionMm: 150,
   stations: { recommended: 3, least: 2 },
+  smallShip: 30,
   equalLengths: 0.02,
   stationSlope: 0.02,
   zeroDrift: 0.02,

@@ -12,11 +12,11 @@ type Straightness = Extract<Finding, { readonly id: "straightness" }>;
 
 /**
  * Whether the plot is straight: the move that stands off most, and the lack of fit. IMO gives no number; this is a statistical
- * test at 95 %. Scatter below the readings' own uncertainty is not taken for bent.
+ * test, at 95 % by the usual limits. Scatter below the readings' own uncertainty is not taken for bent.
  */
 export function straightness(test: IncliningTestData, line: MomentTangentLine, { straightness: probability }: CheckLimits): Straightness {
   const floor = uncertaintyOfMove(test, line);
-  const { points, limit } = standardisedResiduals(line.moves, floor);
+  const { points, limit } = standardisedResiduals(line.moves, floor, probability);
   const off = points.flatMap(({ no, standardised }) => (standardised === null ? [] : [{ no, standardised }]));
   const [worst] = off.sort((a, b) => Math.abs(b.standardised) - Math.abs(a.standardised));
   const lack = lackOfFit(line.moves, floor);

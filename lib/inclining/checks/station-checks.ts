@@ -5,10 +5,12 @@ import type { IncliningTestData } from "../test-data";
 import type { CheckLimits } from "./check-limits";
 import { type Finding, metOrAttention } from "./finding";
 
-/** How many stations were read; one less than the least may be accepted on a small ship, so it is not refused here. */
-export function stationCount({ stations }: MomentTangentLine, { stations: { recommended, least } }: CheckLimits): Finding {
+/** How many stations were read; on a small ship class may accept one less than the least. */
+export function stationCount({ vessel }: IncliningTestData, { stations }: MomentTangentLine, limits: CheckLimits): Finding {
+  const { recommended, least } = limits.stations;
   const read = new Set(stations.map(({ id }) => id)).size;
-  const verdict = read >= recommended ? "met" : "attention";
+  const isAccepted = read >= least || (read === least - 1 && vessel.lbp < limits.smallShip);
+  const verdict = read >= recommended ? "met" : isAccepted ? "attention" : "not-met";
   return { id: "stations", verdict, found: { stations: read }, limit: { recommended, least } };
 }
 

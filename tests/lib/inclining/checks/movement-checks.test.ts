@@ -44,6 +44,16 @@ describe("straightness", () => {
     expect(straightness(untold, lineOff(off), usualLimits).verdict).toBe("met");
   });
 
+  it("is held to the probability that is set", () => {
+    const limitAt = (probability: number) =>
+      straightness(
+        exact,
+        lineOff((move) => wobble[move] ?? 0),
+        { ...usualLimits, straightness: probability },
+      ).limit.standardised ?? 0;
+    expect(limitAt(0.01)).toBeGreaterThan(limitAt(0.05));
+  });
+
   it("can't be told of three moves, and that is not met", () => {
     expect(
       straightness(

@@ -8,11 +8,13 @@ const straight = () => 0;
 
 describe("stations", () => {
   it.each([
-    [3, "met"],
-    [2, "attention"],
-    [1, "attention"],
-  ])("%i of them are %s", (stations, verdict) => {
-    expect(stationCount(lineOff(straight, stations), usualLimits)).toMatchObject({ verdict, found: { stations } });
+    [3, 60, "met"],
+    [2, 60, "attention"],
+    [1, 29, "attention"],
+    [1, 30, "not-met"],
+  ])("%i of them on %i m are %s", (stations, lbp, verdict) => {
+    const finding = stationCount(sampleTest({ vessel: { lbp } }), lineOff(straight, stations), usualLimits);
+    expect(finding).toMatchObject({ verdict, found: { stations } });
   });
 
   it.each([
