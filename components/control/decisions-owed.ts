@@ -1,4 +1,5 @@
 import type { LiveSnapshot, MoveProgress, Phone, Quarantined, ReadingDue } from "@/lib/sync/live";
+import { isReadAgain } from "@/lib/sync/reconciling";
 import { phoneInWords } from "./phone-in-words";
 import { slotInWords } from "./slot-in-words";
 
@@ -15,13 +16,8 @@ export function decisionsOwed(snapshot: LiveSnapshot): Decision[] {
 
 function disagreements(snapshot: LiveSnapshot): Decision[] {
   return snapshot.due
-    .filter((due) => due.state === "disagrees" && !isReadAgain(snapshot, due))
+    .filter((due) => due.state === "disagrees" && !isReadAgain(snapshot.moves, due))
     .map((due) => ({ kind: "disagreement", due, sentence: `Readings disagree: ${slotInWords(due.slot)}.` }));
-}
-
-// a move that was ordered again counts by its last repeat only
-function isReadAgain({ moves }: LiveSnapshot, { slot }: ReadingDue): boolean {
-  return slot.kind === "batten" && moves.some((move) => move.no === slot.move && move.repeat > slot.repeat);
 }
 
 function movesInDispute(snapshot: LiveSnapshot): Decision[] {
@@ -41,6 +37,6 @@ function quarantined(snapshot: LiveSnapshot): Decision[] {
 
 function phonesWithGaps(snapshot: LiveSnapshot): Decision[] {
   return snapshot.phones
-    .filter((phone) => phone.missing.length > 0)
+    .filter((phone) => phone.missing.length > 0 && phone.writtenOff === null)
     .map((phone) => ({ kind: "missing", phone, sentence: `${phone.name} (${phone.person}): ${phoneInWords(phone)}.` }));
 }

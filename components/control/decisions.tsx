@@ -3,6 +3,7 @@ import { Sign } from "@/components/ui/sign";
 import type { LiveSnapshot } from "@/lib/sync/live";
 import { type Decision, decisionsOwed } from "./decisions-owed";
 import { Disagreement } from "./disagreement";
+import { GapOfPhone } from "./gap-of-phone";
 import { HeldBack } from "./held-back";
 import type { LeadActs } from "./lead-acts";
 
@@ -45,7 +46,7 @@ function Settling({ decision, snapshot, acts }: { decision: Decision; snapshot: 
     case "quarantined":
       return <HeldBack held={decision.held} acts={acts} />;
     case "missing":
-      return <p className="mt-1">The phone still holds them. Bring it near the ship's network, or have its file read in.</p>;
+      return <GapOfPhone phone={decision.phone} acts={acts} />;
   }
 }
 

@@ -14,5 +14,8 @@ export type LeadActs = {
   readonly record: (slot: Slot, value: ReadingValue, source: "station" | "radio" | "paper") => Promise<void>;
   readonly correct: (standing: StandingReading, slot: Slot, value: ReadingValue, reason: string) => Promise<void>;
   readonly resolve: (heads: readonly string[], slot: Slot, choice: Choice, reason: string) => Promise<void>;
+  readonly takeBack: (standing: StandingReading, slot: Slot, reason: string) => Promise<void>;
+  readonly assign: (event: string, slot: Slot, reason: string) => Promise<void>;
+  readonly writeOff: (device: string, reason: string) => Promise<void>;
   readonly release: (event: string, reason: string) => Promise<void>;
 };

@@ -56,6 +56,10 @@ function leadActs(lead: Lead, append: (draft: EventDraft) => Promise<void>): Lea
     repeatMove: (move) => append({ ...act(null), ...noReading, type: "move.repeat", payload: run(move) }),
     excludeMove: (move, reason) => append({ ...act(reason), ...noReading, type: "move.exclude", payload: run(move) }),
     release: (event, reason) => append({ ...act(reason), ...noReading, type: "release", payload: { event } }),
+    assign: (event, slot, reason) => append({ ...act(reason), ...noReading, type: "assign", slot, payload: { event } }),
+    writeOff: (device, reason) => append({ ...act(reason), ...noReading, type: "device.writeOff", payload: { device } }),
+    takeBack: ({ reading, event }, slot, reason) =>
+      append({ ...act(reason), type: "void", reading, base: event, slot, payload: {}, source: null }),
     record: (slot, payload, source) => append({ ...act(null), type: "record", reading: newReadingId(), base: null, slot, payload, source }),
     correct: ({ reading, event, source }: StandingReading, slot: Slot, payload: ReadingValue, reason: string) =>
       append({ ...act(reason), type: "correct", reading, base: event, slot, payload, source }),

@@ -6,6 +6,7 @@ import type { Database } from "./connection";
 import { type Device, deviceById, devicesEnrolledIn } from "./devices";
 import { receivedFrom } from "./event-store";
 import { rolesOf } from "./role-grants";
+import { writeOffs } from "./write-offs";
 
 /** The phones of a test, those enrolled for it and those that have sent for it: last heard, what they hold, gaps in their numbers. */
 export function livePhones(db: Database, test: string, at: string): Phone[] {
@@ -16,10 +17,11 @@ export function livePhones(db: Database, test: string, at: string): Phone[] {
     const sender = known.has(device) ? undefined : deviceById(db, device);
     return sender ? [sender] : [];
   });
-  return [...enrolled, ...others].map((device) => phoneOf(db, test, device, at));
+  const off = writeOffs(db, test);
+  return [...enrolled, ...others].map((device) => ({ ...phoneOf(db, test, device, at), writtenOff: off.get(device.id) ?? null }));
 }
 
-function phoneOf(db: Database, test: string, device: Device, at: string): Phone {
+function phoneOf(db: Database, test: string, device: Device, at: string): Omit<Phone, "writtenOff"> {
   const { id, name, account, revokedAt, lastHeardAt, holds } = device;
   return {
     device: id,

@@ -30,6 +30,8 @@ export type Phone = {
   readonly highestSeq: number;
   readonly received: number;
   readonly missing: readonly number[];
+  /** why nobody waits for what is missing; null: it is awaited */
+  readonly writtenOff: string | null;
 };
 
 export type SlotState = "empty" | "read" | "disagrees" | "resolved";

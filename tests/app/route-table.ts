@@ -37,6 +37,7 @@ export const pages: Readonly<Record<string, Row["allowed"]>> = {
   "app/(office)/tests/[id]/control/page.tsx": allButReaders,
   "app/(office)/tests/[id]/lightship/page.tsx": ["lead", "engineer", "witness"],
   "app/(office)/tests/[id]/ledger/page.tsx": allButReaders,
+  "app/(office)/tests/[id]/reconcile/page.tsx": ["lead", "engineer"],
 };
 
 const newCode = { role: "reader", personName: "Rolf" };
@@ -52,6 +53,9 @@ export const handlers: Readonly<Record<string, Readonly<Record<string, Row>>>> =
   "app/api/v1/tests/[id]/job/route.ts": { GET: { allowed: everybody } },
   "app/api/v1/tests/[id]/live/route.ts": { GET: { allowed: allButReaders } },
   "app/api/v1/tests/[id]/record/route.ts": { GET: { allowed: allButReaders } },
+  "app/api/v1/tests/[id]/state/route.ts": {
+    POST: { allowed: ["lead", "engineer"], body: () => ({ to: "planning", reason: null }), status: 409 },
+  },
   "app/api/v1/tests/[id]/uncertainty/route.ts": { PUT: { allowed: ["engineer"], body: () => ({ draft: 0.003 }) } },
   "app/api/v1/tests/[id]/enrolments/route.ts": {
     GET: { allowed: ["lead", "engineer", "administrator"] },

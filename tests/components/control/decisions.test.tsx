@@ -14,7 +14,7 @@ function noting(settled: Settled[]): LeadActs {
   const nothing = async () => undefined;
   const resolve: LeadActs["resolve"] = async (...given) => void settled.push(given);
   const orders = { openMove: nothing, closeMove: nothing, repeatMove: nothing, excludeMove: nothing };
-  return { ...orders, record: nothing, correct: nothing, release: nothing, resolve };
+  return { ...orders, record: nothing, correct: nothing, release: nothing, takeBack: nothing, assign: nothing, writeOff: nothing, resolve };
 }
 
 const other = "0190a5d1-5d00-4000-8000-0000000000a2";
@@ -93,6 +93,7 @@ describe("what needs the lead's decision", () => {
       highestSeq: 41,
       received: 39,
       missing: [12, 13],
+      writtenOff: null,
     };
     render(<Decisions snapshot={{ ...bargeSnapshot({ read: 0, open: null }), phones: [phone] }} acts={null} />);
     expect(screen.getByText("Deck phone (Ida): 41 taken, 39 received, missing 12–13.")).toBeDefined();

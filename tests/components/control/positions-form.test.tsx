@@ -66,9 +66,10 @@ describe("a weight measured once more", () => {
     if (!again) throw new Error("the place was not taken in");
     const corrected: Parameters<LeadActs["correct"]>[] = [];
     const nothing = async () => undefined;
-    const orders = { openMove: nothing, closeMove: nothing, repeatMove: nothing, excludeMove: nothing };
+    const orders = { openMove: nothing, closeMove: nothing, repeatMove: nothing, excludeMove: nothing, takeBack: nothing };
+    const letting = { assign: nothing, writeOff: nothing, release: nothing };
     const correct: LeadActs["correct"] = async (...given) => void corrected.push(given);
-    render(<PositionAgain due={again} acts={{ ...orders, record: nothing, resolve: nothing, release: nothing, correct }} />);
+    render(<PositionAgain due={again} acts={{ ...orders, ...letting, record: nothing, resolve: nothing, correct }} />);
     fireEvent.change(screen.getByLabelText(/^y,/), { target: { value: "4.0" } });
     fireEvent.click(screen.getByRole("checkbox"));
     fireEvent.click(screen.getByRole("button", { name: "Save positions" }));
