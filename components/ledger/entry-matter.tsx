@@ -34,10 +34,16 @@ function Matter({ before, after }: Pick<EntryLine, "before" | "after">) {
       </p>
     );
   }
+  const move = partOf(partOf(after, "value"), "move");
+  if (typeof move === "number") return <p>{moveInWords(move, partOf(partOf(after, "value"), "repeat"))}</p>;
   const message = partOf(after, "message");
   if (typeof message === "string") return <p>{message}</p>;
   if (typeof after === "string") return <p>{typeof before === "string" ? `${before} → ${after}` : after}</p>;
   return before === null && after === null ? null : <AsWritten before={before} after={after} />;
+}
+
+function moveInWords(move: number, repeat: unknown): string {
+  return typeof repeat === "number" && repeat > 1 ? `move ${move}, repeat ${repeat}` : `move ${move}`;
 }
 
 function AsWritten({ before, after }: Pick<EntryLine, "before" | "after">) {

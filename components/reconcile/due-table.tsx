@@ -16,9 +16,9 @@ export function DueTable({ due, acts }: DueTableProps) {
       <thead>
         <tr>
           <ColumnHead>Reading due</ColumnHead>
-          <ColumnHead>What stands</ColumnHead>
+          <ColumnHead className="w-64">What stands</ColumnHead>
           <ColumnHead>Who</ColumnHead>
-          <ColumnHead>History</ColumnHead>
+          <ColumnHead className="w-2/5">History</ColumnHead>
         </tr>
       </thead>
       <tbody>

@@ -38,6 +38,11 @@ test("says a change of state in a line, and why an event was set aside", () => {
   expect(container.textContent).toBe("The plan has no such reading due");
 });
 
+test("names the move that was ordered", () => {
+  const { container } = render(<EntryMatter entry={{ ...entry, after: { serverSeq: 9, slot: null, value: { move: 5, repeat: 2 } } }} />);
+  expect(container.textContent).toBe("move 5, repeat 2");
+});
+
 test("folds everything else away as it is written", () => {
   render(<EntryMatter entry={{ ...entry, after: { role: "reader", account: "x" } }} />);
   expect(screen.getByText("As it is written")).toBeTruthy();
