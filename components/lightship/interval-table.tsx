@@ -18,7 +18,8 @@ export function IntervalTable({ intervals, isAssumed }: IntervalTableProps) {
         </thead>
         <tbody>
           <Row name="Displacement" interval={intervals.displacement} unit="t" />
-          <Row name="VCG above baseline" interval={intervals.vcg} unit="m" />
+          <Row name="VCG, classical" interval={intervals.vcg} unit="m" />
+          {intervals.vcgGeneralised ? <Row name="VCG, generalised" interval={intervals.vcgGeneralised} unit="m" /> : null}
           <Row name="LCG forward of AP" interval={intervals.lcg} unit="m" />
         </tbody>
       </DataTable>

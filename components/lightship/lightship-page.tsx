@@ -10,6 +10,7 @@ import { Disclosure } from "@/components/ui/disclosure";
 import { Notice } from "@/components/ui/notice";
 import { Panel } from "@/components/ui/panel";
 import type { Hint } from "@/lib/inclining/plot-hints";
+import { methodDifference } from "@/lib/lightship/method-difference";
 import type { TestRecord } from "@/lib/record/test-record";
 import { BalanceTable } from "./balance-table";
 import { ChecksPanel } from "./checks-panel";
@@ -36,7 +37,12 @@ function Found({ found, record, mayState }: { found: FoundLightship; record: Tes
   const { ship, lines, lightship, examination } = found;
   return (
     <>
-      <LightshipResult lightship={lightship} ship={ship} />
+      <LightshipResult
+        lightship={lightship}
+        ship={ship}
+        method={record.settings?.method ?? "classical"}
+        difference={methodDifference(record, ship)}
+      />
       <DefencePanel record={record} mayState={mayState} />
       <Panel title="From as inclined to lightship">
         <BalanceTable lines={lines} />

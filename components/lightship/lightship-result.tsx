@@ -2,19 +2,40 @@ import { Notice } from "@/components/ui/notice";
 import { Panel } from "@/components/ui/panel";
 import { Quantity, type QuantityProps } from "@/components/ui/quantity";
 import type { InclinedShip } from "@/lib/inclining/inclining-test";
-import type { Lightship } from "@/lib/lightship/lightship";
+import type { Method } from "@/lib/lightship/inclining-result";
+import { generalisedVcgOf, type Lightship } from "@/lib/lightship/lightship";
+import type { MethodDifference } from "@/lib/lightship/method-difference";
+import { methodSentences } from "@/lib/report/method-words";
+
+type LightshipResultProps = { lightship: Lightship; ship: InclinedShip; method: Method; difference: MethodDifference | null };
 
 /** The result, in the size it deserves, with the caution that belongs to it. */
-export function LightshipResult({ lightship, ship }: { lightship: Lightship; ship: InclinedShip }) {
-  const { displacement, lcg, tcg, vcg } = lightship;
+export function LightshipResult({ lightship, ship, method, difference }: LightshipResultProps) {
+  const { displacement, lcg, tcg } = lightship;
+  const generalised = generalisedVcgOf(lightship, ship);
+  const isGeneralised = method === "generalised" && generalised !== null;
   return (
-    <Panel title="Result" aside="classical reduction">
+    <Panel title="Result" aside={isGeneralised ? "generalised reduction" : "classical reduction"}>
       <div className="grid grid-cols-2 gap-x-6 gap-y-4 md:grid-cols-4">
         <Headline name="Displacement" value={displacement} unit="t" decimals={1} />
-        <Headline name="VCG above baseline" value={vcg} unit="m" {...digitsOfVcg(lightship, ship)} />
+        <Headline
+          name="VCG above baseline"
+          value={isGeneralised ? generalised : lightship.vcg}
+          unit="m"
+          {...digitsOfVcg(lightship, ship)}
+        />
         <Headline name="LCG forward of AP" value={lcg} unit="m" decimals={2} />
         <Headline name="TCG to starboard +" value={tcg} unit="m" decimals={3} signed />
       </div>
+      {generalised === null ? null : (
+        <p className="mt-4">
+          By the {isGeneralised ? "classical" : "generalised"} reduction the VCG is{" "}
+          <strong>
+            <Quantity value={isGeneralised ? lightship.vcg : generalised} unit="m" {...digitsOfVcg(lightship, ship)} />
+          </strong>
+          . {difference ? methodSentences(difference).join(" ") : null}
+        </p>
+      )}
       <div className="mt-4">
         <Notice tone="caution">
           Preliminary until approved by the Administration or the class society; not for loading or sailing decisions. Local codes come

@@ -1,6 +1,5 @@
 import { defendedLightship } from "@/lib/lightship/defended-lightship";
 import type { LightshipTestData } from "@/lib/lightship/inclining-result";
-import { numbersWithInterval } from "@/lib/lightship/lightship-interval";
 import { statedUncertainty } from "@/lib/lightship/stated-uncertainty";
 import { type Cause, uncertainInputs } from "@/lib/lightship/uncertain-inputs";
 import { type Noise, seededNoise } from "@/lib/numerics/seeded-noise";
@@ -32,9 +31,9 @@ export function coverageTrial({ record, truth }: CoverageShip, trial: number, dr
   const readings = promised(simulatedReadings(promised(simulatedShip(real, truth)), quality, noise));
   const test = { ...record, readings: withReadingErrors(readings, stated.readingMm, noise), settings: { seed: trial, draws } };
   const { interval95 } = promised(defendedLightship(withSoundingErrors(test, noise)));
-  const held = numbersWithInterval.map((number) => {
-    const [low, high] = interval95[number];
-    return [number, low <= truth.lightship[number] && truth.lightship[number] <= high] as const;
+  const held = Object.entries(interval95).map(([number, [low, high]]) => {
+    const real = number === "vcgGeneralised" ? truth.lightship.vcg : truth.lightship[number as "displacement" | "vcg" | "lcg"];
+    return [number, low <= real && real <= high] as const;
   });
   return Object.fromEntries(held);
 }

@@ -1,6 +1,7 @@
 import { answer, type Result } from "@/lib/result";
 import { asInclined } from "./as-inclined";
 import { type Faults, faultsOf, inside, refuseFaults } from "./faults";
+import { type GeneralisedShip, generalisedShip } from "./generalised-ship";
 import type { AsInclined, MomentTangentLine, SlopeSpread } from "./inclined-ship";
 import { type Liquid, liquidsAboard } from "./liquids";
 import { momentTangentLine } from "./moment-tangent-line";
@@ -13,6 +14,8 @@ export type InclinedShip = {
   readonly liquids: readonly Liquid[];
   readonly line: JudgedLine;
   readonly asInclined: AsInclined;
+  /** by the hull's own equilibrium; null where her hydrostatics can't give it */
+  readonly generalised: GeneralisedShip | null;
 };
 
 /** A line with moves enough to judge its scatter. */
@@ -39,7 +42,8 @@ export function incliningTest(test: IncliningTestData): Result<InclinedShip, Fau
 
   const ship = asInclined(afloat.value, line.value, liquids.value, test.aboard);
   if (!ship.ok) return inside("readings.battens", ship);
-  return answer({ afloat: afloat.value, liquids: liquids.value, line: line.value, asInclined: ship.value });
+  const generalised = generalisedShip(test, afloat.value, line.value, ship.value);
+  return answer({ afloat: afloat.value, liquids: liquids.value, line: line.value, asInclined: ship.value, generalised });
 }
 
 function isJudged(line: MomentTangentLine): line is JudgedLine {

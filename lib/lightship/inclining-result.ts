@@ -1,14 +1,21 @@
 import { gmOfMove } from "@/lib/inclining/as-inclined";
 import { type Faults, inside } from "@/lib/inclining/faults";
+import type { GeneralisedShip } from "@/lib/inclining/generalised-ship";
 import type { AsInclined, SlopeSpread, StationLine } from "@/lib/inclining/inclined-ship";
 import { type InclinedShip, incliningTest } from "@/lib/inclining/inclining-test";
 import type { ShipHydrostatics } from "@/lib/inclining/ship-afloat";
 import type { IncliningTestData } from "@/lib/inclining/test-data";
 import { answer, type Result } from "@/lib/result";
-import { type Lightship, type LightshipItem, lightshipBalance, lightshipOf } from "./lightship";
+import { generalisedVcgOf, type Lightship, type LightshipItem, lightshipBalance, lightshipOf } from "./lightship";
 
 /** A test together with what separates the ship as inclined from the lightship; a test record is one of these. */
-export type LightshipTestData = IncliningTestData & { readonly items: readonly LightshipItem[] };
+export type LightshipTestData = IncliningTestData & {
+  readonly items: readonly LightshipItem[];
+  readonly settings?: { readonly method?: Method; readonly seed?: number; readonly draws?: number };
+};
+
+/** Which of the two reductions is the headline. */
+export type Method = "classical" | "generalised";
 
 /** The result of a test in the shape in which the command `reduce` prints it. */
 export type IncliningResult = {
@@ -29,7 +36,10 @@ export type IncliningResult = {
     readonly moves: readonly MoveResult[];
   };
   readonly asInclined: AsInclined;
-  readonly lightship: Lightship & { readonly headline: "classical" };
+  /** null where the hydrostatics can't give it */
+  readonly generalised: GeneralisedShip | null;
+  /** `vcg` by the classical reduction */
+  readonly lightship: Lightship & { readonly vcgGeneralised: number | null; readonly headline: Method };
 };
 
 export type StationResult = {
@@ -66,8 +76,15 @@ export function incliningResult(test: LightshipTestData): Result<IncliningResult
     hydrostatics: hydrostaticsResult(ship.value),
     fit: fitResult(ship.value, test),
     asInclined: ship.value.asInclined,
-    lightship: { ...lightshipOf(balance.value), headline: "classical" },
+    generalised: ship.value.generalised,
+    lightship: lightshipResult(lightshipOf(balance.value), ship.value, test),
   });
+}
+
+function lightshipResult(lightship: Lightship, ship: InclinedShip, { settings }: LightshipTestData): IncliningResult["lightship"] {
+  const vcgGeneralised = generalisedVcgOf(lightship, ship);
+  const isGeneralised = settings?.method === "generalised" && vcgGeneralised !== null;
+  return { ...lightship, vcgGeneralised, headline: isGeneralised ? "generalised" : "classical" };
 }
 
 function waterlineResult({ afloat: { waterline, water } }: InclinedShip): IncliningResult["waterline"] {

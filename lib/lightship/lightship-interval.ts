@@ -7,12 +7,13 @@ import { answer, type Result } from "@/lib/result";
 import { type BudgetLine, budgetOf } from "@/lib/uncertainty/budget";
 import { type LocalExpansion, localExpansion } from "@/lib/uncertainty/local-expansion";
 import type { LightshipTestData } from "./inclining-result";
-import { lightshipBalance, lightshipOf } from "./lightship";
+import { generalisedVcgOf, lightshipBalance, lightshipOf } from "./lightship";
 import { statedUncertainty } from "./stated-uncertainty";
 import { type Cause, type LineUncertainty, type TestInput, uncertainInputs } from "./uncertain-inputs";
 
-/** The numbers of a lightship that get an interval, in the order in which an expansion holds them. */
-export const numbersWithInterval = ["displacement", "vcg", "lcg"] as const;
+/** The numbers of a lightship that get an interval, in the order in which an expansion holds them; the last only where it is known. */
+export const numbersWithInterval = ["displacement", "vcg", "lcg", "vcgGeneralised"] as const;
+export type NumberWithInterval = (typeof numbersWithInterval)[number];
 
 /** A test's result with all that is uncertain in it, ready to be drawn from. */
 export type UncertainLightship = {
@@ -43,8 +44,8 @@ export function uncertainLightship(test: LightshipTestData & Stating): Result<Un
   return answer({
     expansion: {
       values: expansion.value.values,
-      linear: [...expansion.value.linear, [0, inVcg, 0]],
-      quadratic: [...expansion.value.quadratic, [0, 0, 0]],
+      linear: [...expansion.value.linear, [0, inVcg, 0, inVcg]],
+      quadratic: [...expansion.value.quadratic, [0, 0, 0, 0]],
     },
     inputs: [...inputs, { cause: "hydrostatics", standard: stated.kmt, degreesOfFreedom: null, shifted: (given) => given }],
   });
@@ -53,9 +54,12 @@ export function uncertainLightship(test: LightshipTestData & Stating): Result<Un
 /** A test that may state its uncertainties. */
 export type Stating = { readonly uncertainty?: Parameters<typeof statedUncertainty>[0] };
 
-/** What contributes how much to the lightship's KG, the largest first. */
-export function budgetOfVcg({ expansion, inputs }: UncertainLightship): readonly (BudgetLine & { readonly cause: Cause })[] {
-  return budgetOf(expansion, inputs, numbersWithInterval.indexOf("vcg")) as readonly (BudgetLine & { readonly cause: Cause })[];
+/** What contributes how much to the lightship's KG by one of the reductions, the largest first. */
+export function budgetOfVcg(
+  { expansion, inputs }: UncertainLightship,
+  number: "vcg" | "vcgGeneralised" = "vcg",
+): readonly (BudgetLine & { readonly cause: Cause })[] {
+  return budgetOf(expansion, inputs, numbersWithInterval.indexOf(number)) as readonly (BudgetLine & { readonly cause: Cause })[];
 }
 
 function reducedNumbers(test: LightshipTestData): Result<readonly number[], Faults> {
@@ -67,7 +71,9 @@ function lightshipNumbers(ship: InclinedShip, test: LightshipTestData): Result<r
   const balance = lightshipBalance(ship, test);
   if (!balance.ok) return { ok: false, refusal: { type: "Faults", faults: [balance.refusal] } };
   const lightship = lightshipOf(balance.value);
-  return answer(numbersWithInterval.map((number) => lightship[number]));
+  const { displacement, vcg, lcg } = lightship;
+  const vcgGeneralised = generalisedVcgOf(lightship, ship);
+  return answer([displacement, vcg, lcg, ...(vcgGeneralised === null ? [] : [vcgGeneralised])]);
 }
 
 /**

@@ -66,6 +66,17 @@ export function lightshipOf({ lightship }: LightshipBalance): Lightship {
   return { displacement: mass, ...centre };
 }
 
+/**
+ * The lightship's KG by the generalised reduction: everything else in the balance stays as it is,
+ *
+ *     KG = KG_classical + (KG_generalised − KG_classical, both as inclined)·Δ/Δ_lightship
+ *
+ * Null where the ship has no generalised KG. Source: moments about the baseline, definition.
+ */
+export function generalisedVcgOf({ displacement, vcg }: Lightship, { asInclined, generalised }: InclinedShip): number | null {
+  return generalised === null ? null : vcg + ((generalised.vcg - asInclined.vcg) * asInclined.displacement) / displacement;
+}
+
 function momentsAsInclined({ displacement, lcg, tcg, vcg }: AsInclined): Moments {
   return momentsOf({ mass: displacement, x: lcg, y: tcg, z: vcg });
 }

@@ -70,10 +70,13 @@ function inclinedLines({ asInclined, fit }: IncliningResult): readonly string[] 
 }
 
 function lightshipLines({ lightship }: ResultDocument): readonly string[] {
-  const { displacement, vcg, lcg } = lightship.interval95;
+  const { displacement, vcg, lcg, vcgGeneralised } = lightship.interval95;
   return section(`Lightship, ${lightship.headline} method, with its 95 % interval`, [
     within("Displacement", lightship.displacement, displacement, "t"),
-    within("VCG", lightship.vcg, vcg, "m"),
+    within("VCG, classical", lightship.vcg, vcg, "m"),
+    ...(vcgGeneralised && lightship.vcgGeneralised !== null
+      ? [within("VCG, generalised", lightship.vcgGeneralised, vcgGeneralised, "m")]
+      : []),
     within("LCG", lightship.lcg, lcg, "m"),
     ["TCG to starboard", signedFigure(lightship.tcg, 3), "m"],
   ]);

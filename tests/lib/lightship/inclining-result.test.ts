@@ -12,7 +12,7 @@ const result = promised(incliningResult(record));
 describe("result of a test", () => {
   it("is taken from a record as it is", () => {
     expectTypeOf<TestRecord>().toExtend<LightshipTestData>();
-    expect(Object.keys(result)).toEqual(["waterline", "hydrostatics", "fit", "asInclined", "lightship"]);
+    expect(Object.keys(result)).toEqual(["waterline", "hydrostatics", "fit", "asInclined", "generalised", "lightship"]);
   });
 
   it("has every station with its residuals by move, and every move", () => {

@@ -1,0 +1,70 @@
+import type { BuoyancyArm } from "@/lib/hydrostatics/buoyancy-arm";
+import { mean, sum } from "@/lib/numerics/sum";
+import { answer, type Result, refuse } from "@/lib/result";
+
+/** A tangent observed by one series at one move, and the moment that acted then. */
+export type Observed = { readonly moment: number; readonly tan: number };
+
+/** The ship does not come back from the heel of a move: KG lies above the metacentre there. */
+export type NoRestAtMove = { readonly type: "NoRestAtMove"; readonly moment: number; readonly vcg: number };
+
+type Ship = { readonly arm: BuoyancyArm; readonly displacement: number; readonly tanHeelAtZero: number };
+
+/**
+ * The fluid KG with which the hull's own equilibrium gives the observed tangents, by least squares, one intercept for each
+ * series. The heel c under a moment M, c₀ at zero moment by the marks:
+ *
+ *     f(c) − f(c₀) − KG·(c − c₀) = M/Δ,   f(c) = y_B + c·z_B
+ *     minimise Σ (tⱼₖ − aⱼ − cₖ)²  over KG and the intercepts aⱼ
+ *
+ * Any form of hull, any heel inside the range of the arm. Gauss–Newton from the classical KG.
+ * Refused: a move at which the ship would find no rest.
+ * Source: R. Dunworth, Back against the wall, and: The pursuit of better inclining, STAB 2014 and 2015 *from memory*, rederived
+ * from G on the line of buoyancy.
+ */
+export function generalisedVcg(ship: Ship, series: readonly (readonly Observed[])[], classicalVcg: number): Result<number, NoRestAtMove> {
+  let vcg = classicalVcg;
+  for (let step = 0; step < 12; step++) {
+    let [byGradient, byGradients] = [0, 0];
+    for (const observed of series) {
+      const rests = observed.map(({ moment }) => restUnder(ship, moment, vcg));
+      const failed = rests.indexOf(null);
+      if (failed >= 0) return refuse({ type: "NoRestAtMove", moment: observed[failed]?.moment ?? 0, vcg });
+      const left = centred(observed.map(({ tan }, k) => tan - (rests[k]?.tanHeel ?? 0)));
+      const gradient = centred(rests.map((rest) => rest?.perVcg ?? 0));
+      byGradient += sum(left.map((value, k) => value * (gradient[k] ?? 0)));
+      byGradients += sum(gradient.map((value) => value ** 2));
+    }
+    const change = byGradient / byGradients;
+    vcg += change;
+    if (Math.abs(change) < 1e-10) break;
+  }
+  return answer(vcg);
+}
+
+/** The heel at which the ship rests without a moment athwartships but that of her own TCG. */
+export function heelAtRest(arm: BuoyancyArm, vcg: number, tcg: number, near: number): number | null {
+  let tanHeel = near;
+  for (let step = 0; step < 30; step++) {
+    const at = arm.at(tanHeel);
+    const stiffness = at.slope - vcg;
+    if (!(stiffness > 0)) return null;
+    const change = (tcg - at.arm + vcg * tanHeel) / stiffness;
+    tanHeel += change;
+    if (Math.abs(change) < 1e-14) break;
+  }
+  return tanHeel;
+}
+
+/** Heel under a moment, and how it grows with KG; null where there is no rest. */
+function restUnder({ arm, displacement, tanHeelAtZero }: Ship, moment: number, vcg: number) {
+  const tcg = arm.at(tanHeelAtZero).arm - vcg * tanHeelAtZero;
+  const tanHeel = heelAtRest(arm, vcg, tcg + moment / displacement, tanHeelAtZero);
+  if (tanHeel === null) return null;
+  return { tanHeel, perVcg: (tanHeel - tanHeelAtZero) / (arm.at(tanHeel).slope - vcg) };
+}
+
+function centred(values: readonly number[]): number[] {
+  const centre = mean(values);
+  return values.map((value) => value - centre);
+}
