@@ -1,8 +1,9 @@
 import type { MethodDifference } from "@/lib/lightship/method-difference";
 import { figure, signedFigure } from "./rounding";
 
-/** Half a millimetre is below what any test can show. */
+/** Half a millimetre is below what any test can show; from three on an edge in the water is felt. */
 const nothing = 0.0005;
+const felt = 0.003;
 
 /** Why the generalised KG differs from the classical one, in sentences. */
 export function methodSentences({ found, byWallSides, edges }: MethodDifference): readonly string[] {
@@ -10,13 +11,13 @@ export function methodSentences({ found, byWallSides, edges }: MethodDifference)
   const rest = found - byWallSides;
   const told = `Generalised less classical, as inclined: ${millimetres(found)}. Upright sides alone explain ${millimetres(byWallSides)}: a straight line through a curve that steepens with heel shows too much GM.`;
   const isExplained = Math.abs(rest) < Math.max(nothing, 0.3 * Math.abs(byWallSides));
-  if (edges.length > 0) return [told, `${edgeWords(edges)}${isExplained ? notFelt : felt}`];
+  if (edges.length > 0) return [told, `${edgeWords(edges)}${Math.abs(rest) < felt ? isNotFelt : isFelt}`];
   if (isExplained) return [told];
   return [told, `The other ${millimetres(rest)} come from sides that are not upright at the waterline.`];
 }
 
-const felt = ": the classical line is not valid there; trust the generalised result.";
-const notFelt = ", too short a stretch of it for the line to show.";
+const isFelt = ": the classical line is not valid there; trust the generalised result.";
+const isNotFelt = ", too short a stretch of it for the line to show.";
 
 function edgeWords(edges: MethodDifference["edges"]): string {
   const first = edges.reduce((least, edge) => (Math.abs(edge.tanHeel) < Math.abs(least.tanHeel) ? edge : least));
