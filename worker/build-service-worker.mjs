@@ -12,7 +12,7 @@ const md5 = (b) => createHash("md5").update(b).digest("hex");
 const { manifestEntries, warnings, count, size } = await getManifest({
   globDirectory: process.cwd(),
   globPatterns: [`${dist}/static/**/*.{js,css,woff2,svg,png,webp,avif,ico,json,wasm}`, "public/**/*"],
-  globIgnores: ["public/service-worker.js", "public/pictures/**", "**/*.map"],
+  globIgnores: ["public/service-worker.js", "public/pictures/**", "public/schema/**", "**/*.map"],
   dontCacheBustURLsMatching: new RegExp(`^${dist.replaceAll(".", "\\.")}/static/`),
   maximumFileSizeToCacheInBytes: 4 * 1024 * 1024,
   manifestTransforms: [
