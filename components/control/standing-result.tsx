@@ -15,11 +15,11 @@ type StandingResultProps = {
 
 /** GM and KG as they stand, how much they rest on, and what is missing: always preliminary. */
 export function StandingResult({ so, moves, unmeasured }: StandingResultProps) {
-  const { asInclined, line } = so;
+  const { asInclined, gmFluid, line } = so;
   return (
     <Panel title="As it stands" aside={<strong className="text-redlead-text">Preliminary, not for loading or sailing</strong>}>
       <div className="grid grid-cols-2 gap-4">
-        <Headline name="GM fluid" value={asInclined?.gmFluid ?? null} relative={line} of={asInclined?.gmFluid ?? 0} />
+        <Headline name="GM fluid" value={gmFluid} relative={line} of={gmFluid ?? 0} />
         <Headline name="KG, as inclined" value={asInclined?.vcg ?? null} relative={line} of={asInclined?.gmFluid ?? 0} />
       </div>
       <p className="mt-3 mb-2">

@@ -1,5 +1,5 @@
-import type { Refusal } from "@/lib/result";
-import { asInclined } from "./as-inclined";
+import type { Refusal, Result } from "@/lib/result";
+import { asInclined, gmFluidAt } from "./as-inclined";
 import { faultsOf } from "./faults";
 import type { AsInclined, MomentTangentLine } from "./inclined-ship";
 import { type Liquid, liquidsAboard } from "./liquids";
@@ -16,6 +16,8 @@ export type TestSoFar = {
   readonly line: MomentTangentLine | null;
   /** preliminary: as soon as drafts, water, soundings and two moves have been read */
   readonly asInclined: AsInclined | null;
+  /** as soon as drafts, water and two moves have been read: no tank need be sounded for it [m] */
+  readonly gmFluid: number | null;
   /** what keeps the rest from being known, as the reduction would refuse it */
   readonly missing: readonly Refusal[];
 };
@@ -34,6 +36,13 @@ export function testSoFar(test: IncliningTestData): TestSoFar {
     liquids: liquids.ok ? liquids.value : null,
     line: line.ok ? line.value : null,
     asInclined: ship?.ok ? ship.value : null,
+    gmFluid: ship?.ok ? ship.value.gmFluid : gmWithoutTanks(afloat, line),
     missing: faultsOf(afloat, liquids, line, ...(ship === null ? [] : [ship])),
   };
+}
+
+function gmWithoutTanks(afloat: Result<ShipAfloat>, line: Result<MomentTangentLine>): number | null {
+  if (!afloat.ok || !line.ok) return null;
+  const gm = gmFluidAt(afloat.value.hydrostatics.displacement, line.value);
+  return gm.ok ? gm.value : null;
 }

@@ -19,6 +19,23 @@ describe("an inclining test that still runs", () => {
     expect(sofar.missing.map(({ type }) => type)).toEqual(["TooFewMarks", "NoWaterSamples"]);
   });
 
+  it("knows GM while a tank is due, and KG only once it is sounded", () => {
+    const test = sampleTest();
+    const tank = {
+      id: "FO",
+      density: 0.86,
+      measure: "sounding" as const,
+      table: [
+        { level: 0, volume: 0, lcg: 20, tcg: 0, vcg: 0, inertia: 0 },
+        { level: 2, volume: 20, lcg: 20, tcg: 0, vcg: 1, inertia: 0 },
+      ],
+    };
+    const sofar = testSoFar({ ...test, tanks: [tank], readings: { ...test.readings, soundings: [] } });
+    expect(sofar.asInclined).toBeNull();
+    expect(sofar.gmFluid).toBeCloseTo(5000 / 1440, 9);
+    expect(sofar.missing.map(({ type }) => type)).toEqual(["NoSounding"]);
+  });
+
   it("keeps the ship afloat while battens are due", () => {
     const test = sampleTest();
     const sofar = testSoFar({ ...test, readings: { ...test.readings, battens: [] } });
