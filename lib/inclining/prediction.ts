@@ -28,6 +28,7 @@ export type PredictedMove = {
   readonly deflectionsMm: Readonly<Record<string, number | null>>;
 };
 
+export type NoOffsets = { readonly type: "NoOffsets"; readonly path: string };
 export type NoRestExpected = { readonly type: "NoRestExpected"; readonly move: number; readonly vcg: number };
 
 type Planned = Pick<IncliningTestData, "vessel" | "hydrostatics" | "weights" | "moves" | "stations">;
@@ -44,7 +45,7 @@ export function predictedMoves(plan: Planned, ship: ExpectedShip): Result<readon
   const { hydrostatics, vessel } = plan;
   const zero = plan.moves.find(({ no }) => no === 0);
   if (!zero) return refuse({ type: "NoReferenceMove", path: "moves" } satisfies NoReferenceMove);
-  if (hydrostatics.kind !== "offsets") return refuse({ type: "NoOffsets", path: "hydrostatics" });
+  if (hydrostatics.kind !== "offsets") return refuse({ type: "NoOffsets", path: "hydrostatics" } satisfies NoOffsets);
   const hull = hullFromOffsets(hydrostatics);
   if (!hull.ok) return hull;
   const rest = equilibrium(hull.value, ship, { lbp: vessel.lbp, density: ship.density });

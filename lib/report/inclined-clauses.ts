@@ -22,6 +22,8 @@ export const inclinedClauses: Clauses<InclinedRefusal> = {
   NoBallastSounding: ({ tank, move }) => `the ballast in tank ${tank} was not sounded at move ${move}`,
   TermsMissing: ({ wanted, missing }) => `the ${words[wanted]} needs the ${missing.map((term) => words[term]).join(" and the ")}`,
   TermIsZero: ({ wanted, zero }) => `the ${words[wanted]} can't be found with ${zero.map((term) => words[term]).join(" and ")} of 0`,
+  NoOffsets: () => "the offsets of the hull are needed, a table is given",
+  NoRestExpected: ({ move, vcg }) => `with a VCG of ${shortFigure(vcg)} m the ship would find no rest at move ${move}`,
   NothingLeft: ({ mass }) => `nothing is left of the ship after all deductions: ${shortFigure(mass)} t`,
 };
 

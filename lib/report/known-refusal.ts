@@ -11,6 +11,7 @@ import type { NoSpreadInMoment } from "@/lib/inclining/common-slope";
 import type { TooFewMoves } from "@/lib/inclining/inclining-test";
 import type { ZeroLength } from "@/lib/inclining/instrument";
 import type { NoBallastSounding, NoSounding } from "@/lib/inclining/liquids";
+import type { NoOffsets, NoRestExpected } from "@/lib/inclining/prediction";
 import type { WrongKindOfValue } from "@/lib/inclining/reading-shown";
 import type { NoMarks, TooFewTurningPoints } from "@/lib/inclining/resting-point";
 import type { NoPosition, NoReferenceMove } from "@/lib/inclining/shift-moments";
@@ -45,6 +46,8 @@ export type InclinedRefusal =
   | NoBallastSounding
   | TermsMissing
   | TermIsZero
+  | NoOffsets
+  | NoRestExpected
   | NothingLeft;
 
 export type KnownRefusal = NumericsRefusal | FloatingRefusal | InclinedRefusal | RecordFault;

@@ -59,6 +59,8 @@ const everyRefusal: { readonly [Type in KnownRefusal["type"]]: Extract<KnownRefu
   NoBallastSounding: { type: "NoBallastSounding", tank: "BW", move: 2 },
   TermsMissing: { type: "TermsMissing", wanted: "gmFluid", missing: ["weight", "distance"] },
   TermIsZero: { type: "TermIsZero", wanted: "gmFluid", zero: ["deflection"] },
+  NoOffsets: { type: "NoOffsets", path: "hydrostatics" },
+  NoRestExpected: { type: "NoRestExpected", move: 2, vcg: 6.4 },
   NothingLeft: { type: "NothingLeft", mass: -3 },
   NotJson: { type: "NotJson", reason: "unexpected end", path: "record" },
   NotAsNeeded: { type: "NotAsNeeded", needed: "a number", given: "null", path: "vessel.lbp" },
