@@ -43,6 +43,8 @@ function fitLines({ fit }: IncliningResult): readonly string[] {
     ["Slope per 1 000 000 t·m", figure(fit.slope * 1e6, decimals), ""],
     ["Half width at 95 %", figure(fit.halfWidth95 * 100, 2), "% of the slope"],
     ["Degrees of freedom", figure(fit.degreesOfFreedom, 0), ""],
+    ["Scatter between moves", figure(fit.betweenMoves * 1000, 2), "mm per m"],
+    ["Scatter of stations within a move", fit.withinMoves === null ? "–" : figure(fit.withinMoves * 1000, 2), "mm per m"],
     ...fit.stations.flatMap(({ id, series, slope }): Row[] =>
       slope === null ? [] : [[`Station ${id}, series ${series}, by itself`, figure(slope * 1e6, decimals), ""]],
     ),

@@ -16,6 +16,7 @@ it("prints what a person looks for, each figure with its unit", () => {
   expect(page[lightship + 1]).toMatch(/^ {2}Displacement +1318\.\d\d t {3}131\d\.\d\d to 132\d\.\d\d$/);
   expect(page[lightship + 2]).toMatch(/^ {2}VCG, classical +5\.71\d\d m {3}5\.70\d\d to 5\.71\d\d$/);
   expect(page[lightship + 5]).toMatch(/^ {2}TCG to starboard +−0\.021 m$/);
+  expect(page.filter((line) => /^ {2}Scatter (between moves|of stations within a move) +0\.\d\d mm per m$/.test(line))).toHaveLength(2);
   expect(page).toContain("What leaves VCG open");
   expect(page).toContain("  Heel to each side                           met  2.43° to port, 2.44° to starboard; 1° to 4° each side");
   expect(page).toContain("  Headcount through the moves           attention  not noted; unchanged");
