@@ -1,3 +1,4 @@
+import type { IncliningResult } from "@/lib/lightship/inclining-result";
 import type { TestRecord } from "@/lib/record/test-record";
 
 type Batten = TestRecord["readings"]["battens"][number];
@@ -38,6 +39,19 @@ export function heavierBy(record: TestRecord, factor: number): TestRecord {
 export function zeroShifted(record: TestRecord, station: string, mm: number): TestRecord {
   const battens = record.readings.battens.map((reading) => (reading.station === station ? shiftedBatten(reading, mm) : reading));
   return { ...record, readings: { ...record.readings, battens } };
+}
+
+/** The same test with one pendulum more, whose bob hangs on the line that the others gave. */
+export function withAgreeingStation(record: TestRecord, { slope, moves }: IncliningResult["fit"], length: number): TestRecord {
+  const battens = moves.map(({ no, moment }): Batten => {
+    const valuesMm = [40 + 1000 * length * slope * moment];
+    return { id: `00000000-0000-4000-8000-00000000000${no}`, move: no, station: "Z", mode: "settled", valuesMm };
+  });
+  return {
+    ...record,
+    stations: [...record.stations, { id: "Z", instrument: "pendulum", length }],
+    readings: { ...record.readings, battens: [...record.readings.battens, ...battens] },
+  };
 }
 
 function across<T extends { y: number }>(place: T): T {

@@ -4,7 +4,7 @@ import { skerryTern, skerryTernReadings } from "@/db/seed/skerry-tern";
 import { type IncliningResult, incliningResult, type LightshipTestData } from "@/lib/lightship/inclining-result";
 import type { TestRecord } from "@/lib/record/test-record";
 import { promised } from "@/lib/result";
-import { heavierBy, mirrored, zeroShifted } from "./changed-records";
+import { heavierBy, mirrored, withAgreeingStation, zeroShifted } from "./changed-records";
 
 const record: TestRecord = { ...skerryTern().record, readings: skerryTernReadings(7) };
 const result = promised(incliningResult(record));
@@ -82,6 +82,23 @@ describe("result of a test", () => {
     );
   });
 
+  it("does not change with a pendulum more that shows what the line of the others says", () => {
+    fc.assert(
+      fc.property(fc.double({ min: 2, max: 8, noNaN: true }), (length) => {
+        const other = promised(incliningResult(withAgreeingStation(record, result.fit, length)));
+        expect(other.fit.stations).toHaveLength(result.fit.stations.length + 1);
+        expect(other.fit.slope / result.fit.slope).toBeCloseTo(1, 10);
+        expectSame(classical(other), classical(result), 1e-9);
+        // the hull's own curve is not straight: a bob on the straight line agrees with it to a few micrometres of VCG
+        expect(Math.abs((other.lightship.vcgGeneralised ?? Number.NaN) - (result.lightship.vcgGeneralised ?? Number.NaN))).toBeLessThan(
+          5e-6,
+        );
+        expectSame(other.waterline, result.waterline, 1e-12);
+      }),
+      { numRuns: 10 },
+    );
+  });
+
   it("refuses items that outweigh the ship, at their place", () => {
     const items = [{ action: "deduct" as const, label: "a mistyped mass", mass: 9000, x: 0, y: 0, z: 0 }];
     expect(incliningResult({ ...record, items })).toMatchObject({
@@ -93,6 +110,10 @@ describe("result of a test", () => {
 
 function shuffle<T>(list: readonly T[]) {
   return fc.shuffledSubarray([...list], { minLength: list.length });
+}
+
+function classical({ lightship: { displacement, vcg, lcg, tcg } }: IncliningResult) {
+  return { displacement, vcg, lcg, tcg };
 }
 
 function uprightPart({ lightship, hydrostatics, waterline, fit }: IncliningResult) {
