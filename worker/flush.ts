@@ -85,7 +85,8 @@ async function takenIn(device: string, batch: readonly HeldEvent[], heard: Heard
 async function changesByComparison(device: string, changes: readonly StateChange[], answer: SyncAnswer): Promise<StateChange[]> {
   const answered = new Set(changes.map(({ id }) => id));
   const others = (await eventsOfDevice(device)).filter(({ id }) => !answered.has(id));
-  return afterComparison(others, answer.device);
+  const known = (await deviceIdentity())?.server;
+  return afterComparison(others, answer.device, known !== undefined && known !== null && known.epoch !== answer.server.epoch);
 }
 
 async function paused(batch: readonly HeldEvent[]): Promise<Reach> {

@@ -7,7 +7,7 @@ import type { Envelope } from "@/lib/sync/protocol";
 import type { Database } from "./connection";
 import { type Device, deviceById, isHolder } from "./devices";
 import { duePlan } from "./due-plan";
-import { eventById, isIdTaken, isSeqTaken } from "./event-store";
+import { eventById, genuineEventById, isIdTaken, isSeqTaken } from "./event-store";
 import { isRoleHeldAt, rolesOf } from "./role-grants";
 import { isPlaced, slotOfEvent } from "./slot-standing";
 
@@ -61,7 +61,7 @@ export function isSignatureGood(device: Pick<Device, "publicKey"> | undefined, e
 function baseFacts(db: Database, event: EventBody): AdmissionFacts["base"] {
   const none = { isQuarantined: false, author: null, slot: null };
   const basis = event.base === null ? null : basisOf(event);
-  const base = basis === null ? undefined : eventById(db, basis);
+  const base = basis === null ? undefined : genuineEventById(db, basis);
   if (basis === null || !base) return none;
   const isQuarantined = !isPlaced(db, basis);
   return { isQuarantined, author: authorOf(base.body), slot: isQuarantined ? null : slotOfEvent(db, event) };

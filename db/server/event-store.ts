@@ -41,8 +41,22 @@ function isGenuine() {
   return or(isNull(events.code), notInArray(events.code, ["bad-signature", "unknown-device", "malformed-body"]));
 }
 
-/** An event by its id; of several with one id (all but the first are set aside) the last. */
+/** An event by its id; of several with one id (all but the first are set aside) the last. What only bears its name is none. */
 export function eventById(db: Database, id: string): StoredEvent | undefined {
+  return genuineEventById(db, id) ?? bearingName(db, id);
+}
+
+/** A genuine event by its id; undefined where there are only broken or unproved copies of it. */
+export function genuineEventById(db: Database, id: string): StoredEvent | undefined {
+  return db
+    .select()
+    .from(events)
+    .where(and(eq(events.id, id), isGenuine()))
+    .orderBy(desc(events.serverSeq))
+    .get();
+}
+
+function bearingName(db: Database, id: string): StoredEvent | undefined {
   return db.select().from(events).where(eq(events.id, id)).orderBy(desc(events.serverSeq)).get();
 }
 
@@ -51,9 +65,14 @@ export function eventsOn(db: Database, basis: string): StoredEvent[] {
   return db.select().from(events).where(eq(events.basis, basis)).orderBy(asc(events.serverSeq)).all();
 }
 
-/** What has arrived from a device: its highest number, and the numbers below it that have not. */
+/** What has arrived from a device: its highest number, and the numbers below it that have not. A broken copy has not arrived. */
 export function receivedFrom(db: Database, device: string): SyncAnswer["device"] & { received: number } {
-  const rows = db.selectDistinct({ seq: events.seq }).from(events).where(eq(events.device, device)).orderBy(asc(events.seq)).all();
+  const rows = db
+    .selectDistinct({ seq: events.seq })
+    .from(events)
+    .where(and(eq(events.device, device), isGenuine()))
+    .orderBy(asc(events.seq))
+    .all();
   const seen = new Set(rows.flatMap(({ seq }) => (seq === null ? [] : [seq])));
   const highestSeq = Math.max(0, ...seen);
   const missing = Array.from({ length: highestSeq }, (_, i) => i + 1).filter((seq) => !seen.has(seq));

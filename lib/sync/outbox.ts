@@ -57,12 +57,14 @@ export function afterAnswer(batch: readonly QueuedEvent[], answer: SyncAnswer): 
 
 /**
  * What must be sent again: everything this phone holds that the server lists as missing or that lies above its highest
- * number. After a restore from an older backup (a new epoch) that is what the server lost.
+ * number. After a restore from an older backup (a new epoch) that is what the server lost; while the epoch is the same, what
+ * it has set aside is settled, or it would come back for ever.
  */
-export function afterComparison(events: readonly QueuedEvent[], known: SyncAnswer["device"]): StateChange[] {
+export function afterComparison(events: readonly QueuedEvent[], known: SyncAnswer["device"], isNewEpoch: boolean): StateChange[] {
   const missing = new Set(known.missing);
   return events
-    .filter((event) => !isUnsent(event) && (missing.has(event.seq) || event.seq > known.highestSeq))
+    .filter((event) => !isUnsent(event) && (isNewEpoch || event.state !== "quarantined"))
+    .filter(({ seq }) => missing.has(seq) || seq > known.highestSeq)
     .map(({ id }) => ({ id, state: "saved", receipt: null }));
 }
 

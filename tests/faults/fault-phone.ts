@@ -10,6 +10,7 @@ export type Line = (text: string) => Promise<Heard>;
 /** The queue of a phone as a plain object, under the rules that page and worker share. What it holds is on its disk. */
 export class FaultPhone {
   private held: (QueuedEvent & { receipt: Receipt | null })[] = [];
+  private epoch: string | null = null;
   /** everything that the server has answered for at some time */
   readonly acknowledged = new Set<string>();
 
@@ -42,8 +43,10 @@ export class FaultPhone {
       afterComparison(
         this.held.filter(({ id }) => !answered.has(id)),
         heard.device,
+        this.epoch !== null && this.epoch !== heard.server.epoch,
       ),
     );
+    this.epoch = heard.server.epoch;
     for (const { id, state } of this.held) if (state === "on-server") this.acknowledged.add(id);
   }
 

@@ -133,13 +133,19 @@ describe("after silence", () => {
 describe("after the server has told what it holds", () => {
   it("what it lists as missing or has never come to is sent again, whatever it once was", () => {
     const queue = [held(1, "confirmed"), held(2, "on-server"), held(3, "quarantined"), held(4, "confirmed"), held(5, "on-server")];
-    expect(afterComparison(queue, { highestSeq: 3, missing: [2, 3] })).toEqual([saved(2), saved(3), saved(4), saved(5)]);
-    expect(afterComparison(queue, { highestSeq: 0, missing: [] })).toHaveLength(5);
+    expect(afterComparison(queue, { highestSeq: 3, missing: [2, 3] }, true)).toEqual([saved(2), saved(3), saved(4), saved(5)]);
+    expect(afterComparison(queue, { highestSeq: 0, missing: [] }, true)).toHaveLength(5);
+  });
+
+  it("what it has set aside is sent again only to a server that was restored", () => {
+    const queue = [held(1, "on-server"), held(2, "quarantined")];
+    expect(afterComparison(queue, { highestSeq: 0, missing: [] }, false)).toEqual([saved(1)]);
+    expect(afterComparison(queue, { highestSeq: 0, missing: [] }, true)).toEqual([saved(1), saved(2)]);
   });
 
   it("nothing is sent again that it has, and nothing that was not sent yet", () => {
     const queue = [held(1, "on-server"), held(2, "saved"), held(3, "sending")];
-    expect(afterComparison(queue, { highestSeq: 1, missing: [] })).toEqual([]);
+    expect(afterComparison(queue, { highestSeq: 1, missing: [] }, true)).toEqual([]);
   });
 
   it("for any loss, what it still has and what it is sent again are all that it had", () => {
@@ -148,7 +154,7 @@ describe("after the server has told what it holds", () => {
         const queue = numbers(1, 30).map((seq) => held(seq, "on-server"));
         const highestSeq = Math.max(0, ...kept);
         const missing = numbers(1, highestSeq).filter((seq) => !kept.includes(seq));
-        const again = afterComparison(queue, { highestSeq, missing }).map(({ id }) => Number(id.slice(-12)));
+        const again = afterComparison(queue, { highestSeq, missing }, true).map(({ id }) => Number(id.slice(-12)));
         expect([...kept, ...again].sort((a, b) => a - b)).toEqual(numbers(1, 30));
       }),
     );
