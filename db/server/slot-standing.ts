@@ -30,6 +30,11 @@ export function isPlaced(db: Database, event: string): boolean {
   return db.select().from(placedEvents).where(eq(placedEvents.event, event)).get() !== undefined;
 }
 
+/** Whether it is this copy of an event that takes part, of several that bear its id. */
+export function isPlacedCopy(db: Database, event: string, serverSeq: number): boolean {
+  return db.select().from(placedEvents).where(eq(placedEvents.event, event)).get()?.serverSeq === serverSeq;
+}
+
 /** The slot in which an act belongs: that of the act it stands on, else its own. */
 export function slotOfEvent(db: Database, body: EventBody): Slot | null {
   const basis = basisOf(body);
@@ -52,22 +57,29 @@ export function displaceEvent(db: Database, event: string): void {
 
 /** Works out what stands in a slot and writes it over what stood there. An arriving event need not be in the file yet. */
 export function standing(db: Database, test: string, slot: Slot, arriving?: Arriving): SlotProjection {
-  const projection = slotProjection(slot.kind, eventsOfSlot(db, test, slot, arriving), slotRules(db, test));
+  const acts = eventsOfSlot(db, test, slot, arriving);
+  const projection = slotProjection(slot.kind, acts, slotRules(db, test));
   const place = { test, slotKey: slotKey(slot) };
-  const row = { ...place, slot, state: projection.state, heads: projection.heads };
-  db.insert(slots)
-    .values(row)
-    .onConflictDoUpdate({ target: [slots.test, slots.slotKey], set: row })
-    .run();
-  db.delete(readings)
-    .where(and(eq(readings.test, test), eq(readings.slotKey, place.slotKey)))
-    .run();
+  forget(db, place);
+  // where no act is left, nothing is written: a rebuild would not find the slot either
+  if (acts.length > 0)
+    db.insert(slots)
+      .values({ ...place, slot, state: projection.state, heads: projection.heads })
+      .run();
   if (projection.readings.length > 0) {
     db.insert(readings)
       .values(projection.readings.map((reading) => ({ ...reading, ...place })))
       .run();
   }
   return projection;
+}
+
+function forget(db: Database, { test, slotKey }: { readonly test: string; readonly slotKey: string }): void {
+  for (const table of [slots, readings]) {
+    db.delete(table)
+      .where(and(eq(table.test, test), eq(table.slotKey, slotKey)))
+      .run();
+  }
 }
 
 function placeOf(db: Database, event: string): { test: string; slotKey: string; slot: Slot } | undefined {

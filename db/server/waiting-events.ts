@@ -7,7 +7,7 @@ import { mayStandOnBase } from "./admission-facts";
 import type { Database } from "./connection";
 import { duePlan } from "./due-plan";
 import { eventById, eventsOn, type StoredEvent } from "./event-store";
-import { displaceEvent, isPlaced, placeEvent, slotOfEvent } from "./slot-standing";
+import { displaceEvent, isPlaced, isPlacedCopy, placeEvent, slotOfEvent } from "./slot-standing";
 
 /** Set aside only because of what it stands on: it follows when that is let in. */
 const followsItsBase: readonly (QuarantineCode | null)[] = ["base-quarantined", "unknown-slot"];
@@ -63,9 +63,10 @@ function placeFollowers(db: Database, basis: string, seen: Set<string>): void {
   }
 }
 
-function mayFollow(db: Database, { id, outcome, code }: StoredEvent): boolean {
+/** A broken copy bears the name of an event that is placed, and must not take its place. */
+function mayFollow(db: Database, { id, outcome, code, serverSeq }: StoredEvent): boolean {
   if (id === null) return false;
-  return outcome !== "quarantined" || isPlaced(db, id) || followsItsBase.includes(code);
+  return outcome !== "quarantined" || followsItsBase.includes(code) || isPlacedCopy(db, id, serverSeq);
 }
 
 function bodyOf({ body }: StoredEvent): EventBody | null {
