@@ -32,6 +32,11 @@ export function testById(db: Database, id: string): Test | undefined {
   return db.select().from(tests).where(eq(tests.id, id)).get();
 }
 
+/** Every test on this server, whoever has a part in it; the oldest first. */
+export function everyTest(db: Database): Test[] {
+  return db.select().from(tests).orderBy(tests.createdAt, tests.id).all();
+}
+
 /** The tests in which a person holds a role, the latest first. */
 export function testsOf(db: Database, account: string, at: string): TestListed[] {
   const rows = db.select().from(tests).orderBy(desc(tests.date), desc(tests.createdAt)).all();

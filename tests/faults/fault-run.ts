@@ -1,4 +1,4 @@
-import { rebuildProjection } from "@/db/server/rebuild-projection";
+import { projectionOf, rebuildProjection } from "@/db/server/rebuild-projection";
 import { isLedgerKept, verifiedLedger } from "@/db/server/verify-ledger";
 import { type Noise, seededNoise } from "@/lib/numerics/seeded-noise";
 import { FaultCrew } from "./fault-crew";
@@ -59,7 +59,7 @@ function counted(server: FaultServer, crew: FaultCrew): Omit<FaultCount, "faults
     taking.set(id, (taking.get(id) ?? 0) + 1);
   }
   const ids = crew.phones.flatMap(({ events }) => events.map(({ id }) => id));
-  const before = projection(server);
+  const before = projectionOf(db, crew.test);
   rebuildProjection(db, crew.test);
   return {
     events: ids.length,
@@ -67,11 +67,6 @@ function counted(server: FaultServer, crew: FaultCrew): Omit<FaultCount, "faults
     doubled: [...taking.values()].filter((count) => count > 1).length + (new Set(ids).size - ids.length),
     setAside: crew.phones.flatMap(({ events }) => events.filter(({ state }) => state === "quarantined")).length,
     unverified: isLedgerKept(verifiedLedger(db)) ? 0 : 1,
-    projectionOff: projection(server) === before ? 0 : 1,
+    projectionOff: JSON.stringify(projectionOf(db, crew.test)) === JSON.stringify(before) ? 0 : 1,
   };
-}
-
-function projection({ db }: FaultServer): string {
-  const rows = ["placed_events", "slots", "readings"].map((table) => db.$client.prepare(`select * from ${table} order by 1, 2`).all());
-  return JSON.stringify(rows);
 }
