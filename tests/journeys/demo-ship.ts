@@ -7,8 +7,8 @@ export type Account = { readonly email: string; readonly password: string };
 /** A running server with the demo aboard, and the accounts that `npm run demo` tells a person. */
 export type DemoShip = { readonly server: ProductServer; readonly accounts: ReadonlyMap<string, Account> };
 
-export async function demoShip(): Promise<DemoShip> {
-  const server = await ProductServer.make();
+export async function demoShip(url?: string): Promise<DemoShip> {
+  const server = await ProductServer.make(url);
   const printed = await server.command("db/server/commands/demo.ts");
   await server.start();
   return { server, accounts: accountsIn(printed) };

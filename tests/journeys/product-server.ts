@@ -15,18 +15,17 @@ export class ProductServer {
   private constructor(
     readonly port: number,
     readonly dataFolder: string,
+    readonly url: string,
   ) {}
 
   private child: ChildProcess | null = null;
   private output = "";
 
-  /** A server that is not started yet, on an empty data folder. */
-  static async make(): Promise<ProductServer> {
-    return new ProductServer(await freePort(), await mkdtemp(path.join(tmpdir(), "battenbook-data-")));
-  }
-
-  get url(): string {
-    return `http://localhost:${this.port}`;
+  /** A server that is not started yet, on an empty data folder; people reach it at its own port, or by what stands before it. */
+  static async make(url?: string): Promise<ProductServer> {
+    const port = await freePort();
+    const folder = await mkdtemp(path.join(tmpdir(), "battenbook-data-"));
+    return new ProductServer(port, folder, url ?? `http://localhost:${port}`);
   }
 
   /** What the server has written on its way. */
@@ -95,7 +94,7 @@ export class ProductServer {
   }
 
   private answers(): Promise<boolean> {
-    return fetch(`${this.url}/manifest.webmanifest`).then(
+    return fetch(`http://localhost:${this.port}/manifest.webmanifest`).then(
       (response) => response.ok,
       () => false,
     );

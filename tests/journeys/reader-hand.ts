@@ -19,6 +19,8 @@ export class ReaderHand {
     const query = new URLSearchParams(Object.entries({ test: this.test, kind, ...rest }).map(([name, value]) => [name, String(value)]));
     await this.page.goto(`${this.server}/readings/${pages[kind]}?${query}`);
     await this.confirmCautions();
+    const another = this.page.getByRole("button", { name: "Another note" });
+    if (await another.isVisible()) await another.click();
   }
 
   async read(slot: Slot, value: ReadingValue): Promise<void> {
@@ -85,7 +87,8 @@ export class ReaderHand {
 
   private async confirmCautions(): Promise<void> {
     const start = this.page.getByRole("button", { name: "Confirm each caution" });
-    await expect(start.or(this.page.getByRole("button", { name: "Save", exact: true }))).toBeVisible();
+    const save = this.page.getByRole("button", { name: "Save", exact: true });
+    await expect(start.or(save).or(this.page.getByRole("button", { name: "Another note" }))).toBeVisible();
     if (!(await start.isVisible())) return;
     for (const box of await this.page.getByRole("checkbox").all()) await box.check();
     await this.page.getByRole("button", { name: "Start reading" }).click();

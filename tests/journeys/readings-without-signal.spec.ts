@@ -1,10 +1,11 @@
 import { expect, type Page, test } from "@playwright/test";
-import { skerryTern, skerryTernReadings } from "@/db/seed/skerry-tern";
+import { skerryTern } from "@/db/seed/skerry-tern";
 import { incliningResult } from "@/lib/lightship/inclining-result";
 import { promised } from "@/lib/result";
-import { type RecordedReading, recordedReadings } from "@/lib/sync/recorded-reading";
+import type { RecordedReading } from "@/lib/sync/recorded-reading";
 import { BrowserProfile } from "./browser-profile";
 import { ConsoleWatch } from "./console-watch";
+import { batten, battensOf, crewRead, sounding, type Taken } from "./crew-readings";
 import { accountOf, type DemoShip, demoShip } from "./demo-ship";
 import { ReaderHand } from "./reader-hand";
 import { codeFor, enrol, orderAgain, settle, signInByHand, takeTheLead } from "./wheelhouse";
@@ -13,7 +14,6 @@ import { codeFor, enrol, orderAgain, settle, signInByHand, takeTheLead } from ".
 test.describe.configure({ mode: "serial" });
 
 const { record, truth } = skerryTern();
-const crew = skerryTernReadings(7);
 const id = record.test.id;
 
 let ship: DemoShip;
@@ -124,8 +124,6 @@ async function opened(profile: BrowserProfile): Promise<Page> {
   return context.pages()[0] ?? context.newPage();
 }
 
-type Taken = Pick<RecordedReading, "slot" | "value">;
-
 function take({ slot, value }: Taken): Promise<void> {
   return hand.read(slot, value);
 }
@@ -151,24 +149,6 @@ async function exportedResult() {
   expect(response.status()).toBe(200);
   const { lightship, asInclined } = promised(incliningResult(await response.json()));
   return { lightship, asInclined };
-}
-
-function crewRead(isIt: (slot: RecordedReading["slot"]) => boolean): RecordedReading {
-  const found = recordedReadings(crew).find(({ slot }) => isIt(slot));
-  if (!found) throw new Error("the simulated crew has no such reading");
-  return found;
-}
-
-function sounding(tank: string): RecordedReading {
-  return crewRead((slot) => slot.kind === "sounding" && slot.tank === tank && slot.round === "before");
-}
-
-function batten(move: number, station: string): RecordedReading {
-  return crewRead((slot) => slot.kind === "batten" && slot.move === move && slot.station === station);
-}
-
-function battensOf(move: number): RecordedReading[] {
-  return ["A", "B", "C", "U"].map((station) => batten(move, station));
 }
 
 /** The water has not changed since before the moves. */

@@ -4,10 +4,12 @@ import type { ReactNode } from "react";
 import { Button } from "@/components/ui/button";
 import { TimeOfDay } from "@/components/ui/time-of-day";
 import type { ReadingValue } from "@/lib/sync/event";
+import type { SlotKind } from "@/lib/sync/slot";
 import { TakeBack } from "./take-back";
 import type { OwnReading } from "./use-own-readings";
 
 type AgainChoiceProps = {
+  kind: SlotKind;
   readings: readonly OwnReading[];
   shown: (value: ReadingValue) => string;
   next: ReactNode;
@@ -18,12 +20,12 @@ type AgainChoiceProps = {
 };
 
 /** This phone has read this place already: what the next reading is must be said before it is taken. */
-export function AgainChoice({ readings, shown, next, onSecondLook, onRepeat, onCorrect, onTakeBack }: AgainChoiceProps) {
+export function AgainChoice({ kind, readings, shown, next, onSecondLook, onRepeat, onCorrect, onTakeBack }: AgainChoiceProps) {
   return (
     <div className="flex flex-1 flex-col gap-3">
       <section aria-labelledby="read-here" className="rounded border-2 border-ink bg-sailcloth-raised p-3">
         <h2 id="read-here" className="font-bold">
-          Read with this phone
+          {kind === "note" ? "Noted with this phone" : "Read with this phone"}
         </h2>
         <ul className="mt-1 flex flex-col gap-1">
           {readings.map((each) => (
@@ -37,7 +39,11 @@ export function AgainChoice({ readings, shown, next, onSecondLook, onRepeat, onC
           ))}
         </ul>
       </section>
-      <Choice title="Second look" text="The same state of the ship, read once more. Both stand." onChoose={onSecondLook} />
+      {kind === "note" ? (
+        <Choice title="Another note" text="Each note stands for itself." onChoose={onSecondLook} />
+      ) : (
+        <Choice title="Second look" text="The same state of the ship, read once more. Both stand." onChoose={onSecondLook} />
+      )}
       {onRepeat ? <Choice title="Repeat ordered" text="The lead has ordered this move again." onChoose={onRepeat} /> : null}
       <div className="flex flex-wrap gap-2">
         <TakeBack onTakeBack={onTakeBack} />

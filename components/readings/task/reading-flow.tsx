@@ -54,6 +54,7 @@ export function ReadingFlow<T>({ here, slot, empty, formOf, shown, next, onRepea
   if (last && intent === null)
     return (
       <AgainChoice
+        kind={slot.kind}
         readings={standing}
         shown={shown}
         next={next}
