@@ -3,7 +3,7 @@ import { underFreeDeviceLock } from "@/db/device/device-lock";
 import { deviceToSend, eventsOfDevice, keepSending, keepStates, lastSending, unsentCount } from "@/db/device/event-queue";
 import type { HeldEvent } from "@/db/device/held-event";
 import { BATCH_EVENTS } from "@/lib/sync/batch-limits";
-import { afterAnswer, afterComparison, afterSilence, nextBatch, type StateChange } from "@/lib/sync/outbox";
+import { afterAnswer, afterBackup, afterComparison, afterSilence, nextBatch, type StateChange } from "@/lib/sync/outbox";
 import { PROTOCOL, type SyncAnswer } from "@/lib/sync/protocol";
 import type { Reach } from "@/lib/sync/queue-words";
 import { retryDelay } from "@/lib/sync/retry";
@@ -74,6 +74,7 @@ async function takenIn(device: string, batch: readonly HeldEvent[], heard: Heard
   const changes = afterAnswer(batch, heard.answer);
   const moved = changes.filter((change) => change.state !== "saved").length;
   await keepStates([...changes, ...(await changesByComparison(device, changes, heard.answer))]);
+  await keepStates(afterBackup(await eventsOfDevice(device), heard.answer.confirmedTo));
   await updateIdentity({ server: idOf(heard.answer), clockOffsetMs: heard.clockOffsetMs });
   if (batch.length > 0 && moved === 0) return failed(batch, null, around);
   const now = new Date(around.now()).toISOString();

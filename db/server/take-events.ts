@@ -5,6 +5,7 @@ import { envelopeHash } from "@/lib/sync/envelope-hash";
 import type { EventBody } from "@/lib/sync/event";
 import type { Envelope, SyncAnswer, SyncRequest } from "@/lib/sync/protocol";
 import { receiptForRole } from "@/lib/sync/receipt-for-role";
+import { confirmedTo } from "./backups-made";
 import { tellChange } from "./changes";
 import { type Database, inTransaction } from "./connection";
 import { noteHeard } from "./devices";
@@ -40,6 +41,7 @@ export function takeEvents(db: Database, { device, holds, events }: Batch, sende
     results: taken.map((event) => receiptForRole(receiptOf(event), rolesHere(db, event.test, sender))),
     received: events.map(envelopeHash),
     device: { highestSeq, missing },
+    confirmedTo: confirmedTo(db),
     ledgerHead: last === undefined ? null : ledgerHead(db, last),
   };
 }

@@ -68,15 +68,26 @@ export function afterComparison(events: readonly QueuedEvent[], known: SyncAnswe
     .map(({ id }) => ({ id, state: "saved", receipt: null }));
 }
 
-export type QueueCount = { readonly unsent: number; readonly onServer: number; readonly quarantined: number };
+type Answered = Pick<QueuedEvent, "id" | "state"> & { readonly receipt: Receipt | null };
 
-/** How many events of a phone are here only, on the server, and set aside there. */
+/** What has become safe: everything on the server up to the number to which it has backed up what it took in. */
+export function afterBackup(events: readonly Answered[], confirmedTo: number): StateChange[] {
+  return events
+    .filter(({ state, receipt }) => state === "on-server" && receipt !== null && receipt.serverSeq <= confirmedTo)
+    .map(({ id }) => ({ id, state: "confirmed", receipt: null }));
+}
+
+/** `confirmed` are those of `onServer` that are in a backup too. */
+export type QueueCount = { readonly unsent: number; readonly onServer: number; readonly confirmed: number; readonly quarantined: number };
+
+/** How many events of a phone are here only, on the server, safe in a backup, and set aside. */
 export function queueCount(events: Iterable<Pick<QueuedEvent, "state">>): QueueCount {
-  const count = { unsent: 0, onServer: 0, quarantined: 0 };
+  const count = { unsent: 0, onServer: 0, confirmed: 0, quarantined: 0 };
   for (const event of events) {
     if (isUnsent(event)) count.unsent += 1;
     else if (event.state === "quarantined") count.quarantined += 1;
     else count.onServer += 1;
+    if (event.state === "confirmed") count.confirmed += 1;
   }
   return count;
 }

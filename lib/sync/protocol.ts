@@ -54,13 +54,16 @@ export const receiptSchema = z.strictObject({
 });
 export type Receipt = z.infer<typeof receiptSchema>;
 
-export const syncAnswerSchema = z.strictObject({
-  server: z.strictObject({ id: z.uuid(), epoch: z.uuid(), time }),
+/** Read with patience: a phone of an older build leaves out what a newer server says besides. */
+export const syncAnswerSchema = z.object({
+  server: z.object({ id: z.uuid(), epoch: z.uuid(), time }),
   /** one per event, in the order sent */
   results: z.array(receiptSchema),
   /** the hash of each envelope as it arrived, see `envelopeHash`: what broke on its way is sent again */
   received: z.array(z.string()),
-  device: z.strictObject({ highestSeq: wholeNumber, missing: z.array(ordinal) }),
+  device: z.object({ highestSeq: wholeNumber, missing: z.array(ordinal) }),
+  /** every event that the server took in up to this number is in a backup; 0 where none was made */
+  confirmedTo: wholeNumber.default(0),
   /** head of the chain of the last test touched; null where none was */
   ledgerHead: z.string().nullable(),
 });

@@ -9,7 +9,12 @@ export function queueWords(count: QueueCount, reach: Reach): string {
   const aside = count.quarantined > 0 ? `; ${count.quarantined} set aside by the server` : "";
   if (count.unsent > 0) return `${saved(count.unsent)}, not sent yet${aside}`;
   if (count.onServer + count.quarantined === 0) return "Nothing saved on this phone yet";
-  return `All ${count.onServer + count.quarantined} on the server${aside}`;
+  return `All ${count.onServer + count.quarantined} on the server${backedUp(count)}${aside}`;
+}
+
+function backedUp({ onServer, confirmed }: QueueCount): string {
+  if (confirmed === 0) return "";
+  return confirmed === onServer ? ", backed up" : `, ${confirmed} backed up`;
 }
 
 function saved(count: number): string {

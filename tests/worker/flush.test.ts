@@ -73,6 +73,19 @@ describe("the flush", () => {
     expect(await states()).toEqual(["on-server", "on-server", "on-server"]);
   });
 
+  test("takes what is in a backup for confirmed, and sends it again where the server has lost it all the same", async () => {
+    for (const value of [1, 2]) await appendEvent(batten(value));
+    const server = simulatedServer();
+    await flush({ urgent: true }, around(server.fetch));
+    server.backUp();
+    await appendEvent(batten(3));
+    await flush({ urgent: true }, around(server.fetch));
+    expect(await states()).toEqual(["confirmed", "confirmed", "on-server"]);
+    server.restore([1]);
+    await flush({ urgent: true }, around(server.fetch));
+    expect(server.held()).toEqual([1, 2, 3]);
+  });
+
   test("lets one event set aside by the server not block the others, and does not send it for ever", async () => {
     for (const value of [1, 2, 3]) await appendEvent(batten(value));
     const server = simulatedServer({ quarantines: [2] });

@@ -9,6 +9,7 @@ export function simulatedServer({ id = "5b3f2c1e-0a4d-4b8e-9c55-6f0a1d2e3c90", q
   const stored = new Map<number, string>();
   const batches: number[][] = [];
   const envelopes: Envelope[] = [];
+  let confirmedTo = 0;
 
   const fetch: typeof globalThis.fetch = async (_, init) => {
     const request = syncRequestSchema.parse(JSON.parse(String(init?.body)));
@@ -21,6 +22,7 @@ export function simulatedServer({ id = "5b3f2c1e-0a4d-4b8e-9c55-6f0a1d2e3c90", q
       results: bodies.map(taken),
       received: request.events.map(envelopeHash),
       device: known(),
+      confirmedTo,
       ledgerHead: null,
     };
     return Response.json(answer);
@@ -43,5 +45,10 @@ export function simulatedServer({ id = "5b3f2c1e-0a4d-4b8e-9c55-6f0a1d2e3c90", q
     for (const seq of [...stored.keys()]) if (!seqs.includes(seq)) stored.delete(seq);
   }
 
-  return { fetch, time, batches, envelopes, restore, held: () => [...stored.keys()].sort((a, b) => a - b) };
+  /** Everything it has is in a backup now. */
+  function backUp() {
+    confirmedTo = Math.max(0, ...stored.keys());
+  }
+
+  return { fetch, time, batches, envelopes, restore, backUp, held: () => [...stored.keys()].sort((a, b) => a - b) };
 }

@@ -4,6 +4,7 @@ import { BATCH_BYTES, BATCH_EVENTS } from "@/lib/sync/batch-limits";
 import { envelopeHash } from "@/lib/sync/envelope-hash";
 import {
   afterAnswer,
+  afterBackup,
   afterComparison,
   afterSilence,
   type EventState,
@@ -35,7 +36,7 @@ function answer(results: readonly Receipt[], device: SyncAnswer["device"] = { hi
   const server = { id: testId, epoch: testId, time: "2026-05-04T10:00:00.000Z" };
   // what was sent came whole: the batch is numbered from 1
   const received = [1, 2, 3].map((seq) => envelopeHash(held(seq).envelope));
-  return { server, results: [...results], received, device, ledgerHead: null };
+  return { server, results: [...results], received, device, confirmedTo: 0, ledgerHead: null };
 }
 
 describe("the next batch", () => {
@@ -161,9 +162,24 @@ describe("after the server has told what it holds", () => {
   });
 });
 
+describe("after a backup", () => {
+  const answered = (seq: number, state: EventState) => ({ ...held(seq, state), receipt: receipt(seq) });
+
+  it("what the server took in up to that number is confirmed, and nothing after it", () => {
+    const queue = [1, 2, 3].map((seq) => answered(seq, "on-server"));
+    expect(afterBackup(queue, 402)).toEqual([1, 2].map((seq) => ({ id: idOf(seq), state: "confirmed", receipt: null })));
+    expect(afterBackup(queue, 0)).toEqual([]);
+  });
+
+  it("what is on its way, set aside, or without a receipt is not", () => {
+    const queue = states.map((state, i) => answered(i + 1, state)).filter(({ state }) => state !== "on-server");
+    expect(afterBackup([...queue, { ...held(9, "on-server"), receipt: null }], 999)).toEqual([]);
+  });
+});
+
 describe("the count of a queue", () => {
-  it("tells what is here only, on the server, and set aside there", () => {
-    expect(queueCount(states.map((state, i) => held(i + 1, state)))).toEqual({ unsent: 2, onServer: 2, quarantined: 1 });
-    expect(queueCount([])).toEqual({ unsent: 0, onServer: 0, quarantined: 0 });
+  it("tells what is here only, on the server, backed up, and set aside there", () => {
+    expect(queueCount(states.map((state, i) => held(i + 1, state)))).toEqual({ unsent: 2, onServer: 2, confirmed: 1, quarantined: 1 });
+    expect(queueCount([])).toEqual({ unsent: 0, onServer: 0, confirmed: 0, quarantined: 0 });
   });
 });

@@ -11,6 +11,7 @@ const answer = {
   results: [receipt, { id: null, outcome: "quarantined", serverSeq: 413, code: "malformed-body", message: "The event is not JSON" }],
   received: ["a".repeat(64), "b".repeat(64)],
   device: { highestSeq: 17, missing: [3, 4] },
+  confirmedTo: 400,
   ledgerHead: null,
 };
 
@@ -42,6 +43,13 @@ describe("what a phone sends", () => {
 describe("what a phone hears", () => {
   it("is read as it was written", () => {
     expect(syncAnswerSchema.parse(JSON.parse(JSON.stringify(answer)))).toEqual(answer);
+  });
+
+  it("may be of an older server, which confirms nothing, or of a newer one, whose further words are left out", () => {
+    const { confirmedTo, ...older } = answer;
+    expect(syncAnswerSchema.parse(older).confirmedTo).toBe(0);
+    const newer = { ...answer, weather: "calm", server: { ...answer.server, name: "Yard" } };
+    expect(syncAnswerSchema.parse(newer)).toEqual(answer);
   });
 
   it.each<[string, object]>([

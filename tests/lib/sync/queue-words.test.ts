@@ -1,8 +1,8 @@
 import { describe, expect, it } from "vitest";
 import { queueWords, type Reach } from "@/lib/sync/queue-words";
 
-const words = (unsent: number, onServer: number, quarantined: number, reach: Reach = "reached") =>
-  queueWords({ unsent, onServer, quarantined }, reach);
+const words = (unsent: number, onServer: number, quarantined: number, reach: Reach = "reached", confirmed = 0) =>
+  queueWords({ unsent, onServer, confirmed, quarantined }, reach);
 
 describe("the state of the queue in words", () => {
   it("says that nothing was saved yet, whether anybody can be reached or not", () => {
@@ -20,6 +20,13 @@ describe("the state of the queue in words", () => {
     expect(words(0, 41, 0)).toBe("All 41 on the server");
     expect(words(0, 0, 1)).toBe("All 1 on the server; 1 set aside by the server");
     expect(words(0, 39, 2)).toBe("All 41 on the server; 2 set aside by the server");
+  });
+
+  it("says how many of those on the server are in a backup", () => {
+    expect(words(0, 41, 0, "reached", 12)).toBe("All 41 on the server, 12 backed up");
+    expect(words(0, 41, 0, "reached", 41)).toBe("All 41 on the server, backed up");
+    expect(words(0, 39, 2, "reached", 39)).toBe("All 41 on the server, backed up; 2 set aside by the server");
+    expect(words(3, 41, 0, "reached", 41)).toBe("3 saved on this phone, not sent yet");
   });
 
   it("asks for a sign-in only where something waits for it, and says that readings go on", () => {
