@@ -41,6 +41,7 @@ test("a phone is enrolled over the way", async () => {
   await takeTheLead(control, ship, id);
   hand = new ReaderHand(await firstPage(phone), ship.server.url, id);
   await enrol(hand.page, ship, await codeFor(control, "Rolf Lund"), "Blue phone, aft");
+  await expect(control.getByRole("row", { name: /Blue phone, aft/ })).toBeVisible();
 });
 
 test("cuts of some seconds, again and again, lose nothing", async () => {

@@ -34,8 +34,28 @@ export class ProductServer {
   }
 
   /** Starts on the same port and data as before, and waits until it answers. */
-  async start(): Promise<void> {
-    const child = this.spawned(["node_modules/next/dist/bin/next", "start", "--port", String(this.port)]);
+  start(): Promise<void> {
+    return this.answering(this.spawned([process.execPath, ...this.nextStart]));
+  }
+
+  /** Starts with its data copied to a file system of this size [MiB], which ends with the server. */
+  startOnSmallDisk(mebibytes: number): Promise<void> {
+    const aboard = 'cp -a "$0/." /mnt && mount -t tmpfs -o size=$1m tmpfs "$0" && cp -a /mnt/. "$0" && shift && exec "$@"';
+    const script = `mount -t tmpfs tmpfs /mnt && ${aboard}`;
+    const ownDisk = ["unshare", "--map-root-user", "--mount", "sh", "-c", script, this.dataFolder, String(mebibytes)];
+    return this.answering(this.spawned([...ownDisk, process.execPath, ...this.nextStart]));
+  }
+
+  /** The data folder as the server sees it. */
+  get folderSeen(): string {
+    return path.join("/proc", String(this.child?.pid), "root", this.dataFolder);
+  }
+
+  private get nextStart(): readonly string[] {
+    return ["node_modules/next/dist/bin/next", "start", "--port", String(this.port)];
+  }
+
+  private async answering(child: ChildProcess): Promise<void> {
     this.child = child;
     const deadline = Date.now() + patience;
     while (!(await this.answers())) {
@@ -46,7 +66,7 @@ export class ProductServer {
 
   /** Runs one of the project's TypeScript commands on this server's data, and gives what it prints. */
   async command(file: string, ...args: string[]): Promise<string> {
-    const child = this.spawned(["node_modules/tsx/dist/cli.mjs", "--conditions=react-server", file, ...args]);
+    const child = this.spawned([process.execPath, "node_modules/tsx/dist/cli.mjs", "--conditions=react-server", file, ...args]);
     let printed = "";
     child.stdout?.on("data", (chunk) => {
       printed += chunk;
@@ -81,10 +101,10 @@ export class ProductServer {
     await ended;
   }
 
-  private spawned(args: readonly string[]): ChildProcess {
+  private spawned([command = "", ...args]: readonly string[]): ChildProcess {
     const own = { NODE_ENV: "production" as const, NEXT_TELEMETRY_DISABLED: "1", BATTENBOOK_DATA: this.dataFolder, NEXTAUTH_URL: this.url };
     const env = { ...process.env, ...own };
-    const child = spawn(process.execPath, args, { cwd: root, env, detached: true, stdio: ["ignore", "pipe", "pipe"] });
+    const child = spawn(command, args, { cwd: root, env, detached: true, stdio: ["ignore", "pipe", "pipe"] });
     for (const stream of [child.stdout, child.stderr]) stream?.on("data", (chunk) => this.hear(String(chunk)));
     return child;
   }
