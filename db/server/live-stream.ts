@@ -1,5 +1,6 @@
 import { onChange } from "./changes";
 import type { Database } from "./connection";
+import { onEnding } from "./ending";
 import { liveSnapshot } from "./live-snapshot";
 
 const BEAT_MS = 15_000;
@@ -29,7 +30,7 @@ async function sendWhileOpen(
 ): Promise<void> {
   const changes = changesOf(test, stop.signal);
   let last = "";
-  while (!stop.signal.aborted && (await mayStillSee())) {
+  while (!changes.isOver() && (await mayStillSee())) {
     const snapshot = liveSnapshot(db, test, new Date().toISOString());
     if (!snapshot || stop.signal.aborted) break;
     const now = JSON.stringify(snapshot);
@@ -41,21 +42,31 @@ async function sendWhileOpen(
   stop.abort();
 }
 
-/** `next` waits for a change, but not longer than a beat; a change heard meanwhile is not lost. */
-function changesOf(test: string, stopped: AbortSignal): { next: () => Promise<void> } {
+/**
+ * `next` waits for a change, but not longer than a beat; a change heard meanwhile is not lost. Over when nobody listens any
+ * more, or when the server has been asked to end: a line that stays open would keep it from ending.
+ */
+function changesOf(test: string, stopped: AbortSignal): { next: () => Promise<void>; isOver: () => boolean } {
   let heard = false;
+  let ending = false;
   let wake = () => {};
   const off = onChange(test, () => {
     heard = true;
     wake();
   });
+  const offEnding = onEnding(() => {
+    ending = true;
+    wake();
+  });
   stopped.addEventListener("abort", () => {
     off();
+    offEnding();
     wake();
   });
   return {
+    isOver: () => ending || stopped.aborted,
     next: async () => {
-      if (!heard && !stopped.aborted) await new Promise<void>((done) => wakeAfter(BEAT_MS, done, (now) => (wake = now)));
+      if (!heard && !ending && !stopped.aborted) await new Promise<void>((done) => wakeAfter(BEAT_MS, done, (now) => (wake = now)));
       if (heard && !stopped.aborted) await new Promise<void>((done) => setTimeout(done, GATHER_MS));
       heard = false;
     },
