@@ -12,6 +12,11 @@ export function databaseFile(): string {
   return path.join(dataFolder(), "battenbook.db");
 }
 
+/** Photographs and certificates, each under the hash of its content. */
+export function filesFolder(): string {
+  return path.join(dataFolder(), "files");
+}
+
 /** Makes an empty file that only its owner may read, where there is none; SQLite gives its -wal and -shm the same mode. */
 export function makePrivateFile(file: string): void {
   closeSync(openSync(file, "a", 0o600));
