@@ -7,7 +7,7 @@ import { answer, type Result, refuse } from "@/lib/result";
 import { copyNamed, folderFault, tidyFolder } from "./backup-folder";
 import { type Backup, noteBackup } from "./backups-made";
 import type { Database } from "./connection";
-import { makePrivateFile } from "./data-folder";
+import { filesFolder, makePrivateFile } from "./data-folder";
 import { copyFiles } from "./file-copies";
 import { flushFile, flushFolder } from "./flushed";
 
@@ -21,7 +21,7 @@ export async function backUp(db: Database, folder: string, at: string): Promise<
   const copied = await copiedDatabase(db, folder, at);
   if (!copied.ok) return copied;
   noteBackup(db, copied.value);
-  const fault = await copyFiles(path.join(folder, "files")).catch((error: unknown) => faultOf(error, folder));
+  const fault = await copyFiles(filesFolder(), path.join(folder, "files")).catch((error: unknown) => faultOf(error, folder));
   return fault === null ? copied : refuse(fault);
 }
 

@@ -3,14 +3,13 @@ import { existsSync, mkdirSync, readdirSync, statSync } from "node:fs";
 import { readFile, rename, writeFile } from "node:fs/promises";
 import path from "node:path";
 import type { BackupFault } from "@/lib/report/backup-words";
-import { filesFolder } from "./data-folder";
 import { flushFolder } from "./flushed";
 
 /**
  * Copies the files that the folder lacks. They never change, so a name that is there with its size is there. The first whose content is
  * not what its name says is told of; the others are copied all the same.
  */
-export async function copyFiles(to: string, from: string = filesFolder()): Promise<BackupFault | null> {
+export async function copyFiles(from: string, to: string): Promise<BackupFault | null> {
   let damaged: string | null = null;
   const lacking = namesIn(from).filter((name) => !isThere(path.join(from, name), path.join(to, name)));
   if (lacking.length > 0) mkdirSync(to, { recursive: true, mode: 0o700 });

@@ -55,6 +55,7 @@ const acts: Readonly<Record<string, string>> = {
   "enrolment.revoke": "Code taken back",
   "record.import": "Record file read in",
   "record.export": "Record file given out",
+  restored: "Server restored from a backup",
 };
 
 /** What an entry of the ledger stands for; an act without words of its own is named as it is written. */

@@ -1,4 +1,13 @@
-import { afterAnswer, afterComparison, afterSilence, isUnsent, nextBatch, type QueuedEvent, type StateChange } from "@/lib/sync/outbox";
+import {
+  afterAnswer,
+  afterBackup,
+  afterComparison,
+  afterSilence,
+  isUnsent,
+  nextBatch,
+  type QueuedEvent,
+  type StateChange,
+} from "@/lib/sync/outbox";
 import { type Envelope, PROTOCOL, type Receipt, type SyncAnswer, syncAnswerSchema } from "@/lib/sync/protocol";
 
 /** What came back: an answer of the protocol, or silence (nothing, an error, a page of somebody else's). */
@@ -46,8 +55,9 @@ export class FaultPhone {
         this.epoch !== null && this.epoch !== heard.server.epoch,
       ),
     );
+    this.become(afterBackup(this.held, heard.confirmedTo));
     this.epoch = heard.server.epoch;
-    for (const { id, state } of this.held) if (state === "on-server") this.acknowledged.add(id);
+    for (const { id, state } of this.held) if (state === "on-server" || state === "confirmed") this.acknowledged.add(id);
   }
 
   /** Killed while sending: nothing is known of what was on its way. */
@@ -57,7 +67,10 @@ export class FaultPhone {
 
   private become(changes: readonly StateChange[]): void {
     const byId = new Map(changes.map((change) => [change.id, change]));
-    this.held = this.held.map((event) => ({ ...event, ...byId.get(event.id) }));
+    this.held = this.held.map((event) => {
+      const change = byId.get(event.id);
+      return change ? { ...event, state: change.state, receipt: change.receipt ?? event.receipt } : event;
+    });
   }
 }
 

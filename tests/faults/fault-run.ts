@@ -9,6 +9,8 @@ export type FaultCount = {
   readonly events: number;
   readonly faults: Readonly<Record<string, number>>;
   readonly lost: number;
+  /** called confirmed, and gone after a restore from the last backup */
+  readonly falselyConfirmed: number;
   readonly doubled: number;
   readonly stuck: number;
   readonly setAside: number;
@@ -29,30 +31,36 @@ export async function faultRun(seed: number, steps: number): Promise<FaultCount>
     const tell = (fault: string) => {
       faults[fault] = (faults[fault] ?? 0) + 1;
     };
-    server.backUp();
-    for (let step = 0; step < steps; step++) await oneStep(crew, server, chance, tell);
+    await server.backUp();
+    let falselyConfirmed = 0;
+    for (let step = 0; step < steps; step++) falselyConfirmed += await oneStep(crew, server, chance, tell);
     const stuck = await crew.settles();
-    return { ...counted(server, crew), faults, stuck };
+    return { ...counted(server, crew), faults, stuck, falselyConfirmed };
   } finally {
     server.remove();
   }
 }
 
-async function oneStep(crew: FaultCrew, server: FaultServer, chance: Noise, tell: (fault: string) => void): Promise<void> {
+async function oneStep(crew: FaultCrew, server: FaultServer, chance: Noise, tell: (fault: string) => void): Promise<number> {
   crew.reads();
   if (chance.uniform() < 0.5) await crew.sends(0.6, tell);
   if (chance.uniform() < 0.05) {
     crew.onePhoneCrashes();
     tell("phone killed while sending");
   }
-  if (chance.uniform() < 0.02) server.backUp();
-  if (chance.uniform() < 0.01) {
-    server.restore();
-    tell("server restored from an older backup");
-  }
+  if (chance.uniform() < 0.02) await server.backUp();
+  if (chance.uniform() >= 0.01) return 0;
+  await server.restore();
+  tell("server restored from an older backup");
+  return confirmedButGone(server, crew);
 }
 
-function counted(server: FaultServer, crew: FaultCrew): Omit<FaultCount, "faults" | "stuck"> {
+function confirmedButGone(server: FaultServer, crew: FaultCrew): number {
+  const held = new Set(server.db.$client.prepare("select id from events where id is not null").pluck().all());
+  return crew.phones.flatMap(({ events }) => events.filter(({ id, state }) => state === "confirmed" && !held.has(id))).length;
+}
+
+function counted(server: FaultServer, crew: FaultCrew): Omit<FaultCount, "faults" | "stuck" | "falselyConfirmed"> {
   const { db } = server;
   const taking = new Map<string, number>();
   for (const { id } of db.$client.prepare("select id from events where outcome <> 'quarantined'").all() as { id: string }[]) {

@@ -1,18 +1,22 @@
-import { copyFileSync, mkdtempSync, rmSync } from "node:fs";
+import { mkdirSync, mkdtempSync, rmSync } from "node:fs";
 import { tmpdir } from "node:os";
 import path from "node:path";
 import { POST } from "@/app/api/v1/sync/route";
+import { backUp } from "@/db/server/backup";
 import { database } from "@/db/server/connection";
-import { beginEpoch } from "@/db/server/server-identity";
+import { restore } from "@/db/server/restore";
+import { promised } from "@/lib/result";
 
 /** The real route handler over the real database in a folder of its own, to be torn, stopped, and restored at will. */
 export class FaultServer {
   private readonly folder = mkdtempSync(path.join(tmpdir(), "battenbook-faults-"));
-  private backups = 0;
+  private readonly copies = path.join(this.folder, "copies");
+  lastCopy = "";
 
   constructor() {
     this.stop();
-    process.env.BATTENBOOK_DATA = this.folder;
+    process.env.BATTENBOOK_DATA = path.join(this.folder, "data");
+    mkdirSync(this.copies);
   }
 
   get db() {
@@ -45,26 +49,18 @@ export class FaultServer {
   }
 
   /** Copies the database as it stands, for `restore`. */
-  backUp(): void {
-    this.backups += 1;
-    this.db.$client.exec(`vacuum into '${this.backup}'`);
+  async backUp(): Promise<void> {
+    this.lastCopy = promised(await backUp(this.db, this.copies, new Date().toISOString())).file;
   }
 
   /** Puts the last backup in the place of the database: everything since is gone from the server, and it says so. */
-  restore(): void {
+  async restore(copy = this.lastCopy): Promise<void> {
     this.stop();
-    const file = path.join(this.folder, "battenbook.db");
-    for (const part of ["", "-wal", "-shm"]) rmSync(file + part, { force: true });
-    copyFileSync(this.backup, file);
-    beginEpoch(this.db);
+    promised(await restore(path.join(this.copies, copy), { at: new Date().toISOString(), force: false }));
   }
 
   remove(): void {
     this.stop();
     rmSync(this.folder, { recursive: true, force: true });
-  }
-
-  private get backup(): string {
-    return path.join(this.folder, `backup-${this.backups}.db`);
   }
 }

@@ -14,7 +14,7 @@ describe("a day of readings under faults", () => {
     "loses, doubles and forgets nothing (seed %i, %i steps: %s)",
     async (seed, steps) => {
       const count = await faultRun(seed, steps);
-      expect(count).toMatchObject({ lost: 0, doubled: 0, stuck: 0, setAside: 0, unverified: 0, projectionOff: 0 });
+      expect(count).toMatchObject({ lost: 0, falselyConfirmed: 0, doubled: 0, stuck: 0, setAside: 0, unverified: 0, projectionOff: 0 });
       expect(count.events).toBe(steps);
       expect(Object.values(count.faults).reduce((sum, times) => sum + times, 0)).toBeGreaterThan(20);
     },
