@@ -1,6 +1,6 @@
 import { forbidden, notFound, redirect } from "next/navigation";
 import { database } from "@/db/server/connection";
-import { rolesOf } from "@/db/server/role-grants";
+import { isRoleHeldAnywhere, rolesOf } from "@/db/server/role-grants";
 import type { Person } from "@/db/server/sessions";
 import { type Test, testById } from "@/db/server/tests";
 import type { Role } from "@/lib/sync/job-sheet";
@@ -56,6 +56,11 @@ export function refused(status: number, error: string, more: Record<string, unkn
 
 export function isOffice(person: Person): boolean {
   return person.isEngineer || person.isAdministrator;
+}
+
+/** Whoever answers for the readings: the office, and the lead of any test here. */
+export function mayBackUp(person: Person): boolean {
+  return isOffice(person) || isRoleHeldAnywhere(database(), person.id, ["lead", "engineer"], new Date().toISOString());
 }
 
 // whoever has no part in a test does not learn whether it exists

@@ -1,4 +1,4 @@
-import { and, eq, gt, isNull, lte, or } from "drizzle-orm";
+import { and, eq, gt, inArray, isNull, lte, or } from "drizzle-orm";
 import { type Role, roleSchema } from "@/lib/sync/job-sheet";
 import { accounts, roleGrants } from "../schema/accounts";
 import type { Act } from "./act";
@@ -22,6 +22,12 @@ export function rolesOf(db: Database, account: string, test: string, at: string)
 
 export function isRoleHeldAt(db: Database, account: string, test: string, roles: readonly Role[], at: string): boolean {
   return rolesOf(db, account, test, at).some((role) => roles.includes(role));
+}
+
+/** Whether a person holds one of the roles at a time in any test at all. */
+export function isRoleHeldAnywhere(db: Database, account: string, roles: readonly Role[], at: string): boolean {
+  const held = and(eq(roleGrants.account, account), inArray(roleGrants.role, [...roles]), inForce(at));
+  return db.select({ test: roleGrants.test }).from(roleGrants).where(held).limit(1).get() !== undefined;
 }
 
 /** Every role a person was ever given, in every test. */

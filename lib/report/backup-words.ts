@@ -1,3 +1,4 @@
+import { z } from "zod";
 import type { Refusal } from "@/lib/result";
 
 /** Why a copy of the server's database was not made, or is not to be trusted. */
@@ -68,4 +69,20 @@ export function ageInWords(ms: number): string {
   if (minutes < 120) return `${minutes} min`;
   const hours = Math.round(minutes / 60);
   return hours < 48 ? `${hours} h` : `${Math.round(hours / 24)} days`;
+}
+
+/** What a screen shows of the backups. */
+export const backupNewsSchema = z.object({
+  last: z.object({ at: z.string(), file: z.string(), bytes: z.number() }).nullable(),
+  isDue: z.boolean(),
+  everyMinutes: z.number(),
+  canBackUp: z.boolean(),
+  warnings: z.array(z.string()),
+});
+export type BackupNews = z.infer<typeof backupNewsSchema>;
+
+/** The standing as a screen shows it at a time [ms since 1970]. */
+export function backupNews(standing: BackupStanding, now: number): BackupNews {
+  const { last, isDue, everyMinutes, folder } = standing;
+  return { last, isDue, everyMinutes, canBackUp: folder !== null, warnings: backupWarnings(standing, now) };
 }

@@ -4,6 +4,7 @@ import type { Visitor } from "./visitors";
 const everybody: readonly Visitor[] = ["reader", "lead", "engineer", "witness", "administrator"];
 const allButReaders = everybody.filter((visitor) => visitor !== "reader");
 const office: readonly Visitor[] = ["engineer", "administrator"];
+const backers: readonly Visitor[] = ["lead", ...office];
 
 /** Who may, and what a request of theirs looks like and is answered. */
 export type Row = {
@@ -46,6 +47,8 @@ const newDevice = () => ({ device: randomUUID(), name: "Wheelhouse", publicKey: 
 /** Route handlers, method by method. One that is not here fails the walk. */
 export const handlers: Readonly<Record<string, Readonly<Record<string, Row>>>> = {
   "app/api/health/route.ts": { GET: { allowed: "all" } },
+  // no folder is set here: nothing is written, and the refusal says so
+  "app/api/v1/backups/route.ts": { GET: { allowed: backers }, POST: { allowed: backers, status: 503 } },
   "app/api/v1/jobs/route.ts": { GET: { allowed: everybody } },
   "app/api/v1/devices/route.ts": { POST: { allowed: everybody, body: newDevice, status: 201 } },
   "app/api/v1/records/route.ts": { POST: { allowed: office, body: () => ({}), status: 422 } },

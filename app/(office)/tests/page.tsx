@@ -1,5 +1,7 @@
 import type { Metadata } from "next";
 import { isOffice, requirePerson } from "@/app/access";
+import { backupNewsFor } from "@/app/backup-news";
+import { BackupPanel } from "@/components/backups/backup-panel";
 import { ImportRecord } from "@/components/tests/import-record";
 import { TestsTable } from "@/components/tests/tests-table";
 import { PageTitle } from "@/components/ui/page-title";
@@ -14,6 +16,7 @@ export default async function Page() {
     <>
       <PageTitle title="Tests">{isOffice(person) ? <ImportRecord /> : null}</PageTitle>
       <TestsTable tests={testsOf(database(), person.id, new Date().toISOString())} />
+      <BackupPanel first={backupNewsFor(person)} />
     </>
   );
 }

@@ -1,6 +1,8 @@
 import type { Metadata } from "next";
 import { notFound } from "next/navigation";
 import { allButReaders, requireRole } from "@/app/access";
+import { backupNewsFor } from "@/app/backup-news";
+import { BackupWarning } from "@/components/backups/backup-warning";
 import { Control } from "@/components/control/control";
 import { PageTitle } from "@/components/ui/page-title";
 import { database } from "@/db/server/connection";
@@ -15,6 +17,7 @@ export default async function Page({ params }: { params: Promise<{ id: string }>
   return (
     <>
       <PageTitle title="Central control" over={`${test.vesselCopy.vessel.name} · ${test.title}`} />
+      <BackupWarning first={backupNewsFor(person)} />
       <Control test={id} person={{ id: person.id, name: person.name }} roles={roles} first={first} />
     </>
   );
