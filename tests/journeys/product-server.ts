@@ -18,6 +18,8 @@ export class ProductServer {
     readonly url: string,
   ) {}
 
+  /** The folder of the build that the next start serves. */
+  build = process.env.NEXT_DIST_DIR ?? ".next";
   private child: ChildProcess | null = null;
   private output = "";
 
@@ -102,8 +104,8 @@ export class ProductServer {
   }
 
   private spawned([command = "", ...args]: readonly string[]): ChildProcess {
-    const own = { NODE_ENV: "production" as const, NEXT_TELEMETRY_DISABLED: "1", BATTENBOOK_DATA: this.dataFolder, NEXTAUTH_URL: this.url };
-    const env = { ...process.env, ...own };
+    const own = { BATTENBOOK_DATA: this.dataFolder, NEXTAUTH_URL: this.url, NEXT_DIST_DIR: this.build };
+    const env = { ...process.env, NODE_ENV: "production" as const, NEXT_TELEMETRY_DISABLED: "1", ...own };
     const child = spawn(command, args, { cwd: root, env, detached: true, stdio: ["ignore", "pipe", "pipe"] });
     for (const stream of [child.stdout, child.stderr]) stream?.on("data", (chunk) => this.hear(String(chunk)));
     return child;

@@ -21,6 +21,7 @@ export function PhoneFacts() {
       <Fact name="Signed" value={identity.keys ? "yes, with a key that cannot leave this phone" : "no: this browser keeps no keys"} />
       <Fact name="Storage" value={identity.persisted ? "kept by the browser" : "the browser may clear it when space runs out"} />
       <Fact name="Clock" value={clockWords(offset)} />
+      <Fact name="Version" value={process.env.BATTENBOOK_VERSION ?? "not built"} />
     </dl>
   );
 }

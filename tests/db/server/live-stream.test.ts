@@ -6,18 +6,6 @@ import { personWith, yard } from "./yard";
 
 const whoever = async () => true;
 
-test("a live line tells what stands, then each change, and closes at once when the server is asked to end", async () => {
-  const ship = yard();
-  const mara = new Phone(ship.db, ship.test, personWith(ship, "reader", "Mara").id);
-  const lines = liveStream(ship.db, ship.test, whoever, new AbortController().signal).getReader();
-  expect(await told(lines)).toContain("event: snapshot");
-  mara.sends([mara.reads({ kind: "draft", mark: "AP", round: "before" }, { value: 3.381 })]);
-  expect(await told(lines)).toContain("3.381");
-  const closed = lines.read();
-  tellEnding();
-  expect((await closed).done).toBe(true);
-});
-
 test("a live line ends with the listener's right to see it", async () => {
   const ship = yard();
   let may = true;
@@ -27,6 +15,20 @@ test("a live line ends with the listener's right to see it", async () => {
   const mara = new Phone(ship.db, ship.test, personWith(ship, "reader", "Mara").id);
   mara.sends([mara.reads({ kind: "draft", mark: "AP", round: "before" }, { value: 3.381 })]);
   expect((await lines.read()).done).toBe(true);
+});
+
+test("a live line tells what stands, then each change, and closes at once when the server is asked to end, as every later one", async () => {
+  const ship = yard();
+  const mara = new Phone(ship.db, ship.test, personWith(ship, "reader", "Mara").id);
+  const lines = liveStream(ship.db, ship.test, whoever, new AbortController().signal).getReader();
+  expect(await told(lines)).toContain("event: snapshot");
+  mara.sends([mara.reads({ kind: "draft", mark: "AP", round: "before" }, { value: 3.381 })]);
+  expect(await told(lines)).toContain("3.381");
+  const closed = lines.read();
+  tellEnding();
+  expect((await closed).done).toBe(true);
+  const late = liveStream(ship.db, ship.test, whoever, new AbortController().signal).getReader();
+  expect((await late.read()).done).toBe(true);
 });
 
 async function told(lines: ReadableStreamDefaultReader<Uint8Array>): Promise<string> {

@@ -15,6 +15,8 @@ export async function GET(request: Request, { params }: Context): Promise<Respon
     "content-type": "text/event-stream; charset=utf-8",
     "cache-control": "no-store, no-transform",
     "x-accel-buffering": "no",
+    // a line kept alive would be asked for the next one, and keep the server from ending
+    connection: "close",
   };
   return new Response(liveStream(database(), id, mayStillSee, request.signal), { headers });
 }
