@@ -1,9 +1,11 @@
-import { mkdtempSync, rmSync, statSync } from "node:fs";
+import { mkdtempSync, readFileSync, rmSync, statSync } from "node:fs";
 import { tmpdir } from "node:os";
 import path from "node:path";
 import { afterEach, beforeEach, expect, test } from "vitest";
 import { inTransaction, openDatabase } from "@/db/server/connection";
 import { beginEpoch, identityOf } from "@/db/server/server-identity";
+import { Phone } from "./phone";
+import { personWith, yardIn } from "./yard";
 
 let folder: string;
 beforeEach(() => {
@@ -19,6 +21,41 @@ test("waits for the disk at every commit, also after the first write", () => {
   expect(db.$client.pragma("foreign_keys", { simple: true })).toBe(1);
   expect(db.$client.pragma("busy_timeout", { simple: true })).toBe(5000);
   db.$client.close();
+});
+
+test("still waits for the disk after phones have been answered", () => {
+  const db = openDatabase(path.join(folder, "a.db"));
+  const yard = yardIn(db);
+  const phone = new Phone(db, yard.test, personWith(yard, "reader").id);
+  const slot = { kind: "batten", move: 1, repeat: 1, station: "A", series: 1 } as const;
+  expect(phone.sends([phone.reads(slot, { mode: "settled", valuesMm: [101.5] })]).results).toMatchObject([{ outcome: "applied" }]);
+  expect(db.$client.pragma("synchronous", { simple: true })).toBe(2);
+  db.$client.close();
+});
+
+test("has the bytes of every commit on the disk when the commit returns, as the kernel counts them", () => {
+  const commits = 40;
+  // here and not in the temporary folder, which may be in memory: there nothing is ever written to a disk
+  const onDisk = mkdtempSync(path.resolve(import.meta.dirname, "../../../.data-durability-"));
+  try {
+    const db = openDatabase(path.join(onDisk, "battenbook.db"));
+    db.$client.pragma("wal_autocheckpoint = 0");
+    const commit = () => inTransaction(db, () => beginEpoch(db));
+    const pages = () => {
+      db.$client.pragma("wal_checkpoint(TRUNCATE)");
+      return pagesWrittenTwice(`${db.$client.name}-wal`, () => Array.from({ length: commits }, commit));
+    };
+    const durable = pages();
+    expect(db.$client.pragma("synchronous", { simple: true })).toBe(2);
+    db.$client.pragma("synchronous = NORMAL");
+    const relaxed = pages();
+    db.$client.close();
+    expect(durable).toBeGreaterThan(0.9 * commits);
+    // the same measure where nobody waits: what it finds above is not its own noise
+    expect(relaxed).toBeLessThan(0.2 * commits);
+  } finally {
+    rmSync(onDisk, { recursive: true });
+  }
 });
 
 test("makes the file, its journal and its index readable by the owner alone", () => {
@@ -56,3 +93,20 @@ test("undoes an inner piece of work that fails without undoing what was done aro
   expect(identityOf(db).epoch).toBe(epochs[0]);
   db.$client.close();
 });
+
+/**
+ * How often a page of the journal was handed to the disk and begun again. Commits are written one after the other, and each begins in
+ * the page in which the last one ended: Linux counts that page anew (`write_bytes`) only where it had been written out in between, and
+ * that is what a commit waits for. Source: proc(5), /proc/pid/io.
+ */
+function pagesWrittenTwice(journal: string, work: () => unknown): number {
+  const [bytes, length] = [bytesToDisk(), statSync(journal).size];
+  work();
+  return (bytesToDisk() - bytes - (statSync(journal).size - length)) / 4096;
+}
+
+function bytesToDisk(): number {
+  const counted = /^write_bytes: (\d+)$/m.exec(readFileSync("/proc/self/io", "utf8"))?.[1];
+  if (counted === undefined) throw new Error("the kernel does not count what is written to the disk: durability can't be proved here");
+  return Number(counted);
+}
