@@ -1,3 +1,6 @@
+import { mkdtemp, readdir, rm } from "node:fs/promises";
+import { tmpdir } from "node:os";
+import path from "node:path";
 import { setTimeout as sleep } from "node:timers/promises";
 import { expect, type Page, test } from "@playwright/test";
 import { skerryTern } from "@/db/seed/skerry-tern";
@@ -137,6 +140,21 @@ for (const status of [413, 429, 500, 507]) {
   });
 }
 
+test("a server restored from an older backup gets again from the phone what the backup lacks", async () => {
+  const folder = await mkdtemp(path.join(tmpdir(), "battenbook-backups-"));
+  ship.server.backupFolder = folder;
+  await ship.server.command("db/server/commands/backup.ts");
+  await takeNote("Read after the backup was made");
+  await takeNote("And one more");
+  await settles();
+  await ship.server.kill();
+  const [copy = ""] = (await readdir(folder)).filter((name) => name.endsWith(".db"));
+  expect(await ship.server.command("db/server/commands/restore.ts", path.join(folder, copy))).toContain("New epoch");
+  await ship.server.start();
+  await settles();
+  await rm(folder, { recursive: true });
+});
+
 test("in the end the wheelhouse has each once, the ledger is whole, and the events alone give what stands", async () => {
   await expect(control.getByRole("row", { name: /Blue phone, aft/ })).toContainText(`${taken} taken, ${taken} received`, {
     timeout: 30_000,
@@ -177,5 +195,6 @@ async function expectUnsent(count: number): Promise<void> {
 /** The queue drains, nothing is set aside, and nothing has arrived twice. */
 async function settles(): Promise<void> {
   await sendNow();
-  await expect(hand.page.getByText(`All ${taken} on the server`, { exact: true }).first()).toBeVisible({ timeout: 40_000 });
+  const settled = new RegExp(`^All ${taken} on the server(, (\\d+ )?backed up)?$`);
+  await expect(hand.page.getByText(settled).first()).toBeVisible({ timeout: 40_000 });
 }

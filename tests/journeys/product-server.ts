@@ -18,6 +18,8 @@ export class ProductServer {
     readonly url: string,
   ) {}
 
+  /** Where its backups go; none where null. */
+  backupFolder: string | null = null;
   /** The folder of the build that the next start serves. */
   build = process.env.NEXT_DIST_DIR ?? ".next";
   private child: ChildProcess | null = null;
@@ -105,7 +107,8 @@ export class ProductServer {
 
   private spawned([command = "", ...args]: readonly string[]): ChildProcess {
     const own = { BATTENBOOK_DATA: this.dataFolder, NEXTAUTH_URL: this.url, NEXT_DIST_DIR: this.build };
-    const env = { ...process.env, NODE_ENV: "production" as const, NEXT_TELEMETRY_DISABLED: "1", ...own };
+    const backups = this.backupFolder === null ? {} : { BATTENBOOK_BACKUP_FOLDER: this.backupFolder };
+    const env = { ...process.env, NODE_ENV: "production" as const, NEXT_TELEMETRY_DISABLED: "1", ...own, ...backups };
     const child = spawn(command, args, { cwd: root, env, detached: true, stdio: ["ignore", "pipe", "pipe"] });
     for (const stream of [child.stdout, child.stderr]) stream?.on("data", (chunk) => this.hear(String(chunk)));
     return child;
