@@ -4,6 +4,7 @@ import SqliteDatabase from "better-sqlite3";
 import { type BetterSQLite3Database, drizzle } from "drizzle-orm/better-sqlite3";
 import { migrate } from "drizzle-orm/better-sqlite3/migrator";
 import { databaseFile, makePrivateFile } from "./data-folder";
+import { keepingStatements } from "./kept-statements";
 import { noteOpening } from "./server-identity";
 
 /** One open database; `$client` is the plain SQLite handle for prepared statements. */
@@ -26,7 +27,7 @@ export function openDatabase(file: string): Database {
   client.pragma("journal_mode = WAL");
   client.pragma("foreign_keys = ON");
   client.pragma("synchronous = FULL");
-  const db = drizzle(client);
+  const db = Object.assign(drizzle({ client: keepingStatements(client) }), { $client: client });
   migrate(db, { migrationsFolder: path.join(process.cwd(), "db/migrations") });
   noteOpening(db);
   assertDurable(client);

@@ -6,13 +6,32 @@ import { planSettings, planWaterPlaces } from "../schema/plan";
 import { placedEvents } from "../schema/readings";
 import type { Database } from "./connection";
 import { planRecord } from "./test-plan";
-import { testById } from "./tests";
+import { isTestKnown } from "./tests";
+
+const keptPlans = new WeakMap<Database, Map<string, DuePlan>>();
+
+/** While the work is done, inside a transaction, nobody else can change a plan: each is read once. */
+export function withPlansKept<T>(db: Database, work: () => T): T {
+  keptPlans.set(db, new Map());
+  try {
+    return work();
+  } finally {
+    keptPlans.delete(db);
+  }
+}
 
 /** Which readings are due in a test: its plan, and what the wheelhouse has ordered since. Undefined: no such test here. */
 export function duePlan(db: Database, test: string): { plan: DuePlan; ordered: Ordered } | undefined {
-  if (!testById(db, test)) return undefined;
+  const plan = planIn(db, test);
+  return plan && { plan, ordered: ordered(plan, ordersOf(db, test)) };
+}
+
+function planIn(db: Database, test: string): DuePlan | undefined {
+  const kept = keptPlans.get(db)?.get(test);
+  if (kept || !isTestKnown(db, test)) return kept;
   const plan = { ...planRecord(db, test), waterPlaces: waterPlaces(db, test), rounds: rounds(db, test) };
-  return { plan, ordered: ordered(plan, ordersOf(db, test)) };
+  keptPlans.get(db)?.set(test, plan);
+  return plan;
 }
 
 function waterPlaces(db: Database, test: string): DuePlan["waterPlaces"] {

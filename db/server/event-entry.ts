@@ -4,7 +4,7 @@ import type { Database } from "./connection";
 import { eventById, type StoredEvent } from "./event-store";
 import { writeEntry } from "./ledger-entries";
 import { rolesOf } from "./role-grants";
-import { testById } from "./tests";
+import { isTestKnown } from "./tests";
 
 /**
  * The ledger's entry for an event that has come in, in the chain of its test. What was set aside is entered under who
@@ -12,7 +12,7 @@ import { testById } from "./tests";
  */
 export function writeEventEntry(db: Database, event: StoredEvent): void {
   const read = eventFromText(event.body);
-  const chain = event.test !== null && testById(db, event.test) ? event.test : null;
+  const chain = event.test !== null && isTestKnown(db, event.test) ? event.test : null;
   const arrived = { at: event.receivedAt, device: event.device, contentHash: event.bodyHash };
   if (!read.ok || event.outcome === "quarantined") {
     const { serverSeq, id, code, message } = event;

@@ -9,6 +9,7 @@ import { confirmedTo } from "./backups-made";
 import { tellChange } from "./changes";
 import { type Database, inTransaction } from "./connection";
 import { noteHeard } from "./devices";
+import { withPlansKept } from "./due-plan";
 import { writeEventEntry } from "./event-entry";
 import { nextServerSeq, receiptOf, receivedFrom, type StoredEvent, sameEvent, storeEvent } from "./event-store";
 import { type Judgement, judged, setAside } from "./judgement";
@@ -30,15 +31,16 @@ type Batch = Pick<SyncRequest, "device" | "holds" | "events">;
 export function takeEvents(db: Database, { device, holds, events }: Batch, sender: Sender): SyncAnswer {
   const taken = inTransaction(db, () => {
     noteHeard(db, device, Math.max(0, holds - events.length), sender.at);
-    return events.map((envelope) => takeSafely(db, envelope, device, sender));
+    return withPlansKept(db, () => events.map((envelope) => takeSafely(db, envelope, device, sender)));
   });
   const tests = new Set(taken.flatMap(({ test }) => (test === null ? [] : [test])));
   for (const test of tests) tellChange(test);
   const { highestSeq, missing } = receivedFrom(db, device);
+  const roles = new Map([...tests].map((test) => [test, rolesOf(db, sender.account, test, sender.at)]));
   const last = [...tests].at(-1);
   return {
     server: { ...identityOf(db), time: sender.at },
-    results: taken.map((event) => receiptForRole(receiptOf(event), rolesHere(db, event.test, sender))),
+    results: taken.map((event) => receiptForRole(receiptOf(event), roles.get(event.test ?? "") ?? [])),
     received: events.map(envelopeHash),
     device: { highestSeq, missing },
     confirmedTo: confirmedTo(db),
@@ -97,10 +99,6 @@ function rowOf(body: EventBody | null, envelope: Envelope, arrival: Arrival, jud
     receivedAt: at,
     ...judgement,
   };
-}
-
-function rolesHere(db: Database, test: string | null, { account, at }: Sender) {
-  return test === null ? [] : rolesOf(db, account, test, at);
 }
 
 // a full or locked database is no fault of one event: the whole batch is undone and the phone keeps it

@@ -32,6 +32,11 @@ export function testById(db: Database, id: string): Test | undefined {
   return db.select().from(tests).where(eq(tests.id, id)).get();
 }
 
+/** Whether a test is here, without reading what is known of it. */
+export function isTestKnown(db: Database, id: string): boolean {
+  return db.select({ id: tests.id }).from(tests).where(eq(tests.id, id)).get() !== undefined;
+}
+
 /** Every test on this server, whoever has a part in it; the oldest first. */
 export function everyTest(db: Database): Test[] {
   return db.select().from(tests).orderBy(tests.createdAt, tests.id).all();
