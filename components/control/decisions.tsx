@@ -40,7 +40,7 @@ export function Decisions({ snapshot, acts }: DecisionsProps) {
 function Settling({ decision, snapshot, acts }: { decision: Decision; snapshot: LiveSnapshot; acts: LeadActs | null }) {
   switch (decision.kind) {
     case "disagreement":
-      return <Disagreement due={decision.due} stations={snapshot.record.stations} acts={acts} />;
+      return <Disagreement due={decision.due} record={snapshot.record} acts={acts} />;
     case "move":
       return <p className="mt-1">Agree who orders; then open or close the move once more from here.</p>;
     case "quarantined":

@@ -5,15 +5,18 @@ import { TimeOfDay } from "@/components/ui/time-of-day";
 import type { TestRecord } from "@/lib/record/test-record";
 import type { ReadingDue, StandingReading } from "@/lib/sync/live";
 import type { LeadActs } from "./lead-acts";
+import { offTheFit } from "./off-the-fit";
 import { ReadingFigure } from "./reading-figure";
 import { ResolveForm } from "./resolve-form";
 import { slotInWords } from "./slot-in-words";
 
-type DisagreementProps = { due: ReadingDue; stations: TestRecord["stations"]; acts: LeadActs | null };
+type DisagreementProps = { due: ReadingDue; record: TestRecord; acts: LeadActs | null };
 
-/** The readings of one slot side by side: who read, when, how it came, what; and the form that settles them. */
-export function Disagreement({ due, stations, acts }: DisagreementProps) {
+/** The readings of one slot side by side: what, how far off what the others say, who, when by both clocks, how; and the form that settles them. */
+export function Disagreement({ due, record, acts }: DisagreementProps) {
   const heads = headsOf(due);
+  const off = offTheFit(record, due.slot, heads);
+  const hasFit = off.some((each) => each !== null);
   return (
     <div className="mt-2 grid gap-4 lg:grid-cols-2">
       <DataTable caption={`Readings that disagree: ${slotInWords(due.slot)}`}>
@@ -21,6 +24,7 @@ export function Disagreement({ due, stations, acts }: DisagreementProps) {
           <tr>
             <ColumnHead>Reading</ColumnHead>
             <ColumnHead figure>Value</ColumnHead>
+            {hasFit ? <ColumnHead figure>{due.slot.kind === "batten" ? "Off the line" : "Off the waterline"}</ColumnHead> : null}
             <ColumnHead>Who</ColumnHead>
             <ColumnHead>When</ColumnHead>
             <ColumnHead>How</ColumnHead>
@@ -28,25 +32,31 @@ export function Disagreement({ due, stations, acts }: DisagreementProps) {
         </thead>
         <tbody>
           {heads.map((head, index) => (
-            <HeadRow key={head.event} head={head} letter={letterOf(index)} due={due} />
+            <HeadRow key={head.event} head={head} letter={letterOf(index)} due={due} off={hasFit ? (off[index] ?? "not known") : null} />
           ))}
         </tbody>
       </DataTable>
-      {acts ? <ResolveForm due={due} heads={heads} stations={stations} onResolve={acts.resolve} /> : null}
+      {acts ? <ResolveForm due={due} heads={heads} stations={record.stations} onResolve={acts.resolve} /> : null}
     </div>
   );
 }
 
-function HeadRow({ head, letter, due }: { head: StandingReading; letter: string; due: ReadingDue }) {
+type HeadRowProps = { head: StandingReading; letter: string; due: ReadingDue; off: string | null };
+
+function HeadRow({ head, letter, due, off }: HeadRowProps) {
   return (
     <tr>
       <RowHead>{letter}</RowHead>
       <Cell figure>
         <ReadingFigure value={head.value} kind={due.slot.kind} />
       </Cell>
+      {off === null ? null : <Cell figure>{off}</Cell>}
       <Cell>{head.author}</Cell>
       <Cell>
         <TimeOfDay at={head.capturedAt} />
+        <span className="block text-ink-soft text-small">
+          here <TimeOfDay at={head.receivedAt} />
+        </span>
       </Cell>
       <Cell>
         {head.source === "station" ? "at the station" : head.source === "radio" ? "by radio" : "from paper"}

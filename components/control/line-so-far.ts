@@ -1,4 +1,6 @@
 import type { PlotPoint } from "@/components/charts/plot-points";
+import type { Attitude } from "@/lib/hydrostatics/tank";
+import { battenOffLine } from "@/lib/inclining/batten-off-line";
 import type { FittedPoint, MomentTangentLine, StationLine } from "@/lib/inclining/inclined-ship";
 import { momentTangentLine } from "@/lib/inclining/moment-tangent-line";
 import { attitudeUnder } from "@/lib/inclining/ship-afloat";
@@ -19,11 +21,12 @@ export type LineSoFar = {
 export function lineSoFar(record: TestRecord, so: TestSoFar = testSoFar(record)): LineSoFar | null {
   const { line, afloat } = so;
   if (line === null) return null;
-  const asIf: AsIf = (changed) => momentTangentLine(changed, afloat ? attitudeUnder(afloat.waterline) : undefined);
+  const lies = afloat ? attitudeUnder(afloat.waterline) : undefined;
+  const asIf: AsIf = (changed) => momentTangentLine(changed, lies);
   const counted = line.stations.flatMap((station) => station.commonResiduals.map((point) => pointOnLine(station, point)));
   return {
     line,
-    points: [...counted, ...disagreeing(record, line, asIf), ...excluded(record, line, asIf)],
+    points: [...counted, ...disagreeing(record, line, lies), ...excluded(record, line, asIf)],
     stations: [...new Set(line.stations.map(seriesName))],
   };
 }
@@ -48,12 +51,13 @@ function pointOnLine(station: StationLine, point: FittedPoint): PlotPoint {
 }
 
 /** Each disagreeing reading where it would lie if it alone counted in its slot. */
-function disagreeing(record: TestRecord, line: MomentTangentLine, asIf: AsIf): PlotPoint[] {
+function disagreeing(record: TestRecord, line: MomentTangentLine, lies?: Attitude): PlotPoint[] {
   return record.readings.battens.flatMap((reading) => {
     if (reading.status !== "disagrees" || isReadAgain(record, reading)) return [];
-    const battens = record.readings.battens.map((each) => (each === reading ? { ...each, status: "accepted" as const } : each));
-    const counting = asIf({ ...record, readings: { ...record.readings, battens } });
-    return counting.ok ? hollow(counting.value, line, reading.move, "disagrees").filter(isOf(reading)) : [];
+    const point = battenOffLine(record, line, reading, lies);
+    if (point === null) return [];
+    const { series, move, moment, tan, residual } = point;
+    return [{ station: seriesName(series), move, moment, tangent: tan * PER_METRE, residual: residual * PER_METRE, leftOut: "disagrees" }];
   });
 }
 
@@ -68,10 +72,6 @@ function excluded(record: TestRecord, line: MomentTangentLine, asIf: AsIf): Plot
     const counting = asIf({ ...record, moves });
     return counting.ok ? hollow(counting.value, line, move.no, "its move is excluded") : [];
   });
-}
-
-function isOf({ station, series = 1, session = 1 }: TestRecord["readings"]["battens"][number]) {
-  return (point: PlotPoint) => point.station === seriesName({ id: station, series, session });
 }
 
 // measured from the intercept of the line that counts: a point left out must not bend it
