@@ -1,4 +1,4 @@
-import { createPublicKey, verify } from "node:crypto";
+import { createPublicKey, type KeyObject, verify } from "node:crypto";
 import { type AdmissionFacts, wheelhouse } from "@/lib/sync/admission";
 import { basisOf } from "@/lib/sync/basis";
 import { capturedAt } from "@/lib/sync/captured-at";
@@ -53,9 +53,23 @@ function momentOf(event: EventBody, device: Device | undefined, at: string): str
 /** Null where nothing is signed or no key is known; a signature over other bytes is false. Source: FIPS 186-5, ECDSA on P-256. */
 export function isSignatureGood(device: Pick<Device, "publicKey"> | undefined, envelope: Envelope): boolean | null {
   if (!device?.publicKey || envelope.signature === null) return null;
-  const key = createPublicKey({ key: device.publicKey, format: "jwk" });
+  const key = keyOf(device.publicKey);
   const signature = Buffer.from(envelope.signature, "base64url");
   return verify("sha256", Buffer.from(envelope.body, "utf8"), { key, dsaEncoding: "ieee-p1363" }, signature);
+}
+
+const keys = new Map<string, KeyObject>();
+const MOST_KEYS = 500;
+
+/** A phone sends many events: its key is read once. */
+function keyOf(publicKey: Record<string, unknown>): KeyObject {
+  const text = JSON.stringify(publicKey);
+  const known = keys.get(text);
+  if (known) return known;
+  if (keys.size >= MOST_KEYS) keys.clear();
+  const key = createPublicKey({ key: publicKey, format: "jwk" });
+  keys.set(text, key);
+  return key;
 }
 
 function baseFacts(db: Database, event: EventBody): AdmissionFacts["base"] {
