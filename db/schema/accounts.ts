@@ -40,3 +40,17 @@ export const roleGrants = sqliteTable(
     check("role_grants_in_order", sql`${table.untilAt} is null or ${table.untilAt} >= ${table.fromAt}`),
   ],
 );
+
+/** A link by which its person sets a password, once. Only its hash is kept. */
+export const passwordLinks = sqliteTable("password_links", {
+  id: text("id").primaryKey(),
+  tokenHash: text("token_hash").notNull().unique(),
+  account: text("account")
+    .notNull()
+    .references(() => accounts.id),
+  createdAt: text("created_at").notNull(),
+  /** null: asked for by whoever gave the address */
+  createdBy: text("created_by").references(() => accounts.id),
+  expiresAt: text("expires_at").notNull(),
+  usedAt: text("used_at"),
+});
