@@ -1,10 +1,12 @@
 import { linearFit } from "@/lib/numerics/linear-fit";
-import { mean } from "@/lib/numerics/sum";
+import { mean, sum } from "@/lib/numerics/sum";
 import { answer, type Result, refuse } from "@/lib/result";
-import { type CommonSlope, commonSlope, type NoSpreadInMoment } from "./common-slope";
+import type { CommonSlope, NoSpreadInMoment } from "./common-slope";
 import type { FittedPoint, MomentTangentLine, MoveOnLine, StationLine } from "./inclined-ship";
+import { type LineWeights, slopeThrough, weighingUncertainty, weightOf } from "./line-weights";
 import { type SpreadPoint, slopeSpread } from "./slope-spread";
 import type { StationSeries, TangentOfMove } from "./station-series";
+import type { UncertaintyNotPositive } from "./weighted-slope";
 
 /** The moment that acts at each move, against the zero of its session [t·m]. */
 export type ActingMoment = { readonly no: number; readonly session: number; readonly moment: number };
@@ -16,17 +18,18 @@ export type NoBattenReadings = { readonly type: "NoBattenReadings" };
  * station in each session, never forced through the origin.
  *
  * Beside it each series' own line, each move's mean change of heel, and the spread of the slope (null below three moves).
- * Only moves that some station has read take part.
- * Refused: no reading at all; no two different moments.
+ * Only moves that some station has read take part. `weights`: all readings count alike, or each by how well it is known.
+ * Refused: no reading at all; no two different moments; a reading to be weighed whose uncertainty is zero.
  * Source: IMO 2008 IS Code, part B annex 1 *from memory*.
  */
 export function commonLine(
   series: readonly StationSeries[],
   moments: readonly ActingMoment[],
-): Result<MomentTangentLine, NoBattenReadings | NoSpreadInMoment> {
-  const read = series.map((each) => ({ ...each, points: pointsOf(each, moments) })).filter(({ points }) => points.length > 0);
+  weights: LineWeights = "equal",
+): Result<MomentTangentLine, NoBattenReadings | NoSpreadInMoment | UncertaintyNotPositive> {
+  const read = series.map((each) => ({ ...each, points: pointsOf(each, moments, weights) })).filter(({ points }) => points.length > 0);
   if (read.length === 0) return refuse({ type: "NoBattenReadings" });
-  const fit = commonSlope(read.map(({ points }) => points));
+  const fit = slopeThrough(read.map(({ points }) => points));
   if (!fit.ok) return fit;
   const fitted = read.map((each, j) => fittedSeries(each, j, fit.value));
   const points = fitted.flatMap((each) => each.points);
@@ -38,7 +41,7 @@ export function commonLine(
   });
 }
 
-type ReadPoint = TangentOfMove & { readonly moment: number };
+type ReadPoint = TangentOfMove & { readonly moment: number; readonly weighedBy?: number };
 type ReadSeries = StationSeries & { readonly points: readonly ReadPoint[] };
 type OnLine = SpreadPoint & {
   readonly no: number;
@@ -47,10 +50,11 @@ type OnLine = SpreadPoint & {
 };
 type FittedSeries = Omit<ReadSeries, "points"> & { readonly intercept: number; readonly points: readonly OnLine[] };
 
-function pointsOf({ session, tangents }: StationSeries, moments: readonly ActingMoment[]): readonly ReadPoint[] {
+function pointsOf({ session, tangents }: StationSeries, moments: readonly ActingMoment[], weights: LineWeights): readonly ReadPoint[] {
   return tangents.flatMap((tangent) => {
     const move = moments.find((each) => each.no === tangent.move && each.session === session);
-    return move === undefined ? [] : [{ ...tangent, moment: move.moment }];
+    const weighedBy = weighingUncertainty(weights, tangent);
+    return move === undefined ? [] : [{ ...tangent, moment: move.moment, ...(weighedBy === null ? {} : { weighedBy }) }];
   });
 }
 
@@ -58,7 +62,7 @@ function pointsOf({ session, tangents }: StationSeries, moments: readonly Acting
 function fittedSeries(read: ReadSeries, j: number, { slope, intercepts }: CommonSlope): FittedSeries {
   const intercept = intercepts[j] ?? 0;
   const zero = read.points.find(({ move }) => move === 0)?.tan ?? intercept;
-  const points = read.points.map(({ move, moment, tan, uncertainty }) => ({
+  const points = read.points.map(({ move, moment, tan, uncertainty, weighedBy }) => ({
     no: move,
     move: `${read.session}/${move}`,
     series: j,
@@ -66,6 +70,7 @@ function fittedSeries(read: ReadSeries, j: number, { slope, intercepts }: Common
     moment,
     tan,
     uncertainty,
+    ...(weighedBy === undefined ? {} : { weighedBy }),
     residual: tan - (intercept + slope * moment),
     change: tan - zero,
   }));
@@ -89,13 +94,14 @@ function stationLine({ id, series, session, intercept, points }: FittedSeries): 
   };
 }
 
-function fittedPoint({ no, moment, tan }: OnLine, residual: number): FittedPoint {
-  return { move: no, moment, tan, residual };
+function fittedPoint({ no, moment, tan, weighedBy }: OnLine, residual: number): FittedPoint {
+  return { move: no, moment, tan, residual, ...(weighedBy === undefined ? {} : { weighedBy }) };
 }
 
 function moveOnLine({ no, session, moment }: ActingMoment, points: readonly OnLine[]): readonly MoveOnLine[] {
   const read = points.filter((point) => point.no === no && point.session === session);
   if (read.length === 0) return [];
   const tanHeel = mean(read.map(({ change }) => change));
-  return [{ no, session, moment, tanHeel, residual: mean(read.map(({ residual }) => residual)), stations: read.length }];
+  const residual = sum(read.map((point) => weightOf(point) * point.residual)) / sum(read.map(weightOf));
+  return [{ no, session, moment, tanHeel, residual, stations: read.length }];
 }

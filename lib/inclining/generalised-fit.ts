@@ -1,9 +1,10 @@
 import type { BuoyancyArm } from "@/lib/hydrostatics/buoyancy-arm";
-import { mean, sum } from "@/lib/numerics/sum";
+import { sum } from "@/lib/numerics/sum";
 import { answer, type Result, refuse } from "@/lib/result";
+import { weightOf } from "./line-weights";
 
 /** A tangent observed by one series at one move, and the moment that acted then. */
-export type Observed = { readonly moment: number; readonly tan: number };
+export type Observed = { readonly moment: number; readonly tan: number; readonly weighedBy?: number };
 
 /** The ship does not come back from the heel of a move: KG lies above the metacentre there. */
 export type NoRestAtMove = { readonly type: "NoRestAtMove"; readonly moment: number; readonly vcg: number };
@@ -15,7 +16,7 @@ type Ship = { readonly arm: BuoyancyArm; readonly displacement: number; readonly
  * series. The heel c under a moment M, c₀ at zero moment by the marks:
  *
  *     f(c) − f(c₀) − KG·(c − c₀) = M/Δ,   f(c) = y_B + c·z_B
- *     minimise Σ (tⱼₖ − aⱼ − cₖ)²  over KG and the intercepts aⱼ
+ *     minimise Σ wⱼₖ·(tⱼₖ − aⱼ − cₖ)²  over KG and the intercepts aⱼ;  w = 1 unless the readings are weighed
  *
  * Any form of hull, any heel inside the range of the arm. Gauss–Newton from the classical KG.
  * Refused: a move at which the ship would find no rest.
@@ -30,10 +31,17 @@ export function generalisedVcg(ship: Ship, series: readonly (readonly Observed[]
       const rests = observed.map(({ moment }) => restUnder(ship, moment, vcg));
       const failed = rests.indexOf(null);
       if (failed >= 0) return refuse({ type: "NoRestAtMove", moment: observed[failed]?.moment ?? 0, vcg });
-      const left = centred(observed.map(({ tan }, k) => tan - (rests[k]?.tanHeel ?? 0)));
-      const gradient = centred(rests.map((rest) => rest?.perVcg ?? 0));
-      byGradient += sum(left.map((value, k) => value * (gradient[k] ?? 0)));
-      byGradients += sum(gradient.map((value) => value ** 2));
+      const weights = observed.map(weightOf);
+      const left = centred(
+        observed.map(({ tan }, k) => tan - (rests[k]?.tanHeel ?? 0)),
+        weights,
+      );
+      const gradient = centred(
+        rests.map((rest) => rest?.perVcg ?? 0),
+        weights,
+      );
+      byGradient += sum(left.map((value, k) => (weights[k] ?? 1) * value * (gradient[k] ?? 0)));
+      byGradients += sum(gradient.map((value, k) => (weights[k] ?? 1) * value ** 2));
     }
     const change = byGradient / byGradients;
     vcg += change;
@@ -64,7 +72,7 @@ function restUnder({ arm, displacement, tanHeelAtZero }: Ship, moment: number, v
   return { tanHeel, perVcg: (tanHeel - tanHeelAtZero) / (arm.at(tanHeel).slope - vcg) };
 }
 
-function centred(values: readonly number[]): number[] {
-  const centre = mean(values);
+function centred(values: readonly number[], weights: readonly number[]): number[] {
+  const centre = sum(values.map((value, k) => (weights[k] ?? 1) * value)) / sum(weights);
   return values.map((value) => value - centre);
 }

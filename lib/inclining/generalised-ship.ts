@@ -62,7 +62,7 @@ type Given = { readonly fluid: number; readonly classical: AsInclined; readonly 
 /** Fluid KG at the draft round; the heel at zero of the moves follows from it and is found together with it. */
 function vcgAtDrafts(arms: Arms, afloat: ShipAfloat, line: MomentTangentLine, { fluid, classical, states }: Given): number | null {
   const { tanHeel } = afloat.waterline.plane;
-  const series = line.stations.map(({ commonResiduals }) => commonResiduals.map(({ moment, tan }) => ({ moment, tan })));
+  const series = line.stations.map(({ commonResiduals }) => commonResiduals);
   const displacement = states.displacementAtMoves;
   const isSame = displacement === classical.displacement && states.upward === 0 && states.athwart === 0;
   let tanHeelAtZero = tanHeel;

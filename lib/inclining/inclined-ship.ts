@@ -2,7 +2,14 @@
  * What an inclining test finds, as the story `incliningTest` tells it.
  * Metres, tonnes, t·m, tangents; the frame of `lib/frame.ts`.
  */
-export type FittedPoint = { readonly move: number; readonly moment: number; readonly tan: number; readonly residual: number };
+export type FittedPoint = {
+  readonly move: number;
+  readonly moment: number;
+  readonly tan: number;
+  readonly residual: number;
+  /** standard uncertainty that it is weighed by; left out where all count alike */
+  readonly weighedBy?: number;
+};
 
 /** One series of one station within one session: it has a zero of its own. */
 export type StationLine = {
@@ -28,7 +35,7 @@ export type MoveOnLine = {
   readonly moment: number;
   /** change of heel against the zero of its session, mean over the stations read */
   readonly tanHeel: number;
-  /** mean over the stations of measured − fitted by the common slope */
+  /** mean over the stations of measured − fitted by the common slope, weighed as the line is */
   readonly residual: number;
   readonly stations: number;
 };
@@ -36,6 +43,8 @@ export type MoveOnLine = {
 /** How well the slope is known: from the scatter of the moves, and not less than the readings' own uncertainty gives. */
 export type SlopeSpread = {
   readonly slopeUncertainty: number;
+  /** what the scatter of the moves alone gives */
+  readonly byScatter: number;
   readonly degreesOfFreedom: number;
   /** half of the 95 % interval, relative to the slope */
   readonly halfWidth95: number;

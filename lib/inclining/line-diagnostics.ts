@@ -1,5 +1,5 @@
-import { commonSlope } from "./common-slope";
 import type { AsInclined, FittedPoint, MomentTangentLine, StationLine } from "./inclined-ship";
+import { slopeThrough } from "./line-weights";
 
 /** The line and GM as they would be without one move. */
 export type WithoutMove = {
@@ -21,7 +21,7 @@ export type WithoutMove = {
 export function withoutEachMove(line: MomentTangentLine, ship: Pick<AsInclined, "displacement" | "gmFluid">): readonly WithoutMove[] {
   return line.moves.flatMap(({ no, session }) => {
     const series = line.stations.map((station) => pointsWithout(station, no, session)).filter((points) => points.length > 0);
-    const fit = commonSlope(series);
+    const fit = slopeThrough(series);
     if (!fit.ok || fit.value.slope === 0) return [];
     const { slope } = fit.value;
     const gmFluid = ship.gmFluid + (1 / slope - 1 / line.slope) / ship.displacement;

@@ -43,7 +43,7 @@ function lineAt(
   const upright = { tanHeel: atZero.tanHeel, zeroMoves: (session: number) => zeroMoves(shifts.value, session) };
   const series = stationSeries(test.stations, counted.battens, upright, readingUncertaintyOf(test.uncertainty));
   if (!series.ok) return series;
-  return inside("readings.battens", commonLine(series.value, actingMoments(shifts.value, attitudeAt)));
+  return inside("readings.battens", commonLine(series.value, actingMoments(shifts.value, attitudeAt), test.settings?.weights));
 }
 
 // an inclinometer's zero: move 0, or where its series begins later a move at which the weights stand as at zero

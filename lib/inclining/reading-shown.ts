@@ -29,6 +29,22 @@ export function readingShown(station: Station, reading: BattenValue): Result<num
   return shown.ok && station.reversed ? answer(-shown.value) : shown;
 }
 
+/** Standard uncertainty that the scatter of a reading's own marks or swings gives its resting point, in its unit; null with one only. */
+export function readingScatter(reading: BattenValue): number | null {
+  if ("portMm" in reading) {
+    const legs = [scatterOf(reading.mode, reading.portMm), scatterOf(reading.mode, reading.starboardMm)];
+    return legs.some((leg) => leg === null) ? null : Math.hypot(...legs.map((leg) => leg ?? 0));
+  }
+  return scatterOf(reading.mode, "valuesMm" in reading ? reading.valuesMm : reading.valuesDegrees);
+}
+
+// of n turning points n − 2 centres are taken, each of three neighbours
+function scatterOf(mode: BattenReading["mode"], values: readonly number[]): number | null {
+  const point = restingPoint(mode, values);
+  if (!point.ok || point.value.scatter === null) return null;
+  return point.value.scatter / Math.sqrt(mode === "settled" ? values.length : values.length - 2);
+}
+
 function shownAsMounted({ instrument }: Station, reading: BattenValue): Result<number, ReadingRefusal> {
   if (instrument === "pendulum" && "valuesMm" in reading) return rest(reading.mode, reading.valuesMm, "valuesMm");
   if (instrument === "u-tube" && "portMm" in reading) return differenceOfLegs(reading.mode, reading.portMm, reading.starboardMm);

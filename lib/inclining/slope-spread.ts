@@ -1,6 +1,7 @@
 import { studentTTwoSided95 } from "@/lib/numerics/student-t";
 import { mean, sum } from "@/lib/numerics/sum";
 import type { SlopeSpread } from "./inclined-ship";
+import { weightOf } from "./line-weights";
 
 /** A point of the common line: its own uncertainty is that of the readings behind it. */
 export type SpreadPoint = {
@@ -10,6 +11,7 @@ export type SpreadPoint = {
   readonly moment: number;
   readonly residual: number;
   readonly uncertainty: number;
+  readonly weighedBy?: number;
 };
 
 /**
@@ -19,6 +21,10 @@ export type SpreadPoint = {
  *     s² = Σ ēₖ² / (K − 1 − S),   u(slope)² = s² / Σ (Mₖ − M̄)²
  *
  * and not less than the readings' own uncertainty gives, u(slope)² = Σ (Mⱼₖ − M̄ⱼ)²·uⱼₖ² / (Σ (Mⱼₖ − M̄ⱼ)²)².
+ * Where readings are weighed (w), ēₖ is the weighted mean, and the slope is moved by each tangent as
+ *
+ *     pⱼₖ = wⱼₖ(Mⱼₖ − M̄ⱼ) / Σ w(M − M̄)²,   u(slope)² = s²·Σₖ (Σⱼ pⱼₖ)²,   and not less than Σ (p·u)²
+ *
  * Half width at 95 % by Student's t of K − 1 − S degrees of freedom, relative to the slope.
  * Null where no degree of freedom is left.
  * Source: JCGM 100:2008, 4.2 and annex G *from memory*.
@@ -28,10 +34,11 @@ export function slopeSpread(slope: number, points: readonly SpreadPoint[]): Slop
   const degreesOfFreedom = moves.length - 1 - new Set(moves.map(({ session }) => session)).size;
   if (degreesOfFreedom < 1) return null;
   const betweenMoves = Math.sqrt(sum(moves.map(({ residual }) => residual ** 2)) / degreesOfFreedom);
-  const byScatter = betweenMoves / Math.sqrt(sum(aboutMeans(moves, ({ session }) => session).map(({ lever }) => lever ** 2)));
+  const byScatter = betweenMoves * pullOfMoves(points, moves);
   const slopeUncertainty = Math.max(byScatter, uncertaintyByReadings(points));
   return {
     slopeUncertainty,
+    byScatter,
     degreesOfFreedom,
     halfWidth95: (studentTTwoSided95(degreesOfFreedom) * slopeUncertainty) / Math.abs(slope),
     betweenMoves,
@@ -41,13 +48,26 @@ export function slopeSpread(slope: number, points: readonly SpreadPoint[]): Slop
 
 function moveMean(points: readonly SpreadPoint[]) {
   const { session, moment } = points[0] ?? { session: 1, moment: 0 };
-  return { session, moment, residual: mean(points.map(({ residual }) => residual)) };
+  return { session, moment, residual: weightedMean(points, ({ residual }) => residual) };
+}
+
+/** How far the slope moves for an error of one that is common to all stations of a move, the moves' errors independent. */
+function pullOfMoves(points: readonly SpreadPoint[], moves: readonly ReturnType<typeof moveMean>[]): number {
+  if (points.every(({ weighedBy }) => weighedBy === undefined)) {
+    return 1 / Math.sqrt(sum(aboutMeans(moves, ({ session }) => session).map(({ lever }) => lever ** 2)));
+  }
+  const byMove = [...grouped(pulls(points), ({ of }) => of.move).values()];
+  return Math.sqrt(sum(byMove.map((ofMove) => sum(ofMove.map(({ pull }) => pull)) ** 2)));
 }
 
 function uncertaintyByReadings(points: readonly SpreadPoint[]): number {
-  const levers = aboutMeans(points, ({ series }) => series);
-  const squared = sum(levers.map(({ lever, of }) => (lever * of.uncertainty) ** 2));
-  return Math.sqrt(squared) / sum(levers.map(({ lever }) => lever ** 2));
+  return Math.sqrt(sum(pulls(points).map(({ pull, of }) => (pull * of.uncertainty) ** 2)));
+}
+
+function pulls(points: readonly SpreadPoint[]) {
+  const levers = aboutMeans(points, ({ series }) => series).map(({ of, lever }) => ({ of, lever, weight: weightOf(of) }));
+  const all = sum(levers.map(({ lever, weight }) => weight * lever ** 2));
+  return levers.map(({ of, lever, weight }) => ({ of, pull: (weight * lever) / all }));
 }
 
 /** Scatter of the stations about their move's mean; a station's own intercept and a move's mean each take a degree of freedom. */
@@ -63,11 +83,19 @@ function scatterWithinMoves(points: readonly SpreadPoint[], moves: number): numb
   return Math.sqrt(sum(deviations) / degreesOfFreedom);
 }
 
-function aboutMeans<T extends { readonly moment: number }>(points: readonly T[], groupOf: (point: T) => string | number) {
+function aboutMeans<T extends { readonly moment: number; readonly weighedBy?: number }>(
+  points: readonly T[],
+  groupOf: (point: T) => string | number,
+) {
   return [...grouped(points, groupOf).values()].flatMap((group) => {
-    const centre = mean(group.map(({ moment }) => moment));
+    const centre = weightedMean(group, ({ moment }) => moment);
     return group.map((of) => ({ of, lever: of.moment - centre }));
   });
+}
+
+function weightedMean<T extends { readonly weighedBy?: number }>(of: readonly T[], numberOf: (one: T) => number): number {
+  if (of.every(({ weighedBy }) => weighedBy === undefined)) return mean(of.map(numberOf));
+  return sum(of.map((one) => weightOf(one) * numberOf(one))) / sum(of.map(weightOf));
 }
 
 function grouped<T>(points: readonly T[], groupOf: (point: T) => string | number): Map<string | number, T[]> {

@@ -1,7 +1,7 @@
-import { mean } from "@/lib/numerics/sum";
+import { mean, standardDeviation } from "@/lib/numerics/sum";
 import { answer, type Result, refuse } from "@/lib/result";
 import { type Faults, gathered, inside, refuseFaults } from "./faults";
-import { readingShown } from "./reading-shown";
+import { readingScatter, readingShown } from "./reading-shown";
 import type { ReadingUncertainty } from "./reading-uncertainty";
 import type { Looks } from "./readings-that-count";
 import { type AngleAtZero, type TangentScale, tangentScale } from "./tangent-scale";
@@ -16,8 +16,11 @@ export type StationSeries = {
   readonly tangents: readonly TangentOfMove[];
 };
 
-/** The tangent of one move on the station's own scale, and the standard uncertainty that its readings alone give it. */
-export type TangentOfMove = { readonly move: number; readonly tan: number; readonly uncertainty: number };
+/**
+ * The tangent of one move on the station's own scale, and the standard uncertainty that its readings alone give it: as stated
+ * for every reading, and by the scatter of its own marks, swings or looks, left out where there was one mark only.
+ */
+export type TangentOfMove = { readonly move: number; readonly tan: number; readonly uncertainty: number; readonly scatter?: number };
 
 /** What angles lean on: the heel at zero by the marks, and the moves at which an inclinometer's zero may be read, best first. */
 export type Upright = { readonly tanHeel: number; readonly zeroMoves: (session: number) => readonly number[] };
@@ -47,7 +50,7 @@ type SeriesSlots = {
   readonly session: number;
   readonly slots: readonly Looks<BattenReading>[];
 };
-type Shown = { readonly move: number; readonly shown: number; readonly looks: number };
+type Shown = { readonly move: number; readonly shown: number; readonly scatter: number | null; readonly looks: number };
 
 function oneSeries(
   stations: readonly Station[],
@@ -69,12 +72,25 @@ function oneSeries(
 function shownAtMove(station: Station, looks: Looks<BattenReading>): Result<Shown, Faults> {
   const values = gathered(looks.map(({ value, path }) => inside(path, readingShown(station, value))));
   if (!values.ok) return values;
-  return answer({ move: looks[0]?.value.move ?? 0, shown: mean(values.value), looks: looks.length });
+  return answer({
+    move: looks[0]?.value.move ?? 0,
+    shown: mean(values.value),
+    scatter: scatterOfLooks(looks, values.value),
+    looks: looks.length,
+  });
 }
 
-function tangentOfMove({ move, shown, looks }: Shown, scale: TangentScale): TangentOfMove {
+// several looks tell by themselves how they scatter; one look only by its marks
+function scatterOfLooks(looks: Looks<BattenReading>, shown: readonly number[]): number | null {
+  const [only, ...others] = looks;
+  if (others.length > 0) return standardDeviation(shown) / Math.sqrt(shown.length);
+  return only ? readingScatter(only.value) : null;
+}
+
+function tangentOfMove({ move, shown, scatter, looks }: Shown, scale: TangentScale): TangentOfMove {
   const { tan, uncertainty } = scale(shown);
-  return { move, tan, uncertainty: uncertainty / Math.sqrt(looks) };
+  const read = { move, tan, uncertainty: uncertainty / Math.sqrt(looks) };
+  return scatter === null ? read : { ...read, scatter: Math.abs(scale(shown + scatter).tan - tan) };
 }
 
 function angleAtZero(

@@ -3,6 +3,7 @@ import type { HydrostaticTable } from "@/lib/hydrostatics/hydrostatic-table";
 import type { DraftMark, FreeboardMark } from "@/lib/hydrostatics/mark-point";
 import type { Tank } from "@/lib/hydrostatics/tank";
 import type { Hydrometer } from "@/lib/hydrostatics/water-density";
+import type { LineWeights } from "./line-weights";
 import type { ReadingUncertainty } from "./reading-uncertainty";
 import type { Aboard, Move, Station, TestWeight } from "./test-plan";
 import type { TestReadings } from "./test-readings";
@@ -27,4 +28,5 @@ export type IncliningTestData = {
   readonly hydrometers?: readonly Hydrometer[];
   readonly readings: TestReadings;
   readonly uncertainty?: Partial<ReadingUncertainty>;
+  readonly settings?: { readonly weights?: LineWeights };
 };

@@ -30,7 +30,7 @@ export type IncliningResult = {
     readonly residuals: Readonly<Record<string, number>>;
   };
   readonly hydrostatics: Omit<ShipHydrostatics, "kml">;
-  readonly fit: SlopeSpread & {
+  readonly fit: Omit<SlopeSpread, "byScatter"> & {
     readonly slope: number;
     readonly stations: readonly StationResult[];
     readonly moves: readonly MoveResult[];
@@ -98,9 +98,10 @@ function hydrostaticsResult({ afloat }: InclinedShip): IncliningResult["hydrosta
 }
 
 function fitResult({ line, afloat }: InclinedShip, { aboard }: LightshipTestData): IncliningResult["fit"] {
+  const { byScatter: _, ...spread } = line.spread;
   return {
     slope: line.slope,
-    ...line.spread,
+    ...spread,
     stations: line.stations.map(stationResult),
     moves: line.moves.map((move) => {
       const { no, session, moment, tanHeel } = move;

@@ -2,7 +2,6 @@ import type { Faults } from "@/lib/inclining/faults";
 import type { JudgedLine } from "@/lib/inclining/inclining-test";
 import { type InclinedShip, incliningTest } from "@/lib/inclining/inclining-test";
 import { studentTTwoSided95 } from "@/lib/numerics/student-t";
-import { mean, sum } from "@/lib/numerics/sum";
 import { answer, type Result } from "@/lib/result";
 import { type BudgetLine, budgetOf } from "@/lib/uncertainty/budget";
 import { type LocalExpansion, localExpansion } from "@/lib/uncertainty/local-expansion";
@@ -81,19 +80,9 @@ function lightshipNumbers(ship: InclinedShip, test: LightshipTestData): Result<r
  * uncertainty gives, whichever leaves the wider 95 % interval. What scatter shows holds for gusts that every station felt
  * as well as for each reading's own error.
  */
-function lineUncertainty({ slope, spread, moves }: JudgedLine): LineUncertainty {
-  const { betweenMoves, degreesOfFreedom, slopeUncertainty } = spread;
-  const scattered = betweenMoves / Math.sqrt(sum(leversOf(moves).map((lever) => lever ** 2)));
-  const isScatter = studentTTwoSided95(degreesOfFreedom) * scattered >= 1.959964 * slopeUncertainty;
-  if (isScatter) return { relative: scattered / slope, degreesOfFreedom };
+function lineUncertainty({ slope, spread }: JudgedLine): LineUncertainty {
+  const { byScatter, degreesOfFreedom, slopeUncertainty } = spread;
+  const isScatter = studentTTwoSided95(degreesOfFreedom) * byScatter >= 1.959964 * slopeUncertainty;
+  if (isScatter) return { relative: byScatter / slope, degreesOfFreedom };
   return { relative: slopeUncertainty / slope, degreesOfFreedom: null };
-}
-
-function leversOf(moves: JudgedLine["moves"]): number[] {
-  const sessions = [...new Set(moves.map(({ session }) => session))];
-  return sessions.flatMap((session) => {
-    const moments = moves.filter((move) => move.session === session).map(({ moment }) => moment);
-    const centre = mean(moments);
-    return moments.map((moment) => moment - centre);
-  });
 }

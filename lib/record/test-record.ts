@@ -12,7 +12,7 @@ import {
   tankSchema,
   weightSchema,
 } from "./plan-schema";
-import { name, nonNegative, ordinal, positive, text, time } from "./quantities";
+import { name, nonNegative, positive, text, time } from "./quantities";
 import {
   battenReadingSchema,
   conditionReadingSchema,
@@ -20,14 +20,7 @@ import {
   soundingReadingSchema,
   waterReadingSchema,
 } from "./readings-schema";
-
-const agreementSchema = z.strictObject({
-  battenMm: positive,
-  degrees: positive,
-  draft: positive,
-  sounding: positive,
-  density: positive,
-});
+import { settingsSchema } from "./settings-schema";
 
 /** Standard uncertainties; a key left out is zero. */
 const uncertaintySchema = z
@@ -78,14 +71,7 @@ export const testRecordSchema = z.strictObject({
     water: z.array(waterReadingSchema),
     conditions: z.array(conditionReadingSchema).optional(),
   }),
-  settings: z
-    .strictObject({
-      method: z.enum(["classical", "generalised"]).optional(),
-      seed: z.number().int().optional(),
-      draws: ordinal.optional(),
-      agreement: agreementSchema.optional(),
-    })
-    .optional(),
+  settings: settingsSchema.optional(),
   uncertainty: uncertaintySchema.optional(),
   people: z.array(z.unknown()).optional(),
   devices: z.array(z.strictObject({ id: z.uuid(), publicKey: z.record(z.string(), z.unknown()) })).optional(),
