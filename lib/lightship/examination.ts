@@ -1,4 +1,4 @@
-import { type CheckLimits, usualLimits } from "@/lib/inclining/checks/check-limits";
+import { type CheckLimits, limitsOf } from "@/lib/inclining/checks/check-limits";
 import type { Finding } from "@/lib/inclining/checks/finding";
 import { uncertaintyOfMove } from "@/lib/inclining/checks/movement-checks";
 import { type Faults, inside } from "@/lib/inclining/faults";
@@ -12,7 +12,12 @@ import { type Lightship, lightshipBalance, lightshipOf } from "./lightship";
 export type Examination = { readonly checks: readonly Finding[]; readonly hints: readonly Hint[] };
 
 /** The findings of a test and what its plot tells, by the ship and the lightship that it found. */
-export function examinationOf(test: CheckedTest, ship: InclinedShip, lightship: Lightship, limits: CheckLimits = usualLimits): Examination {
+export function examinationOf(
+  test: CheckedTest,
+  ship: InclinedShip,
+  lightship: Lightship,
+  limits: CheckLimits = limitsOf(test),
+): Examination {
   return { checks: checksOf(test, ship, lightship, limits), hints: plotHints(ship.line, uncertaintyOfMove(test, ship.line)) };
 }
 

@@ -8,13 +8,14 @@ const sources: Readonly<Record<CheckId, string>> = {
   stations: `${isCode}, ch. 8; one below 30 m: class practice (from memory)`,
   "unequal-lengths": `${isCode}, annex 1 (from memory); IMO gives no number`,
   movements: `${isCode}, 8.4.1.2`,
-  straightness: `statistical test at 95 %; IMO gives no number (${isCode}, 8.4.1.2 asks for a straight line)`,
+  straightness: `statistical test; IMO gives no number (${isCode}, 8.4.1.2 asks for a straight line)`,
   "station-agreement": "common practice; IMO gives no number",
   "station-sense": "common practice",
   "zero-drift": `${isCode}, 8.4.1.2 rechecks the zero; IMO gives no number`,
   "initial-list": `${isCode}, annex 1 (from memory)`,
   trim: "class practice; 46 CFR (from memory)",
   "waterline-marks": `${isCode}, 8.4.1.1`,
+  "mark-agreement": "common practice; no standard gives a number",
   "drafts-before-after": "common practice",
   "water-samples": `${isCode}, annex 1 (from memory)`,
   "slack-tanks": `${isCode}, annex 1 (from memory)`,
@@ -32,8 +33,12 @@ const sources: Readonly<Record<CheckId, string>> = {
 
 const ofSister = "MSC/Circ.1158, sister ships";
 
-/** Where the limit of a check comes from. */
+/** Where the limit of a check comes from; one that the test sets for itself is called so, beside the source of the usual one. */
 export function checkSource(finding: Finding): string {
+  return finding.isSetForTest ? `a setting of this test, in place of the usual limit (${usualSource(finding)})` : usualSource(finding);
+}
+
+function usualSource(finding: Finding): string {
   const isOfSister = finding.id === "previous-displacement" || finding.id === "previous-lcg";
   return isOfSister && finding.found.kind === "sister" ? ofSister : sources[finding.id];
 }

@@ -1,5 +1,5 @@
 import type { Change, CheckId, Finding, Verdict } from "@/lib/inclining/checks/finding";
-import { figure, signedFigure } from "./rounding";
+import { figure, shortFigure, signedFigure } from "./rounding";
 
 type Of<Id extends CheckId> = Extract<Finding, { readonly id: Id }>;
 type Words<Id extends CheckId> = {
@@ -12,22 +12,23 @@ const words: { readonly [Id in CheckId]: Words<Id> } = {
   "heel-range": {
     name: "Heel to each side",
     found: (found) => bothSides(found, (side) => `${figure(side, 2)}°`),
-    limit: ({ least, most }) => `${figure(least, 0)}° to ${figure(most, 0)}° each side`,
+    limit: ({ least, most }) => `${shortFigure(least)}° to ${shortFigure(most)}° each side`,
   },
   deflection: {
     name: "Deflection of the pendulums",
     found: ({ station, ...sides }) => `station ${station} least: ${bothSides(sides, (side) => `${figure(side, 0)} mm`)}`,
-    limit: ({ leastMm }) => `at least ${figure(leastMm, 0)} mm each side`,
+    limit: ({ leastMm }) => `at least ${shortFigure(leastMm)} mm each side`,
   },
   stations: {
     name: "Stations",
     found: ({ stations }) => counted(stations, "station"),
-    limit: ({ recommended, least }) => `${recommended} recommended, at least ${least}; one may be accepted by class below 30 m`,
+    limit: ({ recommended, least, smallShip }) =>
+      `${recommended} recommended, at least ${least}; one less may be accepted by class below ${shortFigure(smallShip)} m`,
   },
   "unequal-lengths": {
     name: "Lengths of the pendulums",
     found: ({ lengths }) => `${lengths.map((length) => figure(length, 3)).join(", ")} m`,
-    limit: ({ share }) => `unequal: more than ${percent(share, 0)} apart (a setting)`,
+    limit: ({ share }) => `unequal: more than ${limitPercent(share)} apart (a setting)`,
   },
   movements: {
     name: "Weight movements",
@@ -38,7 +39,7 @@ const words: { readonly [Id in CheckId]: Words<Id> } = {
   "station-agreement": {
     name: "Agreement of the stations",
     found: ({ station, deviation }) => `station ${station}: ${signedPercent(deviation)} off the common slope`,
-    limit: ({ share }) => `at most ${percent(share, 1)} (a setting)`,
+    limit: ({ share }) => `at most ${limitPercent(share)} (a setting)`,
   },
   "station-sense": {
     name: "Sense of the stations",
@@ -49,24 +50,29 @@ const words: { readonly [Id in CheckId]: Words<Id> } = {
     name: "Drift of zero",
     found: ({ drift, heel }) =>
       drift === null ? "zero was read once only" : `${signedFigure(1000 * drift, 2)} mm per m of ${figure(1000 * heel, 1)} mm per m`,
-    limit: ({ share }) => `at most ${percent(share, 0)} of the largest heel (a setting)`,
+    limit: ({ share }) => `at most ${limitPercent(share)} of the largest heel (a setting)`,
   },
   "initial-list": {
     name: "List at zero",
     found: ({ degrees }) => `${figure(Math.abs(degrees), 2)}°${degrees === 0 ? "" : degrees > 0 ? " to starboard" : " to port"}`,
-    limit: ({ most }) => `at most ${figure(most, 1)}°`,
+    limit: ({ most }) => `at most ${shortFigure(most)}°`,
   },
   trim: {
     name: "Trim and the hydrostatics",
     found: ({ beyond, share }) =>
       beyond === 0 ? "hydrostatics at the measured trim" : `${signedFigure(beyond, 3)} m beyond theirs, ${percent(share, 2)} of length`,
-    limit: ({ share }) => `at most ${percent(share, 0)} of length beyond their trim`,
+    limit: ({ share }) => `at most ${limitPercent(share)} of length beyond their trim`,
   },
   "waterline-marks": {
     name: "Marks and freeboards read",
     found: ({ freeboards, marks, unread }) =>
       `freeboards ${sides(freeboards)}, draft marks ${sides(marks)}${unread === 0 ? "" : `, ${unread} unread`}`,
     limit: ({ freeboards }) => `${freeboards} freeboards a side, or all draft marks on both sides`,
+  },
+  "mark-agreement": {
+    name: "Agreement of the marks",
+    found: markAgreementFound,
+    limit: ({ most }) => `none off by more than ${figure(most, 3)} m (a setting)`,
   },
   "drafts-before-after": {
     name: "Drafts before and after",
@@ -81,7 +87,7 @@ const words: { readonly [Id in CheckId]: Words<Id> } = {
   "slack-tanks": {
     name: "Slack tanks",
     found: ({ slack }) => (slack.length === 0 ? "none" : slack.join(", ")),
-    limit: () => "one pair, or one on the centreline",
+    limit: ({ groups }) => (groups === 1 ? "one pair, or one on the centreline" : `at most ${groups} pairs or tanks on the centreline`),
   },
   "slack-levels": {
     name: "Filling of slack tanks",
@@ -90,7 +96,7 @@ const words: { readonly [Id in CheckId]: Words<Id> } = {
         ? `${counted(judged, "tank")} within`
         : outside.map(({ tank, filled }) => `${tank} filled to ${percent(filled, 0)}`).join(", "),
     limit: ({ deep, doubleBottom }) =>
-      `deep tanks ${percent(deep[0], 0)} to ${percent(deep[1], 0)}, double bottom ${percent(doubleBottom[0], 0)} to ${percent(doubleBottom[1], 0)}`,
+      `deep tanks ${limitPercent(deep[0])} to ${limitPercent(deep[1])}, double bottom ${limitPercent(doubleBottom[0])} to ${limitPercent(doubleBottom[1])}`,
   },
   "soundings-before-after": {
     name: "Soundings before and after",
@@ -101,7 +107,7 @@ const words: { readonly [Id in CheckId]: Words<Id> } = {
   "under-keel": {
     name: "Clearance under the keel",
     found: (found) => (found === null ? "not noted" : `${figure(found.least, 1)} m at least`),
-    limit: ({ least }) => `clear of the bottom; at least ${figure(least, 1)} m (a setting)`,
+    limit: ({ least }) => `clear of the bottom; at least ${shortFigure(least)} m (a setting)`,
   },
   certificates: {
     name: "Certificates",
@@ -155,7 +161,16 @@ function straightnessFound({ standardised, move, probability }: Of<"straightness
 
 function straightnessLimit({ standardised, probability }: Of<"straightness">["limit"]): string {
   const most = standardised === null ? "" : `at most ${figure(standardised, 1)} standard deviations; `;
-  return `${most}lack of fit not below ${percent(probability, 0)} (a setting)`;
+  return `${most}lack of fit not below ${limitPercent(probability)} (a setting)`;
+}
+
+function markAgreementFound({ suspects, marks, degreesOfFreedom }: Of<"mark-agreement">["found"]): string {
+  if (degreesOfFreedom === 0) return `${marks} marks just suffice: nothing tells whether they agree`;
+  if (suspects.length === 0) return `${marks} marks agree with one waterplane`;
+  const each = suspects.map(({ mark, error }) => `${mark} (by ${signedFigure(error, 3)} m)`);
+  const [only, ...others] = each;
+  if (others.length === 0) return `read ${only} again: it alone would explain the misfit`;
+  return `read again: one of ${each.join(", ")} may be wrong, and these marks can’t tell which`;
 }
 
 function changeFound(found: Change): string {
@@ -172,7 +187,7 @@ function ofLightship({ share }: { readonly share: number }): string {
 }
 
 function mostOfLightship({ share }: { readonly share: number }): string {
-  return `at most ${percent(share, 0)} of the lightship`;
+  return `at most ${limitPercent(share)} of the lightship`;
 }
 
 function comparedFound({ kind, deviation }: Of<"previous-lcg">["found"]): string {
@@ -193,6 +208,11 @@ function counted(count: number, what: string): string {
 
 function percent(share: number, decimals: number): string {
   return `${figure(100 * share, decimals)} %`;
+}
+
+// a limit stands as it was set
+function limitPercent(share: number): string {
+  return `${shortFigure(100 * share)} %`;
 }
 
 function signedPercent(share: number): string {

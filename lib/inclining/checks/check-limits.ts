@@ -19,6 +19,8 @@ export type CheckLimits = {
   readonly trim: number;
   readonly freeboards: number;
   readonly largeShip: number;
+  /** of a mark against the waterplane that all marks agree on [m] */
+  readonly markError: number;
   readonly draftChange: number;
   readonly soundingChange: number;
   readonly slackGroups: number;
@@ -31,7 +33,7 @@ export type CheckLimits = {
 
 /**
  * The limits of a test that sets none of its own. Those that no standard fixes are settings: equal lengths, agreement of
- * stations, drift of zero, straightness, what counts as a large ship, changes between rounds, clearance under the keel.
+ * stations, drift of zero, straightness, what counts as a large ship, agreement of the marks, changes between rounds, clearance under the keel.
  *
  * Source: `checkSource` of each check.
  */
@@ -49,6 +51,7 @@ export const usualLimits: CheckLimits = {
   trim: 0.01,
   freeboards: 5,
   largeShip: 90,
+  markError: 0.02,
   draftChange: 0.02,
   soundingChange: 0.01,
   slackGroups: 1,
@@ -58,3 +61,11 @@ export const usualLimits: CheckLimits = {
   missing: 0.02,
   surplus: 0.04,
 };
+
+/** The limits of a test: its own where it sets them, the usual ones otherwise. */
+export function limitsOf({ settings }: Limited): CheckLimits {
+  return { ...usualLimits, ...settings?.limits };
+}
+
+/** A test that may set limits of its own. */
+export type Limited = { readonly settings?: { readonly limits?: Partial<CheckLimits> } };

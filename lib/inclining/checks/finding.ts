@@ -1,3 +1,5 @@
+import type { MarkSuspect } from "@/lib/hydrostatics/mark-suspects";
+
 /** What an engineer makes of a finding is for the engineer to say; a finding only sets what was found beside a limit. */
 export type Verdict = "met" | "attention" | "not-met";
 
@@ -8,7 +10,11 @@ export type CheckFacts = {
   "heel-range": { readonly found: Sides; readonly limit: { readonly least: number; readonly most: number } };
   /** of the pendulum whose bob moved least */
   deflection: { readonly found: Sides & { readonly station: string }; readonly limit: { readonly leastMm: number } };
-  stations: { readonly found: { readonly stations: number }; readonly limit: { readonly recommended: number; readonly least: number } };
+  stations: {
+    readonly found: { readonly stations: number };
+    /** below `smallShip` [m] one less than the least may be accepted */
+    readonly limit: { readonly recommended: number; readonly least: number; readonly smallShip: number };
+  };
   "unequal-lengths": { readonly found: { readonly lengths: readonly number[] }; readonly limit: { readonly share: number } };
   "station-agreement": {
     readonly found: { readonly station: string; readonly deviation: number };
@@ -36,6 +42,11 @@ export type CheckFacts = {
   "waterline-marks": {
     readonly found: { readonly freeboards: Sides; readonly marks: Sides; readonly unread: number };
     readonly limit: { readonly freeboards: number };
+  };
+  "mark-agreement": {
+    /** marks among which a reading hides that no waterplane agrees with, each with the error that it alone would have to have */
+    readonly found: { readonly suspects: readonly MarkSuspect[]; readonly marks: number; readonly degreesOfFreedom: number };
+    readonly limit: { readonly most: number };
   };
   "water-samples": {
     readonly found: { readonly places: number; readonly deepest: number };
@@ -75,7 +86,12 @@ export type Compared = {
 export type CheckId = keyof CheckFacts;
 
 /** One check: what was found, the limit, and what stands between them. */
-export type Finding = { readonly [Id in CheckId]: { readonly id: Id; readonly verdict: Verdict } & CheckFacts[Id] }[CheckId];
+export type Finding = {
+  readonly [Id in CheckId]: { readonly id: Id; readonly verdict: Verdict } & CheckFacts[Id] & SetForTest;
+}[CheckId];
+
+/** Present where the limit is one that the test sets for itself, in place of the usual one. */
+type SetForTest = { readonly isSetForTest?: true };
 
 /** Met or not, for limits that a standard sets. */
 export function metOrNot(isMet: boolean): Verdict {

@@ -1,3 +1,4 @@
+import { markSuspects } from "@/lib/hydrostatics/mark-suspects";
 import { mean } from "@/lib/numerics/sum";
 import { readingsThatCount } from "../readings-that-count";
 import type { ShipAfloat } from "../ship-afloat";
@@ -18,6 +19,17 @@ export function waterlineMarks(test: IncliningTestData, { freeboards: least }: C
   const byMarks = unread === 0 && marks.port > 0 && marks.port === marks.starboard;
   const found = { freeboards: freeboardSides, marks, unread };
   return { id: "waterline-marks", verdict: metOrAttention(byFreeboards || byMarks), found, limit: { freeboards: least } };
+}
+
+/**
+ * Whether one waterplane agrees with every mark. Where it does not, the marks to read again: several where the arrangement
+ * can't tell which of them is wrong. Marks that just suffice contradict nothing, and that is for looking at.
+ */
+export function markAgreement({ waterline }: ShipAfloat, { markError: most }: CheckLimits): Finding {
+  const { marks, degreesOfFreedom } = waterline;
+  const suspects = markSuspects(waterline, most);
+  const verdict = metOrAttention(suspects.length === 0 && degreesOfFreedom > 0);
+  return { id: "mark-agreement", verdict, found: { suspects, marks, degreesOfFreedom }, limit: { most } };
 }
 
 /** Where and how deep the water was sampled; a large ship needs three places: fore, midships and aft. */

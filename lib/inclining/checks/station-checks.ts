@@ -11,7 +11,7 @@ export function stationCount({ vessel }: IncliningTestData, { stations }: Moment
   const read = new Set(stations.map(({ id }) => id)).size;
   const isAccepted = read >= least || (read === least - 1 && vessel.lbp < limits.smallShip);
   const verdict = read >= recommended ? "met" : isAccepted ? "attention" : "not-met";
-  return { id: "stations", verdict, found: { stations: read }, limit: { recommended, least } };
+  return { id: "stations", verdict, found: { stations: read }, limit: { recommended, least, smallShip: limits.smallShip } };
 }
 
 /** Whether the pendulums differ in length, so that they do not swing in step. Nothing with fewer than two. */

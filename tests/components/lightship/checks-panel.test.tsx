@@ -31,7 +31,7 @@ describe("the checks of a test", () => {
         checks={[
           { id: "headcount", verdict: "attention", found: null, limit: null },
           { id: "initial-list", verdict: "not-met", found: { degrees: 0.7 }, limit: { most: 0.5 } },
-          { id: "stations", verdict: "met", found: { stations: 3 }, limit: { recommended: 3, least: 2 } },
+          { id: "stations", verdict: "met", found: { stations: 3 }, limit: { recommended: 3, least: 2, smallShip: 30 } },
         ]}
       />,
     );

@@ -19,8 +19,8 @@ const every: { readonly [Id in CheckId]: FindingOf<Id> & { readonly words: reado
   },
   stations: {
     found: { stations: 1 },
-    limit: { recommended: 3, least: 2 },
-    words: ["1 station", "3 recommended, at least 2; one may be accepted by class below 30 m"],
+    limit: { recommended: 3, least: 2, smallShip: 30 },
+    words: ["1 station", "3 recommended, at least 2; one less may be accepted by class below 30 m"],
   },
   "unequal-lengths": {
     found: { lengths: [3.98, 4.5] },
@@ -43,7 +43,7 @@ const every: { readonly [Id in CheckId]: FindingOf<Id> & { readonly words: reado
   "station-agreement": {
     found: { station: "B", deviation: -0.0123 },
     limit: { share: 0.02 },
-    words: ["station B: −1.23 % off the common slope", "at most 2.0 % (a setting)"],
+    words: ["station B: −1.23 % off the common slope", "at most 2 % (a setting)"],
   },
   "station-sense": { found: { against: ["C"] }, limit: null, words: ["against the others: C", "all go one way"] },
   "zero-drift": {
@@ -63,6 +63,21 @@ const every: { readonly [Id in CheckId]: FindingOf<Id> & { readonly words: reado
     words: [
       "freeboards 0 to port and 0 to starboard, draft marks 3 to port and 2 to starboard, 1 unread",
       "5 freeboards a side, or all draft marks on both sides",
+    ],
+  },
+  "mark-agreement": {
+    found: {
+      suspects: [
+        { mark: "MS", error: 0.1 },
+        { mark: "MP", error: -0.1 },
+      ],
+      marks: 6,
+      degreesOfFreedom: 2,
+    },
+    limit: { most: 0.02 },
+    words: [
+      "read again: one of MS (by +0.100 m), MP (by −0.100 m) may be wrong, and these marks can’t tell which",
+      "none off by more than 0.020 m (a setting)",
     ],
   },
   "drafts-before-after": {
