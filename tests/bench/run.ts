@@ -9,7 +9,11 @@ import { seededNoise } from "@/lib/numerics/seeded-noise";
 import { promised } from "@/lib/result";
 import { modelOf } from "@/lib/uncertainty/local-expansion";
 import { drawnAtOnce } from "@/lib/uncertainty/monte-carlo";
+import { answerToControl } from "./live-bench";
+import { reconnecting } from "./reconnect-bench";
 import { solidHull } from "./solid-hull";
+import { syncAgainstInserts } from "./sync-bench";
+import { tapToSaved } from "./tap-bench";
 
 /** Times side by side in one run, as ratios: machines are noisy. `npm run bench`. */
 const { record } = skerryTern();
@@ -18,6 +22,10 @@ const tern = { ...record, readings: skerryTernReadings(7, perfectReadings) };
 await hydrostatics();
 reduction();
 draws();
+await syncAgainstInserts();
+await answerToControl();
+await reconnecting();
+await tapToSaved();
 
 /** One waterplane: everything of hydrostatics by ours, the volume alone by the solid. */
 async function hydrostatics(): Promise<void> {
