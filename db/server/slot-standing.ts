@@ -66,11 +66,11 @@ export function standing(db: Database, test: string, slot: Slot, arriving?: Arri
     db.insert(slots)
       .values({ ...place, slot, state: projection.state, heads: projection.heads })
       .run();
-  if (projection.readings.length > 0) {
+  // one by one: a statement that holds them all has no room for more than some thousands
+  for (const reading of projection.readings)
     db.insert(readings)
-      .values(projection.readings.map((reading) => ({ ...reading, ...place })))
+      .values({ ...reading, ...place })
       .run();
-  }
   return projection;
 }
 
