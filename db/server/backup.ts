@@ -11,6 +11,8 @@ import { filesFolder, makePrivateFile } from "./data-folder";
 import { copyFiles } from "./file-copies";
 import { flushFile, flushFolder } from "./flushed";
 
+const PAGES_AT_A_TIME = 100;
+
 /**
  * Copies the database as it stands into the folder while work on it goes on, and the files beside it. The copy bears its name only
  * once it was found whole and is on the disk; then the older ones that are no longer kept go.
@@ -31,7 +33,7 @@ async function copiedDatabase(db: Database, folder: string, at: string): Promise
   try {
     tidyFolder(folder);
     makePrivateFile(partial);
-    await db.$client.backup(partial);
+    await db.$client.backup(partial, { progress: atOnceWhereDisturbed() });
     const { found, ...reach } = examined(partial);
     if (found !== "ok") return refuse({ type: "BackupDamaged", found });
     flushFile(partial);
@@ -43,6 +45,21 @@ async function copiedDatabase(db: Database, folder: string, at: string): Promise
   } finally {
     for (const part of [partial, `${partial}-journal`]) rmSync(part, { force: true });
   }
+}
+
+const ALL_PAGES = 0x7fff_ffff;
+
+/**
+ * A write by another process makes SQLite begin again, and under steady writes the copy would never be done: from the second beginning
+ * on it is made in one go, which nobody disturbs. Writes by this process go into the copy as they come.
+ */
+function atOnceWhereDisturbed(): (at: { remainingPages: number }) => number {
+  let left = Number.POSITIVE_INFINITY;
+  return ({ remainingPages }) => {
+    const isDisturbed = remainingPages > left;
+    left = isDisturbed ? Number.NEGATIVE_INFINITY : remainingPages;
+    return isDisturbed ? ALL_PAGES : PAGES_AT_A_TIME;
+  };
 }
 
 type Examined = Pick<Backup, "serverSeq" | "ledgerEntry"> & { readonly found: string };

@@ -7,6 +7,7 @@ import { afterEach, beforeEach, describe, expect, test } from "vitest";
 import { backUp, faultOf } from "@/db/server/backup";
 import { confirmedTo, isBackupDue, lastBackup } from "@/db/server/backups-made";
 import { openDatabase } from "@/db/server/connection";
+import { noteOpening } from "@/db/server/server-identity";
 import { isLedgerKept, verifiedLedger } from "@/db/server/verify-ledger";
 import { promised } from "@/lib/result";
 import type { Slot } from "@/lib/sync/slot";
@@ -85,6 +86,25 @@ describe("a backup", () => {
     expect([n, last]).toEqual([backup.serverSeq, backup.serverSeq]);
     // a batch of five stands whole in the copy or not at all
     expect([backup.serverSeq % 5, backup.serverSeq >= 1000]).toEqual([0, true]);
+  });
+
+  test("is made beside another process that never stops writing", async () => {
+    for (let i = 0; i < 20; i++) reads(50);
+    const other = openDatabase(yard.db.$client.name);
+    let isRunning = true;
+    let writes = 0;
+    const writing = (async () => {
+      for (; isRunning; writes++) {
+        noteOpening(other);
+        await new Promise((done) => setImmediate(done));
+      }
+    })();
+    const backup = promised(await backUp(yard.db, folder, at));
+    isRunning = false;
+    await writing;
+    other.$client.close();
+    expect(backup.serverSeq).toBe(1000);
+    expect(writes).toBeGreaterThan(2);
   });
 
   test("takes the files along that the folder lacks, and tells of one that is not what it was", async () => {
