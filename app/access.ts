@@ -40,6 +40,13 @@ export async function personOrRefusal(request: Request): Promise<Person | Respon
   return (await personOf(request)) ?? refused(401, "Sign in first.");
 }
 
+/** The sender of a request, who must be an administrator, or the answer that refuses it. */
+export async function administratorOrRefusal(request: Request): Promise<Person | Response> {
+  const person = await personOrRefusal(request);
+  if (person instanceof Response || person.isAdministrator) return person;
+  return refused(403, "Accounts are the administrator's business.");
+}
+
 /** The sender and the test of a request, or the answer that refuses it. */
 export async function accessOrRefusal(request: Request, test: string, roles: readonly Role[]): Promise<Access | Response> {
   const person = await personOrRefusal(request);

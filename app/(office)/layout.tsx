@@ -4,5 +4,5 @@ import { OfficeShell } from "@/components/ui/office-shell";
 
 export default async function Layout({ children }: { children: ReactNode }) {
   const person = await signedInPerson();
-  return <OfficeShell person={person?.name ?? null}>{children}</OfficeShell>;
+  return <OfficeShell person={person}>{children}</OfficeShell>;
 }

@@ -17,6 +17,10 @@ export function SignInPage({ next }: { next: string | null }) {
           <Link href="/join" prefetch={false} className="inline-flex min-h-tap items-center underline underline-offset-4">
             join with a code
           </Link>
+          . A password that was forgotten:{" "}
+          <Link href="/password" prefetch={false} className="inline-flex min-h-tap items-center underline underline-offset-4">
+            set a new one
+          </Link>
         </p>
       </main>
     </>

@@ -1,5 +1,5 @@
 import { randomUUID } from "node:crypto";
-import { eq, sql } from "drizzle-orm";
+import { and, eq, isNull, sql } from "drizzle-orm";
 import { answer, type Result, refuse } from "@/lib/result";
 import { accounts } from "../schema/accounts";
 import type { Act } from "./act";
@@ -65,13 +65,40 @@ export function changePassword(db: Database, id: string, passwordHash: string, a
   });
 }
 
-/** Closes an account at once, on every device. What its person did stays as it is. */
-export function closeAccount(db: Database, id: string, act: Act): void {
-  inTransaction(db, () => {
-    db.update(accounts).set({ closedAt: act.at }).where(eq(accounts.id, id)).run();
-    endSessions(db, id);
-    writeEntry(db, null, { ...act, what: "account.close", after: { account: id } });
+export type Standing = { readonly isAdministrator: boolean; readonly isEngineer: boolean; readonly isClosed: boolean };
+export type StandingRefusal = { type: "AccountUnknown"; account: string } | { type: "LastAdministrator"; account: string };
+
+/**
+ * What a person may do on this server from now on; closed, they are signed out at once on every device, and what they did stays.
+ *
+ * Refused: to take away the last open administrator, after whom nobody could let anybody in.
+ */
+export function changeStanding(db: Database, id: string, to: Standing, act: Act): Result<Account, StandingRefusal> {
+  return inTransaction(db, () => {
+    const before = accountById(db, id);
+    if (!before) return refuse({ type: "AccountUnknown", account: id });
+    const stays = to.isAdministrator && !to.isClosed;
+    if (!stays && isLastAdministrator(db, before)) return refuse({ type: "LastAdministrator", account: id });
+    const { isAdministrator, isEngineer, isClosed } = to;
+    const closedAt = isClosed ? (before.closedAt ?? act.at) : null;
+    if (isClosed && before.closedAt === null) endSessions(db, id);
+    const after = db.update(accounts).set({ isAdministrator, isEngineer, closedAt }).where(eq(accounts.id, id)).returning().get();
+    writeEntry(db, null, { ...act, what: "account.standing", before: standing(before), after: standing(after) });
+    return answer(after);
   });
+}
+
+function isLastAdministrator(db: Database, account: Account): boolean {
+  const open = db
+    .select()
+    .from(accounts)
+    .where(and(eq(accounts.isAdministrator, true), isNull(accounts.closedAt)))
+    .all();
+  return open.length === 1 && open[0]?.id === account.id;
+}
+
+function standing({ id, isAdministrator, isEngineer, closedAt }: Account) {
+  return { account: id, isAdministrator, isEngineer, isClosed: closedAt !== null };
 }
 
 function endSessions(db: Database, id: string): void {

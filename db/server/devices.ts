@@ -2,6 +2,7 @@ import { and, desc, eq, inArray } from "drizzle-orm";
 import { z } from "zod";
 import { answer, type Result, refuse } from "@/lib/result";
 import { deviceHolders, devices, enrolmentCodes } from "../schema/devices";
+import { events } from "../schema/events";
 import type { Act } from "./act";
 import { type Database, inTransaction } from "./connection";
 import { writeEntry } from "./ledger-entries";
@@ -30,6 +31,13 @@ export function deviceById(db: Database, id: string): Device | undefined {
 export function devicesEnrolledIn(db: Database, test: string): Device[] {
   const used = db.select({ id: enrolmentCodes.usedBy }).from(enrolmentCodes).where(eq(enrolmentCodes.test, test));
   return db.select().from(devices).where(inArray(devices.id, used)).orderBy(desc(devices.enrolledAt)).all();
+}
+
+/** Whether a device was let into a test by a code, or has sent something of it. */
+export function isDeviceOf(db: Database, device: string, test: string): boolean {
+  if (devicesEnrolledIn(db, test).some(({ id }) => id === device)) return true;
+  const sent = and(eq(events.device, device), eq(events.test, test));
+  return db.select({ id: events.id }).from(events).where(sent).limit(1).get() !== undefined;
 }
 
 /**

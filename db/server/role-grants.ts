@@ -82,6 +82,7 @@ function ofGrant({ test, account, role }: Grant) {
   return and(eq(roleGrants.test, test), eq(roleGrants.account, account), eq(roleGrants.role, role));
 }
 
-function inForce(at: string) {
+/** A grant that has begun and has not ended at a time. */
+export function inForce(at: string) {
   return and(lte(roleGrants.fromAt, at), or(isNull(roleGrants.untilAt), gt(roleGrants.untilAt, at)));
 }

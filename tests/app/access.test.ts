@@ -7,7 +7,7 @@ import path from "node:path";
 import { NextRequest } from "next/server";
 import { afterAll, beforeAll, describe, expect, test } from "vitest";
 import { skerryTern } from "@/db/seed/skerry-tern";
-import { type Account, closeAccount } from "@/db/server/accounts";
+import { type Account, changeStanding } from "@/db/server/accounts";
 import { database } from "@/db/server/connection";
 import { createTest } from "@/db/server/tests";
 import { createVessel } from "@/db/server/vessels";
@@ -100,7 +100,7 @@ test("a forged cookie and a closed account are nobody's", async () => {
   const leaver = promised({ ok: true, value: peopleIn(database(), own, at).get("lead") });
   const cookie = await cookieOf(leaver);
   expect((await called(file, "GET", {}, own, cookie)).status).toBe(200);
-  closeAccount(database(), leaver?.id ?? "", { by: null, at });
+  changeStanding(database(), leaver?.id ?? "", { isAdministrator: false, isEngineer: false, isClosed: true }, { by: null, at });
   expect((await called(file, "GET", {}, own, cookie)).status).toBe(401);
 });
 
@@ -134,7 +134,9 @@ async function pageOutcome(file: string, id: string, visitor: Visitor): Promise<
   const { default: page } = (await routeModule(file)) as RouteModule & { default: (props: unknown) => unknown };
   const cookie = await cookieOf(people.get(visitor));
   try {
-    await inRequest(cookie, async () => page({ params: Promise.resolve({ id }), searchParams: Promise.resolve({}) }));
+    await inRequest(cookie, async () =>
+      page({ params: Promise.resolve({ id, person: people.get("reader")?.id }), searchParams: Promise.resolve({}) }),
+    );
     return "opens";
   } catch (error) {
     return outcomeOf(error);
@@ -160,6 +162,8 @@ async function called(file: string, method: string, { body }: Pick<Row, "body">,
   const url = `http://localhost:3000/${file.replace(/^app\/|\/route\.ts$/g, "")}`;
   const given = body ? { body: JSON.stringify(body()) } : {};
   const request = new NextRequest(url, { method, headers: { cookie, "content-type": "application/json" }, ...given });
-  const answer = module[method]?.(request, { params: Promise.resolve({ id, enrolment: randomUUID() }) });
+  const answer = module[method]?.(request, {
+    params: Promise.resolve({ id, enrolment: randomUUID(), person: randomUUID(), device: randomUUID() }),
+  });
   return (await answer) ?? expect.fail(`${file} has no ${method}`);
 }

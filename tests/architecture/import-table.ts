@@ -16,6 +16,7 @@ export const importTable: readonly TableRow[] = [
   { part: "lib/lightship", mayImport: ["lib", "lib/numerics", "lib/uncertainty", "lib/hydrostatics", "lib/inclining"] },
   { part: "lib/record", mayImport: method },
   { part: "lib/ledger", mayImport: ["lib"] },
+  { part: "lib/people", mayImport: ["lib"] },
   { part: "lib/sync", mayImport: [...method, "lib/record", "lib/ledger"] },
   { part: "lib/report", mayImport: ["lib/*"] },
   { part: "db/schema", mayImport: ["lib/*"] },

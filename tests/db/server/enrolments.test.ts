@@ -1,6 +1,6 @@
 import { randomUUID } from "node:crypto";
 import { expect, test } from "vitest";
-import { accountsByName, closeAccount, createAccount } from "@/db/server/accounts";
+import { accountsByName, changeStanding, createAccount } from "@/db/server/accounts";
 import { deviceById, devicesEnrolledIn, registerDevice, revokeDevice } from "@/db/server/devices";
 import { enrol, enrolmentsOf, makeEnrolment, revokeEnrolment } from "@/db/server/enrolments";
 import { ledgerOf } from "@/db/server/ledger-entries";
@@ -108,7 +108,7 @@ test("lets nobody in on a closed account", () => {
   const here = yard();
   const reader = personWith(here, "reader");
   const { code } = codeFor(here, reader.id);
-  closeAccount(here.db, reader.id, { by: null, at });
+  changeStanding(here.db, reader.id, { isAdministrator: false, isEngineer: false, isClosed: true }, { by: null, at });
   expect(enrol(here.db, code, phone(), hoursLater(1))).toEqual({ ok: false, refusal: { type: "AccountClosed" } });
 });
 

@@ -1,6 +1,6 @@
 import { randomUUID } from "node:crypto";
 import { expect, test } from "vitest";
-import { changePassword, closeAccount } from "@/db/server/accounts";
+import { changePassword, changeStanding } from "@/db/server/accounts";
 import { registerDevice, revokeDevice } from "@/db/server/devices";
 import { standingPerson } from "@/db/server/sessions";
 import { at, hoursLater, yard } from "./yard";
@@ -35,7 +35,7 @@ test("ends at its time", () => {
 
 test("ends at once when the account is closed, the password changed or the phone revoked", () => {
   const closed = signedIn();
-  closeAccount(closed.db, closed.seal.sub, act);
+  changeStanding(closed.db, closed.seal.sub, { isAdministrator: false, isEngineer: false, isClosed: true }, act);
   expect(standingPerson(closed.db, closed.seal, at)).toBeNull();
   const changed = signedIn();
   changePassword(changed.db, changed.seal.sub, "hash", act);

@@ -1,0 +1,15 @@
+import { accessOrRefusal, refused } from "@/app/access";
+import { database } from "@/db/server/connection";
+import { isDeviceOf, revokeDevice } from "@/db/server/devices";
+
+type Context = { params: Promise<{ id: string; device: string }> };
+
+/** Stops a phone of the test at once; what it has sent stands, what it still sends is set aside and can be let in. */
+export async function DELETE(request: Request, { params }: Context): Promise<Response> {
+  const { id, device } = await params;
+  const access = await accessOrRefusal(request, id, ["lead", "engineer", "administrator"]);
+  if (access instanceof Response) return access;
+  if (!isDeviceOf(database(), device, id)) return refused(404, "There is no such phone in this test.");
+  revokeDevice(database(), device, { by: access.person.id, at: new Date().toISOString() });
+  return new Response(null, { status: 204 });
+}
