@@ -65,7 +65,12 @@ export function eventsOn(db: Database, basis: string): StoredEvent[] {
   return db.select().from(events).where(eq(events.basis, basis)).orderBy(asc(events.serverSeq)).all();
 }
 
-/** What has arrived from a device: its highest number, and the numbers below it that have not. A broken copy has not arrived. */
+const MOST_MISSING = 1000;
+
+/**
+ * What has arrived from a device: its highest number, and the first thousand numbers below it that have not; when those have come, it
+ * hears of the next. A broken copy has not arrived.
+ */
 export function receivedFrom(db: Database, device: string): SyncAnswer["device"] & { received: number } {
   const rows = db
     .selectDistinct({ seq: events.seq })
@@ -73,10 +78,19 @@ export function receivedFrom(db: Database, device: string): SyncAnswer["device"]
     .where(and(eq(events.device, device), isGenuine()))
     .orderBy(asc(events.seq))
     .all();
-  const seen = new Set(rows.flatMap(({ seq }) => (seq === null ? [] : [seq])));
-  const highestSeq = Math.max(0, ...seen);
-  const missing = Array.from({ length: highestSeq }, (_, i) => i + 1).filter((seq) => !seen.has(seq));
-  return { highestSeq, missing, received: seen.size };
+  const seqs = rows.flatMap(({ seq }) => seq ?? []);
+  return { highestSeq: seqs.at(-1) ?? 0, missing: gapsIn(seqs), received: seqs.length };
+}
+
+// a phone may claim any number: what is answered does not grow with it
+function gapsIn(seqs: readonly number[]): number[] {
+  const missing: number[] = [];
+  let due = 1;
+  for (const seq of seqs) {
+    while (due < seq && missing.length < MOST_MISSING) missing.push(due++);
+    due = seq + 1;
+  }
+  return missing;
 }
 
 export function receiptOf(event: Pick<StoredEvent, "id" | "outcome" | "serverSeq" | "code" | "message">): Receipt {
