@@ -6,6 +6,7 @@ import { Panel } from "@/components/ui/panel";
 import type { TestRecord } from "@/lib/record/test-record";
 import { BudgetTable } from "./budget-table";
 import { IntervalTable } from "./interval-table";
+import { SettingsForm } from "./settings-form";
 import { UncertaintyForm } from "./uncertainty-form";
 import { useDefence } from "./use-defence";
 
@@ -31,6 +32,9 @@ export function DefencePanel({ record, mayState }: { record: TestRecord; mayStat
         <div className="mt-4 border-ink-line border-t pt-2">
           <Disclosure title="Standard uncertainties of this test">
             <UncertaintyForm test={record.test.id} stated={record.uncertainty} />
+          </Disclosure>
+          <Disclosure title="Method, weights and limits of this test">
+            <SettingsForm test={record.test.id} settings={record.settings} />
           </Disclosure>
         </div>
       ) : null}

@@ -14,7 +14,7 @@ export function FitPanel({ test, ship }: { test: IncliningTestData; ship: Inclin
   const { line } = ship;
   const { spread } = line;
   return (
-    <Panel title="The line" aside="tangent on moment, least squares, one intercept for each station">
+    <Panel title="The line" aside={`tangent on moment, least squares, ${howWeighed(test)}, one intercept for each station`}>
       <p>
         Common slope{" "}
         <strong>
@@ -42,6 +42,10 @@ export function FitPanel({ test, ship }: { test: IncliningTestData; ship: Inclin
       </div>
     </Panel>
   );
+}
+
+function howWeighed({ settings }: IncliningTestData): string {
+  return settings?.weights === "readings" ? "each reading by how well it is known" : "all readings alike";
 }
 
 function OwnSlopes({ line: { stations, slope, spread } }: { line: MomentTangentLine }) {

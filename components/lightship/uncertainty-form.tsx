@@ -7,13 +7,13 @@ import { Notice } from "@/components/ui/notice";
 import { QuantityField } from "@/components/ui/quantity-field";
 import type { StatedUncertainty } from "@/lib/lightship/stated-uncertainty";
 import { typedUncertainty, type UncertaintyTyped, uncertaintyFields, uncertaintySchema } from "./uncertainty-typed";
-import { useSaveUncertainty } from "./use-save-uncertainty";
+import { useSavePart } from "./use-save-part";
 
 type UncertaintyFormProps = { test: string; stated: Partial<StatedUncertainty> | undefined };
 
 /** The standard uncertainties behind the intervals: stated for this test, or the program's own assumptions. */
 export function UncertaintyForm({ test, stated }: UncertaintyFormProps) {
-  const { save, refused } = useSaveUncertainty(test);
+  const { save, refused } = useSavePart<StatedUncertainty>(test, "uncertainty");
   const form = useForm<UncertaintyTyped, unknown, StatedUncertainty>({
     resolver: zodResolver(uncertaintySchema),
     values: typedUncertainty(stated),

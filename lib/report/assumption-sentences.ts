@@ -1,16 +1,23 @@
+import type { IncliningTestData } from "@/lib/inclining/test-data";
 import type { IncliningResult } from "@/lib/lightship/inclining-result";
 import type { Stating } from "@/lib/lightship/lightship-interval";
 import { assumedUncertainty } from "@/lib/lightship/stated-uncertainty";
 import { figure, shortFigure } from "./rounding";
 
 /** What a result takes for granted that the test does not say, one sentence each. */
-export function assumptionSentences(test: Stating, { waterline }: IncliningResult): readonly string[] {
+export function assumptionSentences(test: Stating & Weighing, { waterline }: IncliningResult): readonly string[] {
   return [
     ...(test.uncertainty === undefined ? [uncertaintiesAssumed()] : []),
     ...sagAssumed(waterline.sag),
+    ...(test.settings?.weights === "readings" ? [readingsWeighed] : []),
     "Errors in the places of the test weights count athwartships only.",
   ];
 }
+
+type Weighing = { readonly settings?: Pick<NonNullable<IncliningTestData["settings"]>, "weights"> };
+
+const readingsWeighed =
+  "Each reading counts in the line by how well it is known by itself: gusts that moved all stations alike have no part in the weights.";
 
 // below a millimetre the tenth of it is nothing
 function sagAssumed(sag: number): string[] {

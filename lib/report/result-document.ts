@@ -2,7 +2,7 @@ import type { CheckId, Verdict } from "@/lib/inclining/checks/finding";
 import type { HintCause } from "@/lib/inclining/plot-hints";
 import type { Defence } from "@/lib/lightship/defended-lightship";
 import type { Examination } from "@/lib/lightship/examination";
-import type { IncliningResult } from "@/lib/lightship/inclining-result";
+import type { IncliningResult, LightshipTestData } from "@/lib/lightship/inclining-result";
 import type { Stating } from "@/lib/lightship/lightship-interval";
 import type { Cause } from "@/lib/lightship/uncertain-inputs";
 import { assumptionSentences } from "./assumption-sentences";
@@ -31,7 +31,7 @@ export type HintLine = { readonly cause: HintCause; readonly moves: readonly num
 
 /** The result of a test, with its defence and what was found about the test itself, in the shape of the record format's result. */
 export function resultDocument(
-  test: Stating,
+  test: LightshipTestData & Stating,
   result: IncliningResult,
   { interval95, budget }: Defence,
   { checks, hints }: Examination,
