@@ -1,14 +1,17 @@
-import { and, asc, desc, eq, isNull, max, ne, notInArray, or } from "drizzle-orm";
+import { and, asc, desc, eq, isNull, max, ne, notInArray, or, sql } from "drizzle-orm";
 import type { Envelope, QuarantineCode, Receipt, SyncAnswer } from "@/lib/sync/protocol";
 import { events } from "../schema/events";
 import type { Database } from "./connection";
+import { preparedInsert, preparedQuery } from "./prepared-query";
 
 export type StoredEvent = typeof events.$inferSelect;
 
 /** Keeps an event with the receipt it gets. The number is given, because the receipt is worked out before. */
 export function storeEvent(db: Database, event: StoredEvent): void {
-  db.insert(events).values(event).run();
+  insertEvent(db, event);
 }
+
+const insertEvent = preparedInsert(events);
 
 export function nextServerSeq(db: Database): number {
   const last = db
@@ -20,21 +23,39 @@ export function nextServerSeq(db: Database): number {
 
 /** The event that was sent before with exactly these bytes and this signature; its receipt is given again. */
 export function sameEvent(db: Database, { signature }: Envelope, bodyHash: string): StoredEvent | undefined {
-  const same = and(eq(events.bodyHash, bodyHash), signature === null ? isNull(events.signature) : eq(events.signature, signature));
-  return db.select().from(events).where(same).orderBy(asc(events.serverSeq)).get();
+  return withBytes(db)
+    .all({ bodyHash })
+    .find((event) => event.signature === signature);
 }
+
+const withBytes = preparedQuery((db) => {
+  const same = db
+    .select()
+    .from(events)
+    .where(eq(events.bodyHash, sql.placeholder("bodyHash")));
+  return same.orderBy(asc(events.serverSeq)).prepare();
+});
 
 /** Whether another event has this id. */
 export function isIdTaken(db: Database, id: string, bodyHash: string): boolean {
-  const taken = and(eq(events.id, id), ne(events.bodyHash, bodyHash), isGenuine());
-  return db.select({ id: events.id }).from(events).where(taken).get() !== undefined;
+  return otherOfId(db).get({ id, bodyHash }) !== undefined;
 }
+
+const otherOfId = preparedQuery((db) => {
+  const taken = and(eq(events.id, sql.placeholder("id")), ne(events.bodyHash, sql.placeholder("bodyHash")), isGenuine());
+  return db.select({ id: events.id }).from(events).where(taken).prepare();
+});
 
 /** Whether another event of the device has this number. */
 export function isSeqTaken(db: Database, device: string, seq: number, bodyHash: string): boolean {
-  const taken = and(eq(events.device, device), eq(events.seq, seq), ne(events.bodyHash, bodyHash), isGenuine());
-  return db.select({ id: events.id }).from(events).where(taken).get() !== undefined;
+  return otherOfSeq(db).get({ device, seq, bodyHash }) !== undefined;
 }
+
+const otherOfSeq = preparedQuery((db) => {
+  const number = and(eq(events.device, sql.placeholder("device")), eq(events.seq, sql.placeholder("seq")));
+  const taken = and(number, ne(events.bodyHash, sql.placeholder("bodyHash")), isGenuine());
+  return db.select({ id: events.id }).from(events).where(taken).prepare();
+});
 
 // what anybody may have written, or what broke on its way, takes no name or number from the real event
 function isGenuine() {
@@ -62,8 +83,16 @@ function bearingName(db: Database, id: string): StoredEvent | undefined {
 
 /** Events that stand on an act, or that want to let it in. */
 export function eventsOn(db: Database, basis: string): StoredEvent[] {
-  return db.select().from(events).where(eq(events.basis, basis)).orderBy(asc(events.serverSeq)).all();
+  return onBasis(db).all({ basis });
 }
+
+const onBasis = preparedQuery((db) => {
+  const standing = db
+    .select()
+    .from(events)
+    .where(eq(events.basis, sql.placeholder("basis")));
+  return standing.orderBy(asc(events.serverSeq)).prepare();
+});
 
 const MOST_MISSING = 1000;
 

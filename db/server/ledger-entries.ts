@@ -1,9 +1,10 @@
-import { and, asc, desc, eq, lt } from "drizzle-orm";
+import { and, asc, desc, eq, lt, sql } from "drizzle-orm";
 import { chained, GENESIS, type LedgerEntry, type LedgerMatter } from "@/lib/ledger/hash-chain";
 import { accounts } from "../schema/accounts";
 import { ledgerEntries } from "../schema/ledger";
 import type { Act } from "./act";
 import type { Database } from "./connection";
+import { preparedQuery } from "./prepared-query";
 
 /** What a verb says of its own act; who, when and why come from the act. */
 export type Written = Act & {
@@ -66,16 +67,17 @@ export function chainsKept(db: Database): (string | null)[] {
 }
 
 function lastOf(db: Database, test: string | null): { seq: number; hash: string } | null {
+  return lastEntry(db).get({ chain: chainOf(test) }) ?? null;
+}
+
+const lastEntry = preparedQuery((db) => {
   const { seq, hash, chain } = ledgerEntries;
-  const row = db
+  const ofChain = db
     .select({ seq, hash })
     .from(ledgerEntries)
-    .where(eq(chain, chainOf(test)))
-    .orderBy(desc(seq))
-    .limit(1)
-    .get();
-  return row ?? null;
-}
+    .where(eq(chain, sql.placeholder("chain")));
+  return ofChain.orderBy(desc(seq)).limit(1).prepare();
+});
 
 // JSON has no undefined: what a verb does not say stands in the entry as null
 function matterOf(test: string | null, written: Written): LedgerMatter {

@@ -1,4 +1,4 @@
-import { and, eq } from "drizzle-orm";
+import { and, eq, sql } from "drizzle-orm";
 import { basisOf, isLettingIn } from "@/lib/sync/basis";
 import { type EventBody, eventBodySchema } from "@/lib/sync/event";
 import type { Slot } from "@/lib/sync/slot";
@@ -8,6 +8,7 @@ import { type SlotProjection, slotProjection } from "@/lib/sync/slot-projection"
 import { events } from "../schema/events";
 import { placedEvents, readings, slots } from "../schema/readings";
 import type { Database } from "./connection";
+import { preparedInsert, preparedQuery } from "./prepared-query";
 import { slotRules } from "./slot-rules";
 
 /** An event that takes part, as it stands in the file of events or is about to. */
@@ -62,46 +63,54 @@ export function standing(db: Database, test: string, slot: Slot, arriving?: Arri
   const place = { test, slotKey: slotKey(slot) };
   forget(db, place);
   // where no act is left, nothing is written: a rebuild would not find the slot either
-  if (acts.length > 0)
-    db.insert(slots)
-      .values({ ...place, slot, state: projection.state, heads: projection.heads })
-      .run();
+  if (acts.length > 0) insertSlot(db, { ...place, slot, state: projection.state, heads: projection.heads });
   // one by one: a statement that holds them all has no room for more than some thousands
-  for (const reading of projection.readings)
-    db.insert(readings)
-      .values({ ...reading, ...place })
-      .run();
+  for (const reading of projection.readings) insertReading(db, { ...reading, ...place });
   return projection;
 }
 
+const insertSlot = preparedInsert(slots);
+const insertReading = preparedInsert(readings);
+
 function forget(db: Database, { test, slotKey }: { readonly test: string; readonly slotKey: string }): void {
-  for (const table of [slots, readings]) {
-    db.delete(table)
-      .where(and(eq(table.test, test), eq(table.slotKey, slotKey)))
-      .run();
-  }
+  for (const query of forgetting(db)) query.run({ test, slotKey });
 }
 
+const forgetting = preparedQuery((db) =>
+  [slots, readings].map((table) => {
+    const ofSlot = and(eq(table.test, sql.placeholder("test")), eq(table.slotKey, sql.placeholder("slotKey")));
+    return db.delete(table).where(ofSlot).prepare();
+  }),
+);
+
 function placeOf(db: Database, event: string): { test: string; slotKey: string; slot: Slot } | undefined {
-  return db
+  return placeIn(db).get({ event });
+}
+
+const placeIn = preparedQuery((db) =>
+  db
     .select({ test: placedEvents.test, slotKey: slots.slotKey, slot: slots.slot })
     .from(placedEvents)
     .innerJoin(slots, and(eq(slots.test, placedEvents.test), eq(slots.slotKey, placedEvents.slotKey)))
-    .where(eq(placedEvents.event, event))
-    .get();
-}
+    .where(eq(placedEvents.event, sql.placeholder("event")))
+    .prepare(),
+);
 
 function eventsOfSlot(db: Database, test: string, slot: Slot, arriving?: Arriving): SlotEvent[] {
-  const rows = db
-    .select({ body: events.body, serverSeq: events.serverSeq, receivedAt: events.receivedAt })
-    .from(placedEvents)
-    .innerJoin(events, eq(events.serverSeq, placedEvents.serverSeq))
-    .where(and(eq(placedEvents.test, test), eq(placedEvents.slotKey, slotKey(slot))))
-    .all();
+  const rows = inSlot(db).all({ test, slotKey: slotKey(slot) });
   const stored = rows.map(({ body, ...stamp }) => ({ body: eventBodySchema.parse(JSON.parse(body)), ...stamp }));
   const others = stored.filter(({ serverSeq }) => serverSeq !== arriving?.serverSeq);
   return [...others, ...(arriving ? [arriving] : [])].flatMap(({ body, ...stamp }) => (isOfSlot(body) ? [{ body, ...stamp }] : []));
 }
+
+const inSlot = preparedQuery((db) =>
+  db
+    .select({ body: events.body, serverSeq: events.serverSeq, receivedAt: events.receivedAt })
+    .from(placedEvents)
+    .innerJoin(events, eq(events.serverSeq, placedEvents.serverSeq))
+    .where(and(eq(placedEvents.test, sql.placeholder("test")), eq(placedEvents.slotKey, sql.placeholder("slotKey"))))
+    .prepare(),
+);
 
 function isOfSlot(event: EventBody): event is SlotEvent["body"] {
   return event.type === "record" || event.type === "correct" || event.type === "void" || event.type === "resolve";
