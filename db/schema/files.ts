@@ -1,4 +1,4 @@
-import { integer, primaryKey, sqliteTable, text } from "drizzle-orm/sqlite-core";
+import { index, integer, primaryKey, sqliteTable, text } from "drizzle-orm/sqlite-core";
 import { accounts } from "./accounts";
 import { tests } from "./tests";
 
@@ -18,4 +18,17 @@ export const files = sqliteTable(
     addedBy: text("added_by").references(() => accounts.id),
   },
   (table) => [primaryKey({ columns: [table.sha256, table.test, table.of] })],
+);
+
+/** Which event names which photograph; written with the event. Its bytes lie in the folder of files, once they have come. */
+export const eventPhotographs = sqliteTable(
+  "event_photographs",
+  {
+    sha256: text("sha256").notNull(),
+    serverSeq: integer("server_seq").notNull(),
+    event: text("event").notNull(),
+    test: text("test").notNull(),
+    author: text("author").notNull(),
+  },
+  (table) => [primaryKey({ columns: [table.sha256, table.serverSeq] }), index("event_photographs_event").on(table.test, table.event)],
 );

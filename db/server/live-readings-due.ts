@@ -1,14 +1,16 @@
 import { and, asc, eq } from "drizzle-orm";
 import { lateness } from "@/lib/sync/lateness";
-import type { ReadingDue, StandingReading } from "@/lib/sync/live";
+import type { ReadingDue, StandingPhotograph, StandingReading } from "@/lib/sync/live";
 import type { MoveRun } from "@/lib/sync/move-progress";
 import { readingsDue } from "@/lib/sync/readings-due";
 import type { Slot } from "@/lib/sync/slot";
 import { slotKey } from "@/lib/sync/slot-key";
 import { accounts } from "../schema/accounts";
+import { eventPhotographs } from "../schema/files";
 import { readings, slots } from "../schema/readings";
 import type { Database } from "./connection";
 import { duePlan } from "./due-plan";
+import { hasArrived } from "./photographs";
 
 /** Every reading due with what stands in it; then slots that hold readings although nothing is due there any more (earlier repeats). */
 export function liveReadingsDue(db: Database, test: string, runs: readonly MoveRun[]): ReadingDue[] {
@@ -35,11 +37,24 @@ function standingReadings(db: Database, test: string, runs: readonly MoveRun[]):
     .where(eq(readings.test, test))
     .orderBy(asc(readings.serverSeq))
     .all();
+  const photographs = standingPhotographs(db, test);
   const bySlot = new Map<string, StandingReading[]>();
   for (const { reading, slot, author } of rows) {
-    bySlot.set(reading.slotKey, [...(bySlot.get(reading.slotKey) ?? []), standingReading(reading, slot, author, runs)]);
+    const taken = photographs.get(reading.event);
+    const standing = { ...standingReading(reading, slot, author, runs), ...(taken ? { photographs: taken } : {}) };
+    bySlot.set(reading.slotKey, [...(bySlot.get(reading.slotKey) ?? []), standing]);
   }
   return bySlot;
+}
+
+function standingPhotographs(db: Database, test: string): Map<string, StandingPhotograph[]> {
+  const { event, sha256 } = eventPhotographs;
+  const named = db.selectDistinct({ event, sha256 }).from(eventPhotographs).where(eq(eventPhotographs.test, test)).all();
+  const byEvent = new Map<string, StandingPhotograph[]>();
+  for (const { event, sha256 } of named) {
+    byEvent.set(event, [...(byEvent.get(event) ?? []), { sha256, hasArrived: hasArrived(sha256) }]);
+  }
+  return byEvent;
 }
 
 function standingReading(row: typeof readings.$inferSelect, slot: Slot, author: string | null, runs: readonly MoveRun[]): StandingReading {

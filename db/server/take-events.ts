@@ -14,6 +14,7 @@ import { writeEventEntry } from "./event-entry";
 import { nextServerSeq, receiptOf, receivedFrom, type StoredEvent, sameEvent, storeEvent } from "./event-store";
 import { type Judgement, judged, setAside } from "./judgement";
 import { ledgerHead } from "./ledger-entries";
+import { notePhotographs } from "./photographs";
 import { rolesOf } from "./role-grants";
 import { identityOf } from "./server-identity";
 import { placeWaiting } from "./waiting-events";
@@ -70,6 +71,7 @@ function takeOne(db: Database, envelope: Envelope, sentFrom: string, sender: Sen
   const judgement = read.ok ? judge(db, read.value, envelope, stamp) : setAside(read.refusal);
   const event = rowOf(read.ok ? read.value : null, envelope, { ...stamp, sentFrom }, judgement);
   storeEvent(db, event);
+  if (read.ok) notePhotographs(db, read.value, serverSeq);
   writeEventEntry(db, event);
   placeWaiting(db, event);
   return event;

@@ -8,6 +8,7 @@ import {
   sourceSchema,
   waterValueSchema,
 } from "@/lib/record/readings-schema";
+import { photographNamesSchema } from "./photograph";
 import { slotSchema } from "./slot";
 
 /** What a reading holds, by the kind of its slot. Millimetres only on battens; metres, t/m³ and °C elsewhere. */
@@ -76,6 +77,7 @@ export const eventBodySchema = z.discriminatedUnion("type", [
     slot: slotSchema,
     payload: readingValueSchema,
     source: sourceSchema,
+    photographs: photographNamesSchema.optional(),
   }),
   z.strictObject({
     ...act,
@@ -85,6 +87,7 @@ export const eventBodySchema = z.discriminatedUnion("type", [
     slot: slotSchema,
     payload: readingValueSchema,
     source: sourceSchema,
+    photographs: photographNamesSchema.optional(),
   }),
   z.strictObject({
     ...act,

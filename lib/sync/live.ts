@@ -59,7 +59,12 @@ export type StandingReading = {
   readonly late: boolean;
   readonly capturedAfterClose: boolean;
   readonly corrected: boolean;
+  /** taken with this value; left out where none was */
+  readonly photographs?: readonly StandingPhotograph[];
 };
+
+/** A photograph that an event names; its bytes may come later. */
+export type StandingPhotograph = { readonly sha256: string; readonly hasArrived: boolean };
 
 export type MoveProgress = {
   readonly no: number;

@@ -163,7 +163,7 @@ async function called(file: string, method: string, { body }: Pick<Row, "body">,
   const given = body ? { body: JSON.stringify(body()) } : {};
   const request = new NextRequest(url, { method, headers: { cookie, "content-type": "application/json" }, ...given });
   const answer = module[method]?.(request, {
-    params: Promise.resolve({ id, enrolment: randomUUID(), person: randomUUID(), device: randomUUID() }),
+    params: Promise.resolve({ id, enrolment: randomUUID(), person: randomUUID(), device: randomUUID(), sha256: "0".repeat(64) }),
   });
   return (await answer) ?? expect.fail(`${file} has no ${method}`);
 }

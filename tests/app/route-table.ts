@@ -63,6 +63,12 @@ export const handlers: Readonly<Record<string, Readonly<Record<string, Row>>>> =
   "app/api/v1/password/route.ts": { POST: { allowed: "all", body: () => ({ token: "unknown", password: "batten-and-bob" }), status: 410 } },
   "app/api/v1/password/forgotten/route.ts": { POST: { allowed: "all", body: () => ({ email: newPerson().email }), status: 202 } },
   "app/api/v1/devices/route.ts": { POST: { allowed: everybody, body: newDevice, status: 201 } },
+  // nobody has taken such a photograph: who may see one is said in the route's own test
+  "app/api/v1/photographs/[sha256]/route.ts": {
+    GET: { allowed: everybody, status: 404 },
+    HEAD: { allowed: everybody, status: 404 },
+    PUT: { allowed: everybody, body: () => ({}), status: 409 },
+  },
   "app/api/v1/records/route.ts": { POST: { allowed: office, body: () => ({}), status: 422 } },
   "app/api/v1/sync/route.ts": { POST: { allowed: everybody, body: () => ({ protocol: 1, device: randomUUID(), holds: 0, events: [] }) } },
   "app/api/v1/tests/[id]/job/route.ts": { GET: { allowed: everybody } },

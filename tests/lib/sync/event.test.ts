@@ -37,6 +37,16 @@ const values: Record<SlotKind, ReadingValue> = {
   note: { text: "Lost the bob at 10:12" },
 };
 
+describe("the photographs of a reading", () => {
+  const named = (photographs: unknown) => eventBodySchema.safeParse({ ...samples.record, photographs }).success;
+
+  it("stand beside its value, by their hashes, and may be left out as before there were any", () => {
+    expect(eventBodySchema.parse(samples.record)).not.toHaveProperty("photographs");
+    expect([["0".repeat(64)], [], ["IMG_0412.jpg"], null].map(named)).toEqual([true, false, false, false]);
+    expect(eventBodySchema.safeParse({ ...samples.void, photographs: ["0".repeat(64)] }).success).toBe(false);
+  });
+});
+
 describe("an event", () => {
   it.each(Object.entries(samples))("%s is read from its canonical text as it was written", (_, body) => {
     expect(eventBodySchema.parse(JSON.parse(canonicalJson(body)))).toEqual(body);
