@@ -2,6 +2,7 @@ import type { Faults } from "@/lib/inclining/faults";
 import { inside } from "@/lib/inclining/faults";
 import { type InclinedShip, incliningTest } from "@/lib/inclining/inclining-test";
 import { type Examination, examinationOf } from "@/lib/lightship/examination";
+import { type IncliningResult, resultOf } from "@/lib/lightship/inclining-result";
 import { type Lightship, type LightshipBalance, lightshipBalance, lightshipOf } from "@/lib/lightship/lightship";
 import { type Moments, momentsOf } from "@/lib/lightship/weight-item";
 import type { TestRecord } from "@/lib/record/test-record";
@@ -13,6 +14,7 @@ export type FoundLightship = {
   readonly lines: readonly BalanceLine[];
   readonly lightship: Lightship;
   readonly examination: Examination;
+  readonly result: IncliningResult;
 };
 
 /** A test's lightship with each line of the way to it. */
@@ -22,8 +24,13 @@ export function foundLightship(record: TestRecord): Result<FoundLightship, Fault
   const balance = inside("items", lightshipBalance(ship.value, record));
   if (!balance.ok) return balance;
   const lightship = lightshipOf(balance.value);
-  const examination = examinationOf(record, ship.value, lightship);
-  return answer({ ship: ship.value, lines: linesOf(balance.value, ship.value, record), lightship, examination });
+  return answer({
+    ship: ship.value,
+    lines: linesOf(balance.value, ship.value, record),
+    lightship,
+    examination: examinationOf(record, ship.value, lightship),
+    result: resultOf(record, ship.value, lightship),
+  });
 }
 
 function linesOf(balance: LightshipBalance, ship: InclinedShip, { items }: TestRecord): BalanceLine[] {

@@ -34,7 +34,7 @@ export function LightshipPage({ record, mayState }: { record: TestRecord; maySta
 }
 
 function Found({ found, record, mayState }: { found: FoundLightship; record: TestRecord; mayState: boolean }) {
-  const { ship, lines, lightship, examination } = found;
+  const { ship, lines, lightship, examination, result } = found;
   return (
     <>
       <LightshipResult
@@ -48,7 +48,7 @@ function Found({ found, record, mayState }: { found: FoundLightship; record: Tes
         <BalanceTable lines={lines} />
       </Panel>
       <div className="grid items-start gap-5 lg:grid-cols-2">
-        <WaterlinePanel waterline={ship.afloat.waterline} water={ship.afloat.water} />
+        <WaterlinePanel waterline={result.waterline} water={ship.afloat.water} checks={examination.checks} />
         <HydrostaticsPanel hydrostatics={ship.afloat.hydrostatics} asInclined={ship.asInclined} />
         <Plot record={record} hints={examination.hints} />
         <FitPanel test={record} ship={ship} />

@@ -1,8 +1,6 @@
 import { waterplaneHeight } from "@/lib/frame";
 import { markPoints } from "@/lib/hydrostatics/mark-point";
-import type { Waterline } from "@/lib/hydrostatics/waterline";
-import { readingsThatCount } from "./readings-that-count";
-import { waterlineAtZero } from "./ship-afloat";
+import { waterlineOfRound } from "./draft-rounds";
 import type { IncliningTestData } from "./test-data";
 import type { MarkReading } from "./test-readings";
 
@@ -20,12 +18,4 @@ export function markOffWaterline(test: IncliningTestData, kind: "draft" | "freeb
   if (!points.ok || waterline === null) return null;
   const [point] = points.value;
   return point ? point.z - waterplaneHeight(waterline.plane, point.x, point.y) : null;
-}
-
-function waterlineOfRound(test: IncliningTestData, round: MarkReading["round"]): Waterline | null {
-  const isOfRound = (mark: MarkReading) => mark.round === round;
-  const { drafts, freeboards = [] } = test.readings;
-  const readings = { ...test.readings, drafts: drafts.filter(isOfRound), freeboards: freeboards.filter(isOfRound) };
-  const waterline = waterlineAtZero(test, readingsThatCount({ ...test, readings }));
-  return waterline.ok ? waterline.value : null;
 }

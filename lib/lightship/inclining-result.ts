@@ -1,4 +1,6 @@
+import type { Waterline } from "@/lib/hydrostatics/waterline";
 import { gmOfMove } from "@/lib/inclining/as-inclined";
+import { draftRounds, type MarkRead, marksRead } from "@/lib/inclining/draft-rounds";
 import { type Faults, inside } from "@/lib/inclining/faults";
 import type { GeneralisedShip } from "@/lib/inclining/generalised-ship";
 import type { AsInclined, SlopeSpread, StationLine } from "@/lib/inclining/inclined-ship";
@@ -28,6 +30,11 @@ export type IncliningResult = {
     readonly heelDegrees: number;
     readonly sag: number;
     readonly residuals: Readonly<Record<string, number>>;
+    /** false: the marks could not tell the sag */
+    readonly sagFitted: boolean;
+    readonly marks: readonly MarkRead[];
+    /** of the round after the moves, fitted apart; null where there is none, or where it is the one that counts */
+    readonly after: RoundResult | null;
   };
   readonly hydrostatics: Omit<ShipHydrostatics, "kml">;
   readonly fit: Omit<SlopeSpread, "byScatter"> & {
@@ -41,6 +48,9 @@ export type IncliningResult = {
   /** `vcg` by the classical reduction */
   readonly lightship: Lightship & { readonly vcgGeneralised: number | null; readonly headline: Method };
 };
+
+/** How the ship floats by the marks of one round. */
+export type RoundResult = Readonly<Record<"draftAft" | "draftForward" | "draftMidships" | "trim" | "heelDegrees" | "sag", number>>;
 
 export type StationResult = {
   readonly id: string;
@@ -70,15 +80,19 @@ export function incliningResult(test: LightshipTestData): Result<IncliningResult
   const ship = incliningTest(test);
   if (!ship.ok) return ship;
   const balance = inside("items", lightshipBalance(ship.value, test));
-  if (!balance.ok) return balance;
-  return answer({
-    waterline: waterlineResult(ship.value),
-    hydrostatics: hydrostaticsResult(ship.value),
-    fit: fitResult(ship.value, test),
-    asInclined: ship.value.asInclined,
-    generalised: ship.value.generalised,
-    lightship: lightshipResult(lightshipOf(balance.value), ship.value, test),
-  });
+  return balance.ok ? answer(resultOf(test, ship.value, lightshipOf(balance.value))) : balance;
+}
+
+/** The same from the ship and the lightship that were found already. */
+export function resultOf(test: LightshipTestData, ship: InclinedShip, lightship: Lightship): IncliningResult {
+  return {
+    waterline: waterlineResult(ship, test),
+    hydrostatics: hydrostaticsResult(ship),
+    fit: fitResult(ship, test),
+    asInclined: ship.asInclined,
+    generalised: ship.generalised,
+    lightship: lightshipResult(lightship, ship, test),
+  };
 }
 
 function lightshipResult(lightship: Lightship, ship: InclinedShip, { settings }: LightshipTestData): IncliningResult["lightship"] {
@@ -87,9 +101,21 @@ function lightshipResult(lightship: Lightship, ship: InclinedShip, { settings }:
   return { ...lightship, vcgGeneralised, headline: isGeneralised ? "generalised" : "classical" };
 }
 
-function waterlineResult({ afloat: { waterline, water } }: InclinedShip): IncliningResult["waterline"] {
-  const { draftAft, draftForward, draftMidships, trim, heelDegrees, residuals, plane } = waterline;
-  return { density: water.density, draftAft, draftForward, draftMidships, trim, heelDegrees, sag: plane.sag, residuals };
+function waterlineResult({ afloat: { waterline, water } }: InclinedShip, test: LightshipTestData): IncliningResult["waterline"] {
+  const { residuals, sagFitted } = waterline;
+  const { before, after } = draftRounds(test);
+  return {
+    density: water.density,
+    ...roundResult(waterline),
+    residuals,
+    sagFitted,
+    marks: marksRead(test, waterline),
+    after: before && after ? roundResult(after) : null,
+  };
+}
+
+function roundResult({ draftAft, draftForward, draftMidships, trim, heelDegrees, plane }: Waterline): RoundResult {
+  return { draftAft, draftForward, draftMidships, trim, heelDegrees, sag: plane.sag };
 }
 
 function hydrostaticsResult({ afloat }: InclinedShip): IncliningResult["hydrostatics"] {

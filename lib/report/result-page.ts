@@ -1,9 +1,11 @@
+import type { CheckId } from "@/lib/inclining/checks/finding";
 import type { IncliningResult } from "@/lib/lightship/inclining-result";
 import { causeName } from "./cause-words";
 import { checkName, verdictWord } from "./check-words";
 import { hintName, movesInWords } from "./hint-words";
 import type { ResultDocument } from "./result-document";
 import { decimalsFor, figure, figureWithin, signedFigure } from "./rounding";
+import { afloatRows, changeRows, markRows, type Row } from "./waterline-lines";
 
 /**
  * The result of a test as lines of text for a person, each number with its unit.
@@ -12,6 +14,8 @@ import { decimalsFor, figure, figureWithin, signedFigure } from "./rounding";
 export function resultPage(result: ResultDocument): readonly string[] {
   const sections = [
     waterlineLines(result),
+    markLines(result),
+    ...changeSections(result),
     fitLines(result),
     inclinedLines(result),
     lightshipLines(result),
@@ -21,20 +25,27 @@ export function resultPage(result: ResultDocument): readonly string[] {
   return [...sections.flatMap((lines) => [...lines, ""]), ...assumptionLines(result)];
 }
 
-type Row = readonly [label: string, value: string, unit: string];
-
 function waterlineLines({ waterline, hydrostatics }: IncliningResult): readonly string[] {
   return section("Afloat", [
-    ["Draft aft", figure(waterline.draftAft, 3), "m"],
-    ["Draft midships", figure(waterline.draftMidships, 3), "m"],
-    ["Draft forward", figure(waterline.draftForward, 3), "m"],
-    ["Trim by the stern", signedFigure(waterline.trim, 3), "m"],
-    ["Heel to starboard", signedFigure(waterline.heelDegrees, 2), "°"],
-    ["Sag", signedFigure(waterline.sag, 3), "m"],
+    ...afloatRows(waterline),
     ["Water density", figure(waterline.density, 4), "t/m³"],
     [`Displacement by ${hydrostatics.source}`, figure(hydrostatics.displacement, 1), "t"],
     ["KMt at the measured list", figure(hydrostatics.kmt, 3), "m"],
   ]);
+}
+
+function markLines({ waterline, checks }: ResultDocument): readonly string[] {
+  return [...section("Marks, measured less fitted", markRows(waterline)), ...foundBy(checks, "mark-agreement")];
+}
+
+function changeSections({ waterline, checks }: ResultDocument): readonly (readonly string[])[] {
+  const rows = changeRows(waterline);
+  if (rows.length === 0) return [];
+  return [[...section("After the moves less before", rows), ...foundBy(checks, "drafts-before-after")]];
+}
+
+function foundBy(checks: ResultDocument["checks"], id: CheckId): readonly string[] {
+  return checks.flatMap((check) => (check.id === id ? [`  ${checkName(id)}: ${verdictWord(check.verdict)}; ${check.found}`] : []));
 }
 
 function fitLines({ fit }: IncliningResult): readonly string[] {

@@ -4,19 +4,28 @@ import type { ResultDocument } from "./result-document";
 const number = z.number();
 const interval = z.tuple([number, number]);
 const byName = z.record(z.string(), number);
+const round = { draftAft: number, draftForward: number, draftMidships: number, trim: number, heelDegrees: number, sag: number };
 const centre = { lcg: number, tcg: number, vcg: number };
 
 /** The result of a test as `reduce` prints it: the published shape of `ResultDocument`. Metres, tonnes, tangents, shares of 1. */
 export const resultSchema = z.strictObject({
   waterline: z.strictObject({
     density: number,
-    draftAft: number,
-    draftForward: number,
-    draftMidships: number,
-    trim: number,
-    heelDegrees: number,
-    sag: number,
+    ...round,
     residuals: byName,
+    sagFitted: z.boolean(),
+    marks: z.array(
+      z.strictObject({
+        mark: z.string(),
+        kind: z.enum(["draft", "freeboard"]),
+        value: number,
+        estimates: number,
+        scatter: number.nullable(),
+        residual: number,
+        change: number.nullable(),
+      }),
+    ),
+    after: z.strictObject(round).nullable(),
   }),
   hydrostatics: z.strictObject({
     source: z.enum(["offsets", "table"]),

@@ -56,6 +56,36 @@ describe("the lightship page", () => {
     expect(within(table).getAllByRole("row")).toHaveLength(1 + 6);
   });
 
+  test("names the marks among which a wrong one hides, and not one of them for the culprit", () => {
+    const record = bargeRecord(4);
+    const drafts = record.readings.drafts.map((draft) =>
+      draft.mark === "30S" ? { ...draft, value: 2.12, estimates: [2.11, 2.13] } : draft,
+    );
+    render(<LightshipPage mayState={false} record={{ ...record, readings: { ...record.readings, drafts } }} />);
+    const table = screen.getByRole("table", { name: "Residual of each mark" });
+    expect(rowOf(table, "30S").slice(0, 2)).toEqual(["2.120 m", "2, ± 10.0 mm"]);
+    const told = screen.getByText(/^Read again: one of /).textContent;
+    expect(told).toContain("30S (by +0.120 m)");
+    expect(told).toContain("30P (by −0.120 m)");
+    expect(told).toContain("these marks can’t tell which");
+  });
+
+  test("shows the rounds before and after the moves side by side with what changed", () => {
+    const record = bargeRecord(4);
+    const { drafts } = record.readings;
+    const later = drafts.map((draft, i) => ({
+      ...draft,
+      id: `0190a5d1-0000-7000-8000-0000000001${10 + i}`,
+      round: "after" as const,
+      value: 2.03,
+    }));
+    render(<LightshipPage mayState={false} record={{ ...record, readings: { ...record.readings, drafts: [...drafts, ...later] } }} />);
+    const rounds = screen.getByRole("table", { name: "Before and after the moves" });
+    expect(rowOf(rounds, "Draft aft")).toEqual(["2.000 m", "2.030 m", "+0.030 m"]);
+    expect(rowOf(screen.getByRole("table", { name: "Residual of each mark" }), "0P").at(-1)).toBe("+30.0 mm");
+    expect(screen.getByText(/changed most: \+0\.030 m\.$/)).toBeDefined();
+  });
+
   test("says in sentences what keeps the lightship from being known, and shows no figure", () => {
     const record = bargeRecord(4);
     render(<LightshipPage mayState={false} record={{ ...record, readings: { ...record.readings, drafts: [], water: [] } }} />);
