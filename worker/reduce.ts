@@ -1,14 +1,9 @@
 import { readFileSync } from "node:fs";
-import { type Faults, faultsOf } from "@/lib/inclining/faults";
-import { defendedLightship } from "@/lib/lightship/defended-lightship";
-import { examined } from "@/lib/lightship/examination";
-import { incliningResult } from "@/lib/lightship/inclining-result";
+import { faultsOf } from "@/lib/inclining/faults";
 import { parseRecord } from "@/lib/record/parse-record";
-import type { TestRecord } from "@/lib/record/test-record";
 import { refusalLine } from "@/lib/report/refusal-sentence";
-import { type ResultDocument, resultDocument } from "@/lib/report/result-document";
+import { type ResultDocument, wholeResult } from "@/lib/report/result-document";
 import { resultPage } from "@/lib/report/result-page";
-import { answer, type Result } from "@/lib/result";
 
 const usage = "usage: reduce [--table] RECORD.json";
 
@@ -30,18 +25,9 @@ function reduction([file, ...others]: readonly string[], isTable: boolean): Prin
   const text = textOf(file);
   if (text === null) return { ok: false, faults: [`${file}: no such file can be read`] };
   const record = parseRecord(text);
-  const result = record.ok ? reduced(record.value) : record;
+  const result = record.ok ? wholeResult(record.value) : record;
   if (!result.ok) return { ok: false, faults: faultsOf(result).map(refusalLine) };
   return { ok: true, page: isTable ? pageOf(result.value) : `${JSON.stringify(result.value, null, 2)}\n` };
-}
-
-function reduced(record: TestRecord): Result<ResultDocument, Faults> {
-  const result = incliningResult(record);
-  if (!result.ok) return result;
-  const defence = defendedLightship(record);
-  if (!defence.ok) return defence;
-  const examination = examined(record);
-  return examination.ok ? answer(resultDocument(record, result.value, defence.value, examination.value)) : examination;
 }
 
 function textOf(path: string): string | null {

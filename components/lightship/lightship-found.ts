@@ -1,9 +1,9 @@
 import type { Faults } from "@/lib/inclining/faults";
-import { inside } from "@/lib/inclining/faults";
-import { type InclinedShip, incliningTest } from "@/lib/inclining/inclining-test";
+import type { InclinedShip } from "@/lib/inclining/inclining-test";
 import { type Examination, examinationOf } from "@/lib/lightship/examination";
 import { type IncliningResult, resultOf } from "@/lib/lightship/inclining-result";
-import { type Lightship, type LightshipBalance, lightshipBalance, lightshipOf } from "@/lib/lightship/lightship";
+import type { Lightship, LightshipBalance } from "@/lib/lightship/lightship";
+import { reducedTest } from "@/lib/lightship/reduced-test";
 import { type Moments, momentsOf } from "@/lib/lightship/weight-item";
 import type { TestRecord } from "@/lib/record/test-record";
 import { answer, type Result } from "@/lib/result";
@@ -19,17 +19,15 @@ export type FoundLightship = {
 
 /** A test's lightship with each line of the way to it. */
 export function foundLightship(record: TestRecord): Result<FoundLightship, Faults> {
-  const ship = incliningTest(record);
-  if (!ship.ok) return ship;
-  const balance = inside("items", lightshipBalance(ship.value, record));
-  if (!balance.ok) return balance;
-  const lightship = lightshipOf(balance.value);
+  const reduced = reducedTest(record);
+  if (!reduced.ok) return reduced;
+  const { ship, balance, lightship } = reduced.value;
   return answer({
-    ship: ship.value,
-    lines: linesOf(balance.value, ship.value, record),
+    ship,
+    lines: linesOf(balance, ship, record),
     lightship,
-    examination: examinationOf(record, ship.value, lightship),
-    result: resultOf(record, ship.value, lightship),
+    examination: examinationOf(record, reduced.value),
+    result: resultOf(record, reduced.value),
   });
 }
 

@@ -6,6 +6,7 @@ import { modelOf } from "@/lib/uncertainty/local-expansion";
 import { drawnInStretches, interval95 } from "@/lib/uncertainty/monte-carlo";
 import type { LightshipTestData } from "./inclining-result";
 import { budgetOfVcg, type NumberWithInterval, numbersWithInterval, type Stating, uncertainLightship } from "./lightship-interval";
+import { type ReducedTest, reducedTest } from "./reduced-test";
 import type { Cause } from "./uncertain-inputs";
 
 export type Interval = readonly [low: number, high: number];
@@ -28,9 +29,12 @@ const usualSeed = 1;
  * The same seed gives the same digits everywhere. See `uncertainLightship` and `drawnInStretches`.
  * Refused: what the reduction refuses.
  */
-export function* defendedInStretches(test: LightshipTestData & Stating): Generator<number, Result<Defence, Faults>> {
+export function* defendedInStretches(
+  test: LightshipTestData & Stating,
+  reduced: Result<ReducedTest, Faults> = reducedTest(test),
+): Generator<number, Result<Defence, Faults>> {
   const { seed = usualSeed, draws = usualDraws } = test.settings ?? {};
-  const uncertain = uncertainLightship(test);
+  const uncertain = uncertainLightship(test, reduced);
   if (!uncertain.ok) return uncertain;
   const { expansion, inputs } = uncertain.value;
   const drawn = yield* drawnInStretches(modelOf(expansion), inputs, draws, seededNoise(seed));
@@ -44,8 +48,8 @@ export function* defendedInStretches(test: LightshipTestData & Stating): Generat
 }
 
 /** All at once. See `defendedInStretches`. */
-export function defendedLightship(test: Parameters<typeof defendedInStretches>[0]): Result<Defence, Faults> {
-  const stretches = defendedInStretches(test);
+export function defendedLightship(...asked: Parameters<typeof defendedInStretches>): Result<Defence, Faults> {
+  const stretches = defendedInStretches(...asked);
   for (;;) {
     const step = stretches.next();
     if (step.done) return step.value;

@@ -1,14 +1,15 @@
 import type { Waterline } from "@/lib/hydrostatics/waterline";
 import { gmOfMove } from "@/lib/inclining/as-inclined";
 import { draftRounds, type MarkRead, marksRead } from "@/lib/inclining/draft-rounds";
-import { type Faults, inside } from "@/lib/inclining/faults";
+import type { Faults } from "@/lib/inclining/faults";
 import type { GeneralisedShip } from "@/lib/inclining/generalised-ship";
 import type { AsInclined, SlopeSpread, StationLine } from "@/lib/inclining/inclined-ship";
-import { type InclinedShip, incliningTest } from "@/lib/inclining/inclining-test";
+import type { InclinedShip } from "@/lib/inclining/inclining-test";
 import type { ShipHydrostatics } from "@/lib/inclining/ship-afloat";
 import type { IncliningTestData } from "@/lib/inclining/test-data";
 import { answer, type Result } from "@/lib/result";
-import { generalisedVcgOf, type Lightship, type LightshipItem, lightshipBalance, lightshipOf } from "./lightship";
+import { generalisedVcgOf, type Lightship, type LightshipItem } from "./lightship";
+import { type ReducedTest, reducedTest } from "./reduced-test";
 
 /** A test together with what separates the ship as inclined from the lightship; a test record is one of these. */
 export type LightshipTestData = IncliningTestData & {
@@ -77,14 +78,12 @@ export type MoveResult = {
  * Refused with every fault and its place in the record.
  */
 export function incliningResult(test: LightshipTestData): Result<IncliningResult, Faults> {
-  const ship = incliningTest(test);
-  if (!ship.ok) return ship;
-  const balance = inside("items", lightshipBalance(ship.value, test));
-  return balance.ok ? answer(resultOf(test, ship.value, lightshipOf(balance.value))) : balance;
+  const reduced = reducedTest(test);
+  return reduced.ok ? answer(resultOf(test, reduced.value)) : reduced;
 }
 
-/** The same from the ship and the lightship that were found already. */
-export function resultOf(test: LightshipTestData, ship: InclinedShip, lightship: Lightship): IncliningResult {
+/** The same of a test that is reduced already. */
+export function resultOf(test: LightshipTestData, { ship, lightship }: ReducedTest): IncliningResult {
   return {
     waterline: waterlineResult(ship, test),
     hydrostatics: hydrostaticsResult(ship),

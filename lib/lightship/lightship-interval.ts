@@ -7,6 +7,7 @@ import { type BudgetLine, budgetOf } from "@/lib/uncertainty/budget";
 import { type LocalExpansion, localExpansion } from "@/lib/uncertainty/local-expansion";
 import type { LightshipTestData } from "./inclining-result";
 import { generalisedVcgOf, lightshipBalance, lightshipOf } from "./lightship";
+import { reducedTest } from "./reduced-test";
 import { statedUncertainty } from "./stated-uncertainty";
 import { type Cause, type LineUncertainty, type TestInput, uncertainInputs } from "./uncertain-inputs";
 
@@ -25,20 +26,24 @@ export type UncertainLightship = {
  * How the lightship follows from everything that is not known exactly. The whole reduction is done again for each input,
  * a standard uncertainty up and down; the metacentre's own uncertainty stands in KG as it is.
  *
+ * `reduced`: the test's own reduction, where it has been done already.
  * Refused: what the reduction refuses. See `uncertainInputs` for what is uncertain and by how much.
  */
-export function uncertainLightship(test: LightshipTestData & Stating): Result<UncertainLightship, Faults> {
-  const ship = incliningTest(test);
-  if (!ship.ok) return ship;
+export function uncertainLightship(
+  test: LightshipTestData & Stating,
+  reduced: Result<{ readonly ship: InclinedShip }, Faults> = reducedTest(test),
+): Result<UncertainLightship, Faults> {
+  if (!reduced.ok) return reduced;
+  const { ship } = reduced.value;
   const stated = statedUncertainty(test.uncertainty);
-  const inputs = uncertainInputs(test, stated, lineUncertainty(ship.value.line));
+  const inputs = uncertainInputs(test, stated, lineUncertainty(ship.line));
   const expansion = localExpansion<LightshipTestData, Faults>(
-    (given, input) => (input?.cause === "items" ? lightshipNumbers(ship.value, given) : reducedNumbers(given)),
+    (given, input) => (input?.cause === "items" ? lightshipNumbers(ship, given) : reducedNumbers(given)),
     test,
     inputs,
   );
   if (!expansion.ok) return expansion;
-  const { displacement } = ship.value.asInclined;
+  const { displacement } = ship.asInclined;
   const inVcg = (stated.kmt * displacement) / (expansion.value.values[0] ?? displacement);
   return answer({
     expansion: {

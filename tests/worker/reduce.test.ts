@@ -8,7 +8,7 @@ import { defendedLightship } from "@/lib/lightship/defended-lightship";
 import { examined } from "@/lib/lightship/examination";
 import { incliningResult } from "@/lib/lightship/inclining-result";
 import { recordFrom } from "@/lib/record/parse-record";
-import { resultDocument } from "@/lib/report/result-document";
+import { resultDocument, wholeResult } from "@/lib/report/result-document";
 import { promised } from "@/lib/result";
 import { documentWith, sampleDocument } from "../lib/record/sample-document";
 
@@ -58,6 +58,7 @@ describe("the command reduce", () => {
       promised(examined(record)),
     );
     expect(JSON.parse(out)).toEqual(whole);
+    expect(promised(wholeResult(record))).toEqual(whole);
   });
 
   it("prints it for a person with --table", async () => {
