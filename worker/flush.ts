@@ -2,6 +2,7 @@ import { deviceIdentity, updateIdentity } from "@/db/device/device-identity";
 import { underFreeDeviceLock } from "@/db/device/device-lock";
 import { deviceToSend, eventsOfDevice, keepSending, keepStates, lastSending, unsentCount } from "@/db/device/event-queue";
 import type { HeldEvent } from "@/db/device/held-event";
+import { oweAllPhotographs } from "@/db/device/photographs";
 import { BATCH_EVENTS } from "@/lib/sync/batch-limits";
 import { afterAnswer, afterBackup, afterComparison, afterSilence, nextBatch, type StateChange } from "@/lib/sync/outbox";
 import { PROTOCOL, type SyncAnswer } from "@/lib/sync/protocol";
@@ -87,7 +88,9 @@ async function changesByComparison(device: string, changes: readonly StateChange
   const answered = new Set(changes.map(({ id }) => id));
   const others = (await eventsOfDevice(device)).filter(({ id }) => !answered.has(id));
   const known = (await deviceIdentity())?.server;
-  return afterComparison(others, answer.device, known !== undefined && known !== null && known.epoch !== answer.server.epoch);
+  const isNewEpoch = known !== undefined && known !== null && known.epoch !== answer.server.epoch;
+  if (isNewEpoch) await oweAllPhotographs();
+  return afterComparison(others, answer.device, isNewEpoch);
 }
 
 async function paused(batch: readonly HeldEvent[]): Promise<Reach> {

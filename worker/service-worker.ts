@@ -2,6 +2,7 @@
 import type { PrecacheEntry, SerwistGlobalConfig, SerwistPlugin } from "serwist";
 import { NetworkOnly, Serwist } from "serwist";
 import { flush } from "./flush";
+import { flushPhotographs } from "./flush-photographs";
 
 declare global {
   interface WorkerGlobalScope extends SerwistGlobalConfig {
@@ -98,7 +99,8 @@ self.addEventListener("sync", (event) => {
 
 async function drained(): Promise<void> {
   const reach = await flush({ urgent: false });
-  if (reach === "no-answer") throw new Error("nobody answered: try again later");
+  const photographs = reach === "reached" ? await flushPhotographs({ urgent: false }) : null;
+  if (reach === "no-answer" || photographs === "no-answer") throw new Error("nobody answered: try again later");
 }
 
 serwist.addEventListeners();

@@ -8,9 +8,15 @@ export function announceSaved(): void {
 
 /** Sends what the phone holds and fetches its job sheets anew. The flush is loaded when it is first needed: a page shows without it. */
 export async function sendNow(urgent: boolean): Promise<void> {
-  const [{ flush }, { refreshJobSheets }] = await Promise.all([import("./flush"), import("./job-sheet-refresh")]);
+  const [{ flush }, { flushPhotographs }, { refreshJobSheets }] = await Promise.all([
+    import("./flush"),
+    import("./flush-photographs"),
+    import("./job-sheet-refresh"),
+  ]);
   const reach = await flush({ urgent });
-  if (reach === "reached") await refreshJobSheets();
+  if (reach !== "reached") return;
+  await refreshJobSheets();
+  await flushPhotographs({ urgent });
 }
 
 /** At start, on becoming visible, on `online`, after each save, and every 15 s; answers how to stop. */

@@ -36,9 +36,15 @@ export function PhoneFile() {
 
 function Taken({ taken }: { taken: PhoneFileTaken }) {
   if (taken.type === "refused") return <Notice tone="refused">{taken.sentence}</Notice>;
-  const { phone, events, setAside, hasUnsaved } = taken;
+  const { phone, events, setAside, hasUnsaved, photographs, photographsLeft } = taken;
   return (
     <Notice title={`${phone}: ${events} ${events === 1 ? "event is" : "events are"} here now`}>
+      {photographs > 0 ? <p>{photographs === 1 ? "1 photograph has" : `${photographs} photographs have`} come with them.</p> : null}
+      {photographsLeft > 0 ? (
+        <p>
+          {photographsLeft === 1 ? "1 photograph is" : `${photographsLeft} photographs are`} on the phone only: keep the phone as it is.
+        </p>
+      ) : null}
       {setAside > 0 ? <p>{setAside} of them are set aside: see what needs your decision.</p> : null}
       {hasUnsaved ? <p>The phone could not save its last reading: take it in from paper.</p> : null}
     </Notice>

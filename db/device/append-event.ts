@@ -40,14 +40,27 @@ async function appended(db: DeviceDatabase, id: string, draft: EventDraft): Prom
   if (!identity) throw new NotEnrolled("this phone is not enrolled");
   const last = await lastSeq(db, identity.device);
   const event = await signedEvent(id, draft, identity, last + 1);
-  await db.transaction("rw", db.events, db.counters, db.unfinished, async () => {
+  const photographs = "photographs" in draft ? (draft.photographs ?? []) : [];
+  // without photographs their table is left out: a reading waits for nothing that it does not need
+  const tables = [db.events, db.counters, db.unfinished, ...(photographs.length > 0 ? [db.photographs] : [])];
+  await db.transaction("rw", tables, async () => {
     const now = await lastSeq(db, identity.device);
     if (now !== last) throw new Error(`the counter moved from ${last} to ${now}`);
     await db.counters.put({ device: identity.device, last: last + 1 });
     await db.events.add(event);
+    for (const name of photographs) await owePhotograph(db, name, id);
     if (event.slotKey !== null && event.type !== "void") await db.unfinished.delete(unfinishedKey(event.test, event.slotKey));
   });
   return event;
+}
+
+/** From now on a saved reading names it. One that the server has already is not sent twice. */
+async function owePhotograph(db: DeviceDatabase, name: string, event: string): Promise<void> {
+  const held = await db.photographs.get(name);
+  // a photograph that was lost must not hold its reading up
+  if (!held) return;
+  const state = held.state === "unfinished" ? "saved" : held.state;
+  await db.photographs.update(name, { state, events: [...held.events, event] });
 }
 
 async function signedEvent(id: string, draft: EventDraft, identity: DeviceIdentity, seq: number): Promise<HeldEvent> {

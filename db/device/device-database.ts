@@ -1,6 +1,7 @@
 import "client-only";
 import Dexie, { type Table } from "dexie";
 import type { JobSheet } from "@/lib/sync/job-sheet";
+import type { PhotographState } from "@/lib/sync/photograph";
 import type { DeviceIdentity } from "./device-identity";
 import type { HeldEvent } from "./held-event";
 
@@ -23,7 +24,25 @@ export type DeviceNote = { readonly key: string; readonly value: string };
 export type SeqCounter = { readonly device: string; readonly last: number };
 
 /** What the last attempt to send came to, shared by the page and the service worker. */
-export type KeptAnswer = { readonly key: "sending"; readonly value: unknown };
+export type KeptAnswer = { readonly key: "sending" | "photographs"; readonly value: unknown };
+
+/** A photograph under the hash of its bytes, and where it stands on its way. */
+export type HeldPhotograph = {
+  readonly sha256: string;
+  readonly type: string;
+  readonly bytes: Uint8Array<ArrayBuffer>;
+  readonly takenAt: string;
+  /** key of the unfinished entry it was taken beside */
+  readonly entry: string;
+  readonly state: PhotographState;
+  /** every event of this phone that names it */
+  readonly events: readonly string[];
+  /** why the server would not have it; null: it was not refused */
+  readonly refusal: string | null;
+  /** when the server answered for it [ms since 1970], and this phone's last number then */
+  readonly sentAt: number | null;
+  readonly sentAtSeq: number | null;
+};
 
 /** Chrome's default has been relaxed for years: "saved" must mean that the bytes are on the disk. */
 const options = { chromeTransactionDurability: "strict", cache: "disabled" } as const;
@@ -36,6 +55,7 @@ export class DeviceDatabase extends Dexie {
   declare readonly identity: Table<DeviceIdentity, string>;
   declare readonly lastAnswer: Table<KeptAnswer, string>;
   declare readonly notes: Table<DeviceNote, string>;
+  declare readonly photographs: Table<HeldPhotograph, string>;
 
   constructor(name = "battenbook") {
     super(name, options);
@@ -48,6 +68,8 @@ export class DeviceDatabase extends Dexie {
       lastAnswer: "key",
       notes: "key",
     });
+    // the tables of before stay as they are
+    this.version(2).stores({ photographs: "sha256, state, entry" });
   }
 }
 

@@ -8,7 +8,7 @@ import {
   sourceSchema,
   waterValueSchema,
 } from "@/lib/record/readings-schema";
-import { photographNamesSchema } from "./photograph";
+import { photographNamesSchema } from "./photograph-names";
 import { slotSchema } from "./slot";
 
 /** What a reading holds, by the kind of its slot. Millimetres only on battens; metres, t/m³ and °C elsewhere. */

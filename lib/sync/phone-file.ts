@@ -1,5 +1,6 @@
 import { z } from "zod";
 import { BATCH_BYTES, BATCH_EVENTS } from "./batch-limits";
+import { photographNameSchema } from "./photograph-names";
 import { type Envelope, envelopeSchema } from "./protocol";
 
 /** What a phone exports where no network ever comes: all its events, in the bytes that were signed. */
@@ -9,6 +10,10 @@ export const phoneFileSchema = z.object({
   device: z.uuid(),
   deviceName: z.string().nullable(),
   events: z.array(envelopeSchema),
+  /** photographs that no server has answered for, as far as a file can carry them; a phone of an older build has none */
+  photographs: z.array(z.object({ sha256: photographNameSchema, type: z.string(), base64: z.base64() })).optional(),
+  /** how many had no room in the file and stay on the phone */
+  photographsLeft: z.number().int().nonnegative().optional(),
   /** what the phone's store refused: never numbered, to be typed in by hand */
   unsaved: z.unknown(),
 });

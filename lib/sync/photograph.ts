@@ -1,4 +1,3 @@
-import { z } from "zod";
 import type { EventState } from "./outbox";
 
 /** The largest photograph a server takes [bytes]: four times what one of 1600 pixels needs. */
@@ -6,12 +5,8 @@ export const PHOTOGRAPH_BYTES = 2 * 1024 * 1024;
 /** The longer side of a photograph as the phone keeps it [pixels]: the marks of a batten are a few pixels apart. */
 export const PHOTOGRAPH_SIDE = 1600;
 export const PHOTOGRAPHS_A_READING = 4;
-
-/** A photograph's name: SHA-256 of its bytes, hexadecimal. */
-export const photographNameSchema = z.string().regex(/^[0-9a-f]{64}$/);
-
-/** The photographs a reading was taken with. They travel apart; the event, and so its signature, names their bytes. */
-export const photographNamesSchema = z.array(photographNameSchema).min(1).max(PHOTOGRAPHS_A_READING);
+/** The photographs of an exported file together [bytes]: some hundred, and still a file that a phone can write and share. */
+export const PHONE_FILE_PHOTOGRAPH_BYTES = 32 * 1024 * 1024;
 
 export type PictureType = "image/jpeg" | "image/png" | "image/webp";
 

@@ -1,5 +1,6 @@
 import { describe, expect, test } from "vitest";
-import { keptSize, mayLetGo, photographNamesSchema, photographsOwedInWords, pictureType } from "@/lib/sync/photograph";
+import { keptSize, mayLetGo, photographsOwedInWords, pictureType } from "@/lib/sync/photograph";
+import { photographNamesSchema } from "@/lib/sync/photograph-names";
 
 const bytes = (...given: number[]) => new Uint8Array(given);
 

@@ -1,7 +1,8 @@
 import { personOrRefusal, refused } from "@/app/access";
 import { database } from "@/db/server/connection";
 import { keepPhotograph, type Photograph, type PhotographRefusal, photographFor } from "@/db/server/photographs";
-import { PHOTOGRAPH_BYTES, photographNameSchema } from "@/lib/sync/photograph";
+import { PHOTOGRAPH_BYTES } from "@/lib/sync/photograph";
+import { photographNameSchema } from "@/lib/sync/photograph-names";
 
 type Context = { params: Promise<{ sha256: string }> };
 
