@@ -1,6 +1,6 @@
 import { type BackupFault, type BackupStanding, backupFaultSentence } from "@/lib/report/backup-words";
 import { type Result, refuse } from "@/lib/result";
-import { backUp, faultOf } from "./backup";
+import { areFilesDue, backUp, backUpFiles, faultOf } from "./backup";
 import { backupSettings, folderFault, isOnDataDisk } from "./backup-folder";
 import { type Backup, isBackupDue, lastBackup } from "./backups-made";
 import { type Database, database } from "./connection";
@@ -35,7 +35,7 @@ export function backupStanding(db: Database): BackupStanding {
     folder,
     everyMinutes,
     last: last ? { at: last.at, file: last.file, bytes: last.bytes } : null,
-    isDue: isBackupDue(db),
+    isDue: isBackupDue(db) || (folder !== null && areFilesDue(folder)),
     isOnDataDisk: folder !== null && isOnDataDisk(folder),
     fault: folderFault(folder) ?? keeping().fault,
   };
@@ -55,10 +55,19 @@ async function made(): Promise<Made> {
 
 function backUpIfDue(): void {
   try {
+    const { folder } = backupSettings();
     if (isBackupDue(database())) void backUpNow();
+    else if (folder !== null && areFilesDue(folder)) void filesNow(folder);
   } catch (error) {
     console.error("Whether a backup is due could not be found out:", error);
   }
+}
+
+async function filesNow(folder: string): Promise<void> {
+  if (keeping().running) return;
+  const fault = await backUpFiles(folder);
+  keeping().fault = fault;
+  if (fault) console.error(`Not every file is in the backup. ${backupFaultSentence(fault)}`);
 }
 
 // Next loads this module once per bundle: timer and handlers must share one

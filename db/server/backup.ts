@@ -8,7 +8,7 @@ import { copyNamed, folderFault, tidyFolder } from "./backup-folder";
 import { type Backup, noteBackup } from "./backups-made";
 import type { Database } from "./connection";
 import { filesFolder, makePrivateFile } from "./data-folder";
-import { copyFiles } from "./file-copies";
+import { copyFiles, lackingFiles } from "./file-copies";
 import { flushFile, flushFolder } from "./flushed";
 
 const PAGES_AT_A_TIME = 100;
@@ -23,8 +23,22 @@ export async function backUp(db: Database, folder: string, at: string): Promise<
   const copied = await copiedDatabase(db, folder, at);
   if (!copied.ok) return copied;
   noteBackup(db, copied.value);
-  const fault = await copyFiles(filesFolder(), path.join(folder, "files")).catch((error: unknown) => faultOf(error, folder));
+  const fault = await backUpFiles(folder);
   return fault === null ? copied : refuse(fault);
+}
+
+/** Copies the files that the backup folder lacks; null: it has them all now. */
+export async function backUpFiles(folder: string): Promise<BackupFault | null> {
+  return folderFault(folder) ?? copyFiles(filesFolder(), copiesOfFiles(folder)).catch((error: unknown) => faultOf(error, folder));
+}
+
+/** Whether a photograph or certificate has come that the backup folder lacks: they travel apart from what the ledger tells. */
+export function areFilesDue(folder: string): boolean {
+  return lackingFiles(filesFolder(), copiesOfFiles(folder)).length > 0;
+}
+
+function copiesOfFiles(folder: string): string {
+  return path.join(folder, "files");
 }
 
 async function copiedDatabase(db: Database, folder: string, at: string): Promise<Result<Backup, BackupFault>> {

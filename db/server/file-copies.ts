@@ -11,7 +11,7 @@ import { flushFolder } from "./flushed";
  */
 export async function copyFiles(from: string, to: string): Promise<BackupFault | null> {
   let damaged: string | null = null;
-  const lacking = namesIn(from).filter((name) => !isThere(path.join(from, name), path.join(to, name)));
+  const lacking = lackingFiles(from, to);
   if (lacking.length > 0) mkdirSync(to, { recursive: true, mode: 0o700 });
   for (const name of lacking) {
     const content = await readFile(path.join(from, name));
@@ -20,6 +20,11 @@ export async function copyFiles(from: string, to: string): Promise<BackupFault |
   }
   if (lacking.length > 0) flushFolder(to);
   return damaged === null ? null : { type: "FileDamaged", file: damaged };
+}
+
+/** The files that are not in the other folder yet. */
+export function lackingFiles(from: string, to: string): string[] {
+  return namesIn(from).filter((name) => !isThere(path.join(from, name), path.join(to, name)));
 }
 
 function namesIn(folder: string): string[] {

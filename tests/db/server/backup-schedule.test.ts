@@ -1,4 +1,5 @@
-import { mkdirSync, mkdtempSync, readdirSync, rmSync } from "node:fs";
+import { createHash } from "node:crypto";
+import { mkdirSync, mkdtempSync, readdirSync, readFileSync, rmSync, writeFileSync } from "node:fs";
 import { tmpdir } from "node:os";
 import path from "node:path";
 import { afterEach, beforeEach, expect, test, vi } from "vitest";
@@ -44,6 +45,19 @@ test("copies at the start and again after something was done, and not while noth
   await vi.waitFor(() => expect(backupStanding(yard.db).isDue).toBe(false), 5_000);
   await pause(500);
   expect(copies()).toHaveLength(2);
+});
+
+test("copies a photograph that comes when all else is in a backup, and nothing besides", async () => {
+  await backUpNow();
+  const bytes = "a batten, photographed";
+  const name = createHash("sha256").update(bytes).digest("hex");
+  mkdirSync(path.join(base, "data", "files"));
+  writeFileSync(path.join(base, "data", "files", name), bytes);
+  expect(backupStanding(yard.db).isDue).toBe(true);
+  startBackups();
+  await vi.waitFor(() => expect(backupStanding(yard.db).isDue).toBe(false), 5_000);
+  expect(readFileSync(path.join(folder, "files", name), "utf8")).toBe(bytes);
+  expect(copies()).toHaveLength(1);
 });
 
 test("makes one at a time: whoever asks meanwhile gets the same", async () => {
