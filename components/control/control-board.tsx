@@ -16,6 +16,7 @@ import { ReadingsGrid } from "./readings-grid";
 import { RoundProgress } from "./round-progress";
 import { StandingResult } from "./standing-result";
 import { StopSign } from "./stop-sign";
+import type { StopPhone } from "./use-stop-phone";
 
 type ControlBoardProps = {
   snapshot: LiveSnapshot;
@@ -23,10 +24,12 @@ type ControlBoardProps = {
   orders: ReactNode;
   link: ReactNode;
   enrol: ReactNode;
+  /** null for whoever only watches */
+  stopPhone: StopPhone | null;
 };
 
 /** Central control: the move and what needs deciding on top, the readings and the line below, the rest quiet. */
-export function ControlBoard({ snapshot, acts, orders, link, enrol }: ControlBoardProps) {
+export function ControlBoard({ snapshot, acts, orders, link, enrol, stopPhone }: ControlBoardProps) {
   const so = useMemo(() => testSoFar(snapshot.record), [snapshot.record]);
   return (
     <div className="flex flex-col gap-5">
@@ -61,7 +64,7 @@ export function ControlBoard({ snapshot, acts, orders, link, enrol }: ControlBoa
           <Cautions />
         </div>
         <div className="flex min-w-0 flex-col gap-5">
-          <Phones phones={snapshot.phones} />
+          <Phones phones={snapshot.phones} onStop={stopPhone} />
           {enrol}
         </div>
       </div>

@@ -22,5 +22,7 @@ export function Control(props: ControlProps) {
 
 function WatchedControl({ test, first }: ControlProps) {
   const { snapshot, link } = useLiveTest(test, first);
-  return <ControlBoard snapshot={snapshot} acts={null} orders={null} link={<LinkState link={link} unsent={0} />} enrol={null} />;
+  return (
+    <ControlBoard snapshot={snapshot} acts={null} orders={null} link={<LinkState link={link} unsent={0} />} enrol={null} stopPhone={null} />
+  );
 }

@@ -15,18 +15,21 @@ import { useLeadActs } from "./use-lead-acts";
 import { type LeadDevice, useLeadDevice } from "./use-lead-device";
 import { useLiveTest } from "./use-live-test";
 import { useSending } from "./use-sending";
+import { useStopPhone } from "./use-stop-phone";
 
 /** Central control in the hands of those who order: what they do is saved on this device first. */
 export function LedControl({ test, person, first }: ControlProps) {
   useSending();
   const { snapshot, link } = useLiveTest(test, first);
   const makeCode = useEnrolmentCodes(test);
+  const stopPhone = useStopPhone(test);
   const { device, prepare } = useLeadDevice(test, person.id);
   const { acts, unsent, failed } = useLeadActs({ test, person: person.id, jobTag: device.state === "ready" ? device.jobTag : "" });
   const seen = useMemo(() => snapshotWithUnsent(snapshot, unsent), [snapshot, unsent]);
   return (
     <ControlBoard
       snapshot={seen}
+      stopPhone={stopPhone}
       acts={device.state === "ready" ? acts : null}
       orders={<Preparing device={device} prepare={prepare} />}
       link={

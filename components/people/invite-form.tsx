@@ -38,11 +38,11 @@ export function InviteForm() {
         <fieldset className="sm:col-span-2">
           <legend className="font-bold text-small">May do on this server</legend>
           <label className="flex min-h-tap items-center gap-3">
-            <input type="checkbox" className="h-5 w-5 accent-redlead" {...form.register("isEngineer")} />
+            <input type="checkbox" className="h-5 w-5 shrink-0 accent-redlead" {...form.register("isEngineer")} />
             Engineer: makes vessels and tests
           </label>
           <label className="flex min-h-tap items-center gap-3">
-            <input type="checkbox" className="h-5 w-5 accent-redlead" {...form.register("isAdministrator")} />
+            <input type="checkbox" className="h-5 w-5 shrink-0 accent-redlead" {...form.register("isAdministrator")} />
             Administrator: accounts, backups, every test
           </label>
         </fieldset>

@@ -12,7 +12,7 @@ export function OfficeShell({ person, children }: { person: { name: string; isAd
           <Place href="/tests">Tests</Place>
           {person?.isAdministrator ? <Place href="/people">People</Place> : null}
         </nav>
-        {person ? <span className="text-small">{person.name}</span> : null}
+        {person ? <span className="hidden text-small sm:inline">{person.name}</span> : null}
         {person ? <SignOut /> : null}
       </PageHeader>
       <main id="main" className="mx-auto max-w-page px-4 py-5">

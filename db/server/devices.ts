@@ -4,6 +4,7 @@ import { answer, type Result, refuse } from "@/lib/result";
 import { deviceHolders, devices, enrolmentCodes } from "../schema/devices";
 import { events } from "../schema/events";
 import type { Act } from "./act";
+import { tellChange } from "./changes";
 import { type Database, inTransaction } from "./connection";
 import { writeEntry } from "./ledger-entries";
 
@@ -34,7 +35,7 @@ export function devicesEnrolledIn(db: Database, test: string): Device[] {
 }
 
 /** Whether a device was let into a test by a code, or has sent something of it. */
-export function isDeviceOf(db: Database, device: string, test: string): boolean {
+function isDeviceOf(db: Database, device: string, test: string): boolean {
   if (devicesEnrolledIn(db, test).some(({ id }) => id === device)) return true;
   const sent = and(eq(events.device, device), eq(events.test, test));
   return db.select({ id: events.id }).from(events).where(sent).limit(1).get() !== undefined;
@@ -92,6 +93,14 @@ export function revokeDevice(db: Database, id: string, act: Act): void {
     db.update(devices).set({ revokedAt: act.at }).where(eq(devices.id, id)).run();
     writeEntry(db, null, { ...act, what: "device.revoke", after: { device: id } });
   });
+}
+
+/** Stops a phone of a test, and says so on the test's open pages; false where it is none of this test. */
+export function stopPhoneOf(db: Database, device: string, test: string, act: Act): boolean {
+  if (!isDeviceOf(db, device, test)) return false;
+  revokeDevice(db, device, act);
+  tellChange(test);
+  return true;
 }
 
 function isSameKey(kept: Record<string, unknown> | null, given: NewDevice["publicKey"]): boolean {

@@ -1,6 +1,10 @@
 import { randomUUID } from "node:crypto";
 import { expect, test } from "vitest";
-import { deviceById, devicesEnrolledIn, publicKeySchema, registerDevice, revokeDevice } from "@/db/server/devices";
+import { onChange } from "@/db/server/changes";
+import { deviceById, devicesEnrolledIn, publicKeySchema, registerDevice, revokeDevice, stopPhoneOf } from "@/db/server/devices";
+import { noReading } from "@/db/server/event-writer";
+import { liveSnapshot } from "@/db/server/live-snapshot";
+import { idOf, Phone } from "./phone";
 import { at, personWith, yard } from "./yard";
 
 const key = { kty: "EC" as const, crv: "P-256" as const, x: "x".repeat(43), y: "y".repeat(43) };
@@ -27,6 +31,28 @@ test("refuses a device that was revoked", () => {
   revokeDevice(db, phone.device, act);
   expect(deviceById(db, phone.device)?.revokedAt).toBe(at);
   expect(registerDevice(db, phone, engineer.id, act)).toMatchObject({ ok: false, refusal: { type: "DeviceRevoked" } });
+});
+
+test("stops a phone that has sent something of the test: what it sent stands, what it sends now is set aside, and can be let in", () => {
+  const ship = yard();
+  const mara = new Phone(ship.db, ship.test, personWith(ship, "reader", "Mara").id);
+  const lead = new Phone(ship.db, ship.test, personWith(ship, "lead", "Ragna").id);
+  const mark = (name: string) => ({ kind: "draft" as const, mark: name, round: "before" as const });
+  expect(stopPhoneOf(ship.db, mara.device, ship.test, act)).toBe(false);
+  mara.sends([mara.reads(mark("AP"), { value: 3.381 })]);
+  const told: string[] = [];
+  const off = onChange(ship.test, () => told.push("changed"));
+  expect(stopPhoneOf(ship.db, mara.device, ship.test, act)).toBe(true);
+  off();
+  expect(told).toEqual(["changed"]);
+  const late = mara.reads(mark("FP"), { value: 3.2 });
+  expect(mara.sends([late]).results).toMatchObject([{ outcome: "quarantined", code: "revoked-device" }]);
+  lead.sends([
+    lead.says({ type: "release", ...noReading, payload: { event: idOf(late) }, reason: "she read it before the phone was lost" }),
+  ]);
+  const due = liveSnapshot(ship.db, ship.test, at)?.due ?? [];
+  const accepted = due.flatMap(({ readings }) => readings.filter(({ status }) => status === "accepted"));
+  expect(accepted.map(({ value }) => value)).toEqual([{ value: 3.381 }, { value: 3.2 }]);
 });
 
 test("stores nothing of a key but its public half", () => {

@@ -1,6 +1,6 @@
 import { accessOrRefusal, refused } from "@/app/access";
 import { database } from "@/db/server/connection";
-import { isDeviceOf, revokeDevice } from "@/db/server/devices";
+import { stopPhoneOf } from "@/db/server/devices";
 
 type Context = { params: Promise<{ id: string; device: string }> };
 
@@ -9,7 +9,7 @@ export async function DELETE(request: Request, { params }: Context): Promise<Res
   const { id, device } = await params;
   const access = await accessOrRefusal(request, id, ["lead", "engineer", "administrator"]);
   if (access instanceof Response) return access;
-  if (!isDeviceOf(database(), device, id)) return refused(404, "There is no such phone in this test.");
-  revokeDevice(database(), device, { by: access.person.id, at: new Date().toISOString() });
+  const act = { by: access.person.id, at: new Date().toISOString() };
+  if (!stopPhoneOf(database(), device, id, act)) return refused(404, "There is no such phone in this test.");
   return new Response(null, { status: 204 });
 }
