@@ -1,11 +1,13 @@
 "use client";
 
+import type { ReactNode } from "react";
 import { Cell, ColumnHead, DataTable, RowHead } from "@/components/ui/data-table";
 import { TimeOfDay } from "@/components/ui/time-of-day";
 import type { TestRecord } from "@/lib/record/test-record";
 import type { ReadingDue, StandingReading } from "@/lib/sync/live";
 import type { LeadActs } from "./lead-acts";
 import { offTheFit } from "./off-the-fit";
+import { Photographs, sameReading } from "./photographs";
 import { ReadingFigure } from "./reading-figure";
 import { ResolveForm } from "./resolve-form";
 import { slotInWords } from "./slot-in-words";
@@ -17,6 +19,7 @@ export function Disagreement({ due, record, acts }: DisagreementProps) {
   const heads = headsOf(due);
   const off = offTheFit(record, due.slot, heads);
   const hasFit = off.some((each) => each !== null);
+  const hasPhotographs = due.readings.some(({ photographs }) => photographs !== undefined);
   return (
     <div className="mt-2 grid gap-4 lg:grid-cols-2">
       <DataTable caption={`Readings that disagree: ${slotInWords(due.slot)}`}>
@@ -28,11 +31,18 @@ export function Disagreement({ due, record, acts }: DisagreementProps) {
             <ColumnHead>Who</ColumnHead>
             <ColumnHead>When</ColumnHead>
             <ColumnHead>How</ColumnHead>
+            {hasPhotographs ? <ColumnHead>Photographs</ColumnHead> : null}
           </tr>
         </thead>
         <tbody>
           {heads.map((head, index) => (
-            <HeadRow key={head.event} head={head} letter={letterOf(index)} due={due} off={hasFit ? (off[index] ?? "not known") : null} />
+            <HeadRow key={head.event} head={head} letter={letterOf(index)} due={due} off={hasFit ? (off[index] ?? "not known") : null}>
+              {hasPhotographs ? (
+                <Cell>
+                  <Photographs slot={due.slot} of={sameReading(head, due.readings)} />
+                </Cell>
+              ) : null}
+            </HeadRow>
           ))}
         </tbody>
       </DataTable>
@@ -41,9 +51,9 @@ export function Disagreement({ due, record, acts }: DisagreementProps) {
   );
 }
 
-type HeadRowProps = { head: StandingReading; letter: string; due: ReadingDue; off: string | null };
+type HeadRowProps = { head: StandingReading; letter: string; due: ReadingDue; off: string | null; children: ReactNode };
 
-function HeadRow({ head, letter, due, off }: HeadRowProps) {
+function HeadRow({ head, letter, due, off, children }: HeadRowProps) {
   return (
     <tr>
       <RowHead>{letter}</RowHead>
@@ -64,6 +74,7 @@ function HeadRow({ head, letter, due, off }: HeadRowProps) {
         {head.late ? ", late" : ""}
         {head.status === "void" ? ", taken back" : ""}
       </Cell>
+      {children}
     </tr>
   );
 }

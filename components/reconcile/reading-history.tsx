@@ -2,6 +2,7 @@
 
 import { useState } from "react";
 import type { LeadActs } from "@/components/control/lead-acts";
+import { Photographs } from "@/components/control/photographs";
 import { ReadingFigure } from "@/components/control/reading-figure";
 import { Button } from "@/components/ui/button";
 import { TextField } from "@/components/ui/text-field";
@@ -26,6 +27,7 @@ export function ReadingHistory({ due, acts }: ReadingHistoryProps) {
             {reading.author}, {howItCame(reading)}; read <TimeOfDay at={reading.capturedAt} dated /> by the phone, received{" "}
             <TimeOfDay at={reading.receivedAt} dated />
           </p>
+          <Photographs slot={due.slot} of={[reading]} />
           {acts && reading.status === "accepted" ? <TakeBack due={due} reading={reading} acts={acts} /> : null}
         </li>
       ))}
