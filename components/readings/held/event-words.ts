@@ -26,8 +26,14 @@ export function stateWords(state: EventState, receipt: Receipt | null): string {
 /** What was done, and at which place of the plan. */
 export function actWords(body: EventBody): string {
   const place = body.slot ? slotName(body.slot) : body.type;
-  if (body.type === "correct") return `${place}, corrected`;
+  if (body.type === "correct") return `${place}, corrected${withPhotographs(body.photographs)}`;
+  if (body.type === "record") return `${place}${withPhotographs(body.photographs)}`;
   return body.type === "void" ? `${place}, taken back` : place;
+}
+
+function withPhotographs(names: readonly string[] = []): string {
+  if (names.length === 0) return "";
+  return names.length === 1 ? ", with a photograph" : `, with ${names.length} photographs`;
 }
 
 /** The number or words of an event; empty where it holds none. */

@@ -4,6 +4,7 @@ import { lazy, Suspense, useState } from "react";
 import { Button } from "@/components/ui/button";
 import { Notice } from "@/components/ui/notice";
 import { TimeOfDay } from "@/components/ui/time-of-day";
+import { photographsOwedInWords } from "@/lib/sync/photograph";
 import { queueWords } from "@/lib/sync/queue-words";
 import { useQueue } from "../shell/use-queue";
 import { sendHeldEvents } from "../shell/use-sending";
@@ -30,6 +31,7 @@ export function HeldPage() {
     <div className="flex flex-col gap-3 py-1">
       <h1 className="font-bold text-title">What this phone holds</h1>
       <p className="font-bold text-large">{queue ? queueWords(queue.count, queue.reach) : "\u00a0"}</p>
+      {queue && queue.photographs > 0 ? <p className="font-bold">{photographsOwedInWords(queue.photographs)}</p> : null}
       <p className="text-ink-soft text-small">
         {queue?.heardAt ? (
           <>

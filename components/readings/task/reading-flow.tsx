@@ -2,7 +2,8 @@
 
 import type { ReactNode } from "react";
 import type { ReadingValue } from "@/lib/sync/event";
-import type { Slot } from "@/lib/sync/slot";
+import type { Slot, SlotKind } from "@/lib/sync/slot";
+import { PhotographStrip } from "../photograph/photograph-strip";
 import { AgainChoice } from "./again-choice";
 import { SavedCard } from "./saved-card";
 import { StorageAlarm } from "./storage-alarm";
@@ -36,7 +37,7 @@ type ReadingFlowProps<T> = {
 
 /** One reading from the first key to the word "saved", with the ways back: second look, repeat, correction, undo. Keyed by its slot. */
 export function ReadingFlow<T>({ here, slot, empty, formOf, shown, next, onRepeat, children }: ReadingFlowProps<T>) {
-  const { ready, saved, standing, intent, failed, ...reading } = useReading(here.sheet, here.person.id, slot, empty);
+  const { ready, saved, standing, intent, failed, photographs, ...reading } = useReading(here.sheet, here.person.id, slot, empty);
   const last = standing.at(-1);
   const correct = (of: Pick<OwnReading, "reading" | "head" | "value">) =>
     reading.begin({ of: { reading: of.reading, head: of.head } }, formOf(of.value));
@@ -68,10 +69,14 @@ export function ReadingFlow<T>({ here, slot, empty, formOf, shown, next, onRepea
   return (
     <>
       {failed ? <StorageAlarm failure={failed} shown={draftShown(failed.draft.payload, shown)} onTryAgain={reading.tryAgain} /> : null}
+      {withPhotographs.includes(slot.kind) ? <PhotographStrip {...photographs} /> : null}
       {children({ ...reading, correcting })}
     </>
   );
 }
+
+/** What has a scale or a mark that a picture shows. */
+const withPhotographs: readonly SlotKind[] = ["batten", "draft", "freeboard", "sounding", "ballast", "water"];
 
 function draftShown(payload: unknown, shown: (value: ReadingValue) => string): string {
   const isEmpty = Object.keys(payload as object).length === 0;

@@ -5,6 +5,7 @@ import type { ReadingValue } from "@/lib/sync/event";
 import type { JobSheet } from "@/lib/sync/job-sheet";
 import type { Slot } from "@/lib/sync/slot";
 import { slotKey } from "@/lib/sync/slot-key";
+import { usePhotographs } from "../photograph/use-photographs";
 import { type OwnReading, useOwnReadings } from "./use-own-readings";
 import { useSaving } from "./use-saving";
 import { useUnfinishedEntry } from "./use-unfinished-entry";
@@ -20,12 +21,20 @@ export function useReading<T>(sheet: JobSheet, author: string, slot: Slot, empty
   const own = useOwnReadings(sheet.test.id);
   const { entry, change, drop, settled } = useUnfinishedEntry<Kept<T>>(sheet.test.id, key, { intent: null, form: empty });
   const [saved, setSaved] = useState<Saved | null>(null);
-  const { saving, failed, append, tryAgain } = useSaving(settled, (draft, id) => {
+  const photographs = usePhotographs(sheet.test.id, key);
+  const { saving, failed, append, tryAgain } = useSaving(completed, (draft, id) => {
     setSaved(savedFrom(draft, id));
     if (draft.type === "void") void drop();
     else navigator.vibrate?.([60, 40, 60]);
   });
   const act = { test: sheet.test.id, jobTag: sheet.tag, author, slot, reason: null };
+
+  async function completed(draft: EventDraft): Promise<EventDraft> {
+    await settled();
+    if ((draft.type !== "record" && draft.type !== "correct") || draft.photographs) return draft;
+    const names = await photographs.names();
+    return names.length > 0 ? { ...draft, photographs: [...names] } : draft;
+  }
 
   function save(value: ReadingValue) {
     return append(readingDraft(act, value, entry?.intent?.of ?? null));
@@ -55,6 +64,7 @@ export function useReading<T>(sheet: JobSheet, author: string, slot: Slot, empty
     failed,
     tryAgain,
     takeBack,
+    photographs,
   };
 }
 

@@ -48,6 +48,12 @@ describe("the words of an event", () => {
     expect(valueWords(record)).toBe("104.0 mm, 3 turning points");
   });
 
+  test("say with how many photographs it was taken", () => {
+    const name = "0".repeat(64);
+    expect(actWords({ ...record, photographs: [name] })).toBe("Station A, move 3, repeat 2, with a photograph");
+    expect(actWords({ ...record, photographs: [name, name] })).toBe("Station A, move 3, repeat 2, with 2 photographs");
+  });
+
   test("name a reading that was taken back, with its reason", () => {
     const back: EventBody = { ...record, type: "void", base: record.id, payload: {}, source: null, reason: "Mistyped" };
     expect([actWords(back), valueWords(back)]).toEqual(["Station A, move 3, repeat 2, taken back", "Mistyped"]);
