@@ -1,10 +1,10 @@
 "use client";
 
+import { Sign } from "@/components/ui/sign";
 import type { BackupNews } from "@/lib/report/backup-words";
-import { BackupWarnings } from "./backup-warnings";
 import { useBackups } from "./use-backups";
 
-/** Takes room on a page only while something is wrong with the backups; `first` is null for those whom it does not concern. */
+/** A line above a page's own work, only while something is wrong with the backups; `first` is null for those whom it does not concern. */
 export function BackupWarning({ first }: { first: BackupNews | null }) {
   return first === null ? null : <Watched first={first} />;
 }
@@ -13,8 +13,11 @@ function Watched({ first }: { first: BackupNews }) {
   const { news } = useBackups(first);
   if (news.warnings.length === 0) return null;
   return (
-    <div className="mb-4">
-      <BackupWarnings warnings={news.warnings} />
-    </div>
+    <p className="mb-3 flex items-baseline gap-2 text-redlead-text text-small">
+      <Sign kind="alert" />
+      <span>
+        <b>Backup:</b> {news.warnings.join(" ")}
+      </span>
+    </p>
   );
 }
