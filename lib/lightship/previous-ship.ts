@@ -1,4 +1,4 @@
-import { type Finding, metOrNot } from "@/lib/inclining/checks/finding";
+import { type Compared, type Finding, metOrNot } from "@/lib/inclining/checks/finding";
 import type { Lightship } from "./lightship";
 
 /** The lightship of an earlier test of the same ship, or of a sister. */
@@ -26,9 +26,9 @@ export function comparedWithPrevious(lightship: Lightship, previous: PreviousShi
   const vcg = (lightship.vcg - previous.vcg) / Math.abs(previous.vcg);
   const ofDisplacement = kind === "earlier" ? 0.02 : sisterDisplacementLimit(lbp);
   return [
-    compared("previous-displacement", kind, displacement, ofDisplacement),
-    compared("previous-lcg", kind, lcg, kind === "earlier" ? 0.01 : 0.005),
-    ...(previous.vcg === 0 ? [] : [compared("previous-vcg", kind, vcg, 0.01)]),
+    compared("previous-displacement", { kind, deviation: displacement, other: previous.displacement }, ofDisplacement),
+    compared("previous-lcg", { kind, deviation: lcg, other: previous.lcg }, kind === "earlier" ? 0.01 : 0.005),
+    ...(previous.vcg === 0 ? [] : [compared("previous-vcg", { kind, deviation: vcg, other: previous.vcg }, 0.01)]),
   ];
 }
 
@@ -38,13 +38,8 @@ export function sisterDisplacementLimit(lbp: number): number {
   return 0.02 - 0.01 * along;
 }
 
-function compared(
-  id: "previous-displacement" | "previous-lcg" | "previous-vcg",
-  kind: PreviousShip["kind"],
-  deviation: number,
-  share: number,
-): Finding {
+function compared(id: "previous-displacement" | "previous-lcg" | "previous-vcg", found: Compared["found"], share: number): Finding {
   // a deviation of exactly the limit must not fail by rounding
-  const isMet = Math.abs(deviation) <= share + 1e-12;
-  return { id, verdict: metOrNot(isMet), found: { kind, deviation }, limit: { share } };
+  const isMet = Math.abs(found.deviation) <= share + 1e-12;
+  return { id, verdict: metOrNot(isMet), found, limit: { share } };
 }

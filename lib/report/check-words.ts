@@ -116,9 +116,21 @@ const words: { readonly [Id in CheckId]: Words<Id> } = {
   },
   missing: { name: "Still to come aboard", found: ofLightship, limit: mostOfLightship },
   surplus: { name: "To go ashore, without liquids", found: ofLightship, limit: mostOfLightship },
-  "previous-displacement": { name: "Displacement compared", found: comparedFound, limit: ({ share }) => `at most ${percent(share, 2)}` },
-  "previous-lcg": { name: "LCG compared", found: comparedFound, limit: ({ share }) => `at most ${percent(share, 1)} of length` },
-  "previous-vcg": { name: "VCG compared", found: comparedFound, limit: ({ share }) => `at most ${percent(share, 1)}` },
+  "previous-displacement": {
+    name: "Displacement compared",
+    found: (found) => comparedFound(found, "t"),
+    limit: ({ share }) => `at most ${percent(share, 2)}`,
+  },
+  "previous-lcg": {
+    name: "LCG compared",
+    found: (found) => comparedFound(found, "m"),
+    limit: ({ share }) => `at most ${percent(share, 1)} of length`,
+  },
+  "previous-vcg": {
+    name: "VCG compared",
+    found: (found) => comparedFound(found, "m"),
+    limit: ({ share }) => `at most ${percent(share, 1)}`,
+  },
 };
 
 const verdicts: Readonly<Record<Verdict, string>> = { met: "met", attention: "attention", "not-met": "not met" };
@@ -190,8 +202,8 @@ function mostOfLightship({ share }: { readonly share: number }): string {
   return `at most ${limitPercent(share)} of the lightship`;
 }
 
-function comparedFound({ kind, deviation }: Of<"previous-lcg">["found"]): string {
-  return `${signedPercent(deviation)} against ${kind === "earlier" ? "the earlier test" : "the sister ship"}`;
+function comparedFound({ kind, deviation, other }: Of<"previous-lcg">["found"], unit: string): string {
+  return `${signedPercent(deviation)} against ${shortFigure(other)} ${unit} of ${kind === "earlier" ? "the earlier test" : "the sister ship"}`;
 }
 
 function bothSides({ port, starboard }: { readonly port: number; readonly starboard: number }, words: (side: number) => string): string {

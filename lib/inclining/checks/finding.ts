@@ -77,9 +77,9 @@ export type Range = readonly [low: number, high: number];
 /** The largest change between the rounds and where; null where nothing was read in both. */
 export type Change = { readonly change: number; readonly at: string } | null;
 
-/** `kind`: with what; the deviation and its limit as shares of the other ship's displacement or VCG, of length for LCG. */
+/** `kind`: with what, `other`: its number; the deviation and its limit as shares of the other ship's displacement or VCG, of length for LCG. */
 export type Compared = {
-  readonly found: { readonly kind: "earlier" | "sister"; readonly deviation: number };
+  readonly found: { readonly kind: "earlier" | "sister"; readonly deviation: number; readonly other: number };
   readonly limit: { readonly share: number };
 };
 

@@ -20,7 +20,11 @@ describe("a lightship against an earlier test", () => {
   it("shows each deviation with its sign, LCG relative to length", () => {
     const found = comparedWithPrevious(now({ displacement: 990, lcg: 30.5, vcg: 4.9 }), { ...before, kind: "earlier" }, 100);
     expect(found.map((each) => each.found)).toEqual(
-      [-0.01, 0.005, -0.02].map((deviation) => ({ kind: "earlier", deviation: expect.closeTo(deviation, 12) })),
+      [
+        [-0.01, before.displacement],
+        [0.005, before.lcg],
+        [-0.02, before.vcg],
+      ].map(([deviation = 0, other]) => ({ kind: "earlier", deviation: expect.closeTo(deviation, 12), other })),
     );
   });
 

@@ -111,19 +111,19 @@ const every: { readonly [Id in CheckId]: FindingOf<Id> & { readonly words: reado
   missing: { found: { share: 0.0123 }, limit: { share: 0.02 }, words: ["1.2 % of the lightship", "at most 2 % of the lightship"] },
   surplus: { found: { share: 0.05 }, limit: { share: 0.04 }, words: ["5.0 % of the lightship", "at most 4 % of the lightship"] },
   "previous-displacement": {
-    found: { kind: "earlier", deviation: 0.0151 },
+    found: { kind: "earlier", deviation: 0.0151, other: 1296.2 },
     limit: { share: 0.02 },
-    words: ["+1.51 % against the earlier test", "at most 2.00 %"],
+    words: ["+1.51 % against 1296.2 t of the earlier test", "at most 2.00 %"],
   },
   "previous-lcg": {
-    found: { kind: "sister", deviation: -0.002 },
+    found: { kind: "sister", deviation: -0.002, other: 24.97 },
     limit: { share: 0.005 },
-    words: ["−0.20 % against the sister ship", "at most 0.5 % of length"],
+    words: ["−0.20 % against 24.97 m of the sister ship", "at most 0.5 % of length"],
   },
   "previous-vcg": {
-    found: { kind: "earlier", deviation: 0.02 },
+    found: { kind: "earlier", deviation: 0.02, other: 5.688 },
     limit: { share: 0.01 },
-    words: ["+2.00 % against the earlier test", "at most 1.0 %"],
+    words: ["+2.00 % against 5.688 m of the earlier test", "at most 1.0 %"],
   },
 };
 
