@@ -50,7 +50,7 @@ export function ControlBoard({ snapshot, acts, orders, link, enrol, stopPhone }:
         <ReadingsGrid snapshot={snapshot} />
         <div className="flex min-w-0 flex-col gap-5">
           <LinePanel record={snapshot.record} so={so} />
-          <StandingResult so={so} moves={snapshot.moves} unmeasured={movesNotMeasured(snapshot.due, so)} />
+          <StandingResult record={snapshot.record} so={so} moves={snapshot.moves} unmeasured={movesNotMeasured(snapshot.due, so)} />
         </div>
       </div>
       {acts ? (

@@ -6,11 +6,18 @@ import { centreOf, type Moments } from "@/lib/lightship/weight-item";
 export type BalanceLine = {
   readonly label: string;
   readonly moments: Moments;
-  readonly kind: "state" | "off" | "on";
+  readonly kind: State | "off" | "on";
 };
+type State = "as-inclined" | "lightship";
+type Digits = Readonly<Record<"displacement" | "vcg" | "lcg" | "tcg", number>>;
+
+type BalanceTableProps = { lines: readonly BalanceLine[]; digits: Readonly<Record<State, Digits>> };
+
+/** What goes off and comes on is known as it was weighed and measured. */
+const ofItems: Digits = { displacement: 2, lcg: 3, tcg: 3, vcg: 3 };
 
 /** As inclined, what is deducted, what is added, and what is left: the lightship. Masses, centres and moments. */
-export function BalanceTable({ lines }: { lines: readonly BalanceLine[] }) {
+export function BalanceTable({ lines, digits }: BalanceTableProps) {
   return (
     <DataTable caption="From as inclined to lightship" className="min-w-[52rem]">
       <thead>
@@ -27,31 +34,32 @@ export function BalanceTable({ lines }: { lines: readonly BalanceLine[] }) {
       </thead>
       <tbody>
         {lines.map((line) => (
-          <BalanceRow key={line.label} line={line} />
+          <BalanceRow key={line.label} line={line} digits={line.kind === "off" || line.kind === "on" ? ofItems : digits[line.kind]} />
         ))}
       </tbody>
     </DataTable>
   );
 }
 
-function BalanceRow({ line }: { line: BalanceLine }) {
+function BalanceRow({ line, digits }: { line: BalanceLine; digits: Digits }) {
   const { moments, kind, label } = line;
   const by = kind === "off" ? -1 : 1;
   const centre = moments.mass === 0 ? null : centreOf(moments);
-  const look = kind === "state" ? "bg-sailcloth font-bold" : "";
+  const isState = kind !== "off" && kind !== "on";
+  const look = isState ? "bg-sailcloth font-bold" : "";
   return (
     <tr className={look}>
-      <RowHead className={kind === "state" ? "" : "pl-5 font-normal"}>
+      <RowHead className={isState ? "" : "pl-5 font-normal"}>
         {kind === "off" ? "less " : kind === "on" ? "plus " : ""}
         {label}
       </RowHead>
-      <Figure value={by * moments.mass} decimals={2} signed={kind !== "state"} />
-      <Figure value={centre?.lcg ?? null} decimals={3} />
-      <Figure value={centre?.tcg ?? null} decimals={3} signed />
-      <Figure value={centre?.vcg ?? null} decimals={3} />
-      <Figure value={by * moments.along} decimals={1} signed={kind !== "state"} />
+      <Figure value={by * moments.mass} decimals={digits.displacement} signed={!isState} />
+      <Figure value={centre?.lcg ?? null} decimals={digits.lcg} />
+      <Figure value={centre?.tcg ?? null} decimals={digits.tcg} signed />
+      <Figure value={centre?.vcg ?? null} decimals={digits.vcg} />
+      <Figure value={by * moments.along} decimals={1} signed={!isState} />
       <Figure value={by * moments.athwart} decimals={1} signed />
-      <Figure value={by * moments.upward} decimals={1} signed={kind !== "state"} />
+      <Figure value={by * moments.upward} decimals={1} signed={!isState} />
     </tr>
   );
 }

@@ -4,15 +4,23 @@ import { Button } from "@/components/ui/button";
 import { Disclosure } from "@/components/ui/disclosure";
 import { Panel } from "@/components/ui/panel";
 import type { TestRecord } from "@/lib/record/test-record";
+import type { lightshipDigits } from "@/lib/report/result-digits";
 import { BudgetTable } from "./budget-table";
 import { IntervalTable } from "./interval-table";
 import { SettingsForm } from "./settings-form";
 import { UncertaintyForm } from "./uncertainty-form";
-import { useDefence } from "./use-defence";
+import type { useDefence } from "./use-defence";
+
+type DefencePanelProps = {
+  record: TestRecord;
+  defence: ReturnType<typeof useDefence>;
+  digits: ReturnType<typeof lightshipDigits>;
+  mayState: boolean;
+};
 
 /** How far the lightship can be trusted, and what to measure better. */
-export function DefencePanel({ record, mayState }: { record: TestRecord; mayState: boolean }) {
-  const { stop, start, ...state } = useDefence(record);
+export function DefencePanel({ record, defence, digits, mayState }: DefencePanelProps) {
+  const { stop, start, ...state } = defence;
   return (
     <Panel title="How well it is known" aside={state.type === "done" ? `${state.defence.draws} draws` : undefined}>
       {state.type === "drawing" ? <Drawing share={state.share} onStop={stop} /> : null}
@@ -24,7 +32,7 @@ export function DefencePanel({ record, mayState }: { record: TestRecord; mayStat
       ) : null}
       {state.type === "done" ? (
         <div className="grid items-start gap-6 lg:grid-cols-2">
-          <IntervalTable intervals={state.defence.interval95} isAssumed={record.uncertainty === undefined} />
+          <IntervalTable intervals={state.defence.interval95} digits={digits} isAssumed={record.uncertainty === undefined} />
           <BudgetTable budget={state.defence.budget} />
         </div>
       ) : null}

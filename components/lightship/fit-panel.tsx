@@ -10,7 +10,7 @@ import { MovesTable } from "./moves-table";
 const PER_METRE = 1000;
 
 /** The common slope with its interval, and what each station says by itself. */
-export function FitPanel({ test, ship }: { test: IncliningTestData; ship: InclinedShip }) {
+export function FitPanel({ test, ship, gmDecimals }: { test: IncliningTestData; ship: InclinedShip; gmDecimals: number }) {
   const { line } = ship;
   const { spread } = line;
   return (
@@ -38,7 +38,7 @@ export function FitPanel({ test, ship }: { test: IncliningTestData; ship: Inclin
         <OwnSlopes line={line} />
       </div>
       <div className="mt-4">
-        <MovesTable test={test} ship={ship} />
+        <MovesTable test={test} ship={ship} gmDecimals={gmDecimals} />
       </div>
     </Panel>
   );

@@ -37,11 +37,11 @@ function linesOf(balance: LightshipBalance, ship: InclinedShip, { items }: TestR
   const liquids = ship.liquids.map(({ id, mass, lcg, tcg, vcg }) => off(`tank ${id}`, momentsOf({ mass, x: lcg, y: tcg, z: vcg })));
   const single = [off("test weights", balance.testWeights), off("persons", balance.persons), ...liquids];
   return [
-    { label: "As inclined", moments: balance.asInclined, kind: "state" },
+    { label: "As inclined", moments: balance.asInclined, kind: "as-inclined" },
     ...[...single, ...items.flatMap((item) => (item.action === "deduct" ? [off(item.label, momentsOf(item))] : []))].filter(hasMass),
     ...items.flatMap((item) => (item.action === "add" ? [on(item.label, momentsOf(item))] : [])),
     ...(items.some(({ action }) => action === "relocate") ? [on("items moved to their places", balance.relocated)] : []),
-    { label: "Lightship", moments: balance.lightship, kind: "state" },
+    { label: "Lightship", moments: balance.lightship, kind: "lightship" },
   ];
 }
 

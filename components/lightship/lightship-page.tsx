@@ -12,6 +12,7 @@ import { Panel } from "@/components/ui/panel";
 import type { Hint } from "@/lib/inclining/plot-hints";
 import { methodDifference } from "@/lib/lightship/method-difference";
 import type { TestRecord } from "@/lib/record/test-record";
+import { inclinedDigits, lightshipDigits } from "@/lib/report/result-digits";
 import { BalanceTable } from "./balance-table";
 import { ChecksPanel } from "./checks-panel";
 import { DefencePanel } from "./defence-panel";
@@ -20,6 +21,7 @@ import { HydrostaticsPanel } from "./hydrostatics-panel";
 import { ItemsTable } from "./items-table";
 import { type FoundLightship, foundLightship } from "./lightship-found";
 import { LightshipResult } from "./lightship-result";
+import { useDefence } from "./use-defence";
 import { WaterlinePanel } from "./waterline-panel";
 
 /** From as inclined to lightship, with all that it rests on. */
@@ -34,24 +36,22 @@ export function LightshipPage({ record, mayState }: { record: TestRecord; maySta
 }
 
 function Found({ found, record, mayState }: { found: FoundLightship; record: TestRecord; mayState: boolean }) {
-  const { ship, lines, lightship, examination, result } = found;
+  const { ship, lines, examination, result } = found;
+  const defence = useDefence(record);
+  const intervals = defence.type === "done" ? defence.defence.interval95 : null;
+  const digits = lightshipDigits(result.lightship, result.asInclined, intervals);
   return (
     <>
-      <LightshipResult
-        lightship={lightship}
-        ship={ship}
-        method={record.settings?.method ?? "classical"}
-        difference={methodDifference(record, ship)}
-      />
-      <DefencePanel record={record} mayState={mayState} />
+      <LightshipResult lightship={result.lightship} difference={methodDifference(record, ship)} digits={digits} />
+      <DefencePanel record={record} defence={defence} digits={digits} mayState={mayState} />
       <Panel title="From as inclined to lightship">
-        <BalanceTable lines={lines} />
+        <BalanceTable lines={lines} digits={{ "as-inclined": inclinedDigits(result.asInclined.uncertainty), lightship: digits }} />
       </Panel>
       <div className="grid items-start gap-5 lg:grid-cols-2">
         <WaterlinePanel waterline={result.waterline} water={ship.afloat.water} checks={examination.checks} />
-        <HydrostaticsPanel hydrostatics={ship.afloat.hydrostatics} asInclined={ship.asInclined} />
+        <HydrostaticsPanel hydrostatics={ship.afloat.hydrostatics} asInclined={result.asInclined} />
         <Plot record={record} hints={examination.hints} />
-        <FitPanel test={record} ship={ship} />
+        <FitPanel test={record} ship={ship} gmDecimals={inclinedDigits(result.asInclined.uncertainty).gm} />
       </div>
       <ChecksPanel checks={examination.checks} />
     </>

@@ -1,37 +1,34 @@
 import { Notice } from "@/components/ui/notice";
 import { Panel } from "@/components/ui/panel";
 import { Quantity, type QuantityProps } from "@/components/ui/quantity";
-import type { InclinedShip } from "@/lib/inclining/inclining-test";
-import type { Method } from "@/lib/lightship/inclining-result";
-import { generalisedVcgOf, type Lightship } from "@/lib/lightship/lightship";
+import type { IncliningResult } from "@/lib/lightship/inclining-result";
 import type { MethodDifference } from "@/lib/lightship/method-difference";
 import { methodSentences } from "@/lib/report/method-words";
+import type { lightshipDigits } from "@/lib/report/result-digits";
 
-type LightshipResultProps = { lightship: Lightship; ship: InclinedShip; method: Method; difference: MethodDifference | null };
+type LightshipResultProps = {
+  lightship: IncliningResult["lightship"];
+  difference: MethodDifference | null;
+  digits: ReturnType<typeof lightshipDigits>;
+};
 
 /** The result, in the size it deserves, with the caution that belongs to it. */
-export function LightshipResult({ lightship, ship, method, difference }: LightshipResultProps) {
-  const { displacement, lcg, tcg } = lightship;
-  const generalised = generalisedVcgOf(lightship, ship);
-  const isGeneralised = method === "generalised" && generalised !== null;
+export function LightshipResult({ lightship, difference, digits }: LightshipResultProps) {
+  const { displacement, lcg, tcg, vcg, vcgGeneralised: generalised } = lightship;
+  const isGeneralised = lightship.headline === "generalised" && generalised !== null;
   return (
     <Panel title="Result" aside={isGeneralised ? "generalised reduction" : "classical reduction"}>
       <div className="grid grid-cols-2 gap-x-6 gap-y-4 md:grid-cols-4">
-        <Headline name="Displacement" value={displacement} unit="t" decimals={1} />
-        <Headline
-          name="VCG above baseline"
-          value={isGeneralised ? generalised : lightship.vcg}
-          unit="m"
-          {...digitsOfVcg(lightship, ship)}
-        />
-        <Headline name="LCG forward of AP" value={lcg} unit="m" decimals={2} />
-        <Headline name="TCG to starboard +" value={tcg} unit="m" decimals={3} signed />
+        <Headline name="Displacement" value={displacement} unit="t" decimals={digits.displacement} />
+        <Headline name="VCG above baseline" value={isGeneralised ? generalised : vcg} unit="m" decimals={digits.vcg} />
+        <Headline name="LCG forward of AP" value={lcg} unit="m" decimals={digits.lcg} />
+        <Headline name="TCG to starboard +" value={tcg} unit="m" decimals={digits.tcg} signed />
       </div>
       {generalised === null ? null : (
         <p className="mt-4">
           By the {isGeneralised ? "classical" : "generalised"} reduction the VCG is{" "}
           <strong>
-            <Quantity value={isGeneralised ? lightship.vcg : generalised} unit="m" {...digitsOfVcg(lightship, ship)} />
+            <Quantity value={isGeneralised ? vcg : generalised} unit="m" decimals={digits.vcg} />
           </strong>
           . {difference ? methodSentences(difference).join(" ") : null}
         </p>
@@ -55,12 +52,4 @@ function Headline({ name, ...quantity }: { name: string } & QuantityProps) {
       </p>
     </div>
   );
-}
-
-/** What the line leaves open in KG stands in the lightship's VCG, enlarged as the deductions leave less mass; no draft mark keeps less than a millimetre. */
-function digitsOfVcg({ displacement }: Lightship, { line, asInclined }: InclinedShip) {
-  const enlarged = asInclined.displacement / displacement;
-  if (line.spread === null) return { decimals: 2 };
-  const ofLine = (enlarged * asInclined.gmFluid * line.spread.slopeUncertainty) / line.slope;
-  return { uncertainty: Math.max(ofLine, 0.01) };
 }

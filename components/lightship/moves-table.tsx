@@ -6,10 +6,10 @@ import { withoutEachMove } from "@/lib/inclining/line-diagnostics";
 import { standardisedResiduals } from "@/lib/inclining/standardised-residuals";
 import type { IncliningTestData } from "@/lib/inclining/test-data";
 
-type MovesTableProps = { test: IncliningTestData; ship: InclinedShip };
+type MovesTableProps = { test: IncliningTestData; ship: InclinedShip; gmDecimals: number };
 
 /** How far each move stands off the line through the others, and what GM would be without it. */
-export function MovesTable({ test, ship: { line, asInclined } }: MovesTableProps) {
+export function MovesTable({ test, ship: { line, asInclined }, gmDecimals }: MovesTableProps) {
   const { points, limit } = standardisedResiduals(line.moves, uncertaintyOfMove(test, line));
   const without = withoutEachMove(line, asInclined);
   return (
@@ -41,7 +41,7 @@ export function MovesTable({ test, ship: { line, asInclined } }: MovesTableProps
                 <Quantity
                   value={without.find((each) => each.no === no && each.session === session)?.gmFluid ?? null}
                   unit="m"
-                  decimals={3}
+                  decimals={gmDecimals}
                 />
               </Cell>
             </tr>

@@ -25,6 +25,7 @@ export type ShipHydrostatics = {
   readonly kmt: number;
   readonly kml: number;
   readonly lcf: number;
+  readonly waterplaneArea: number;
 };
 
 /** How the ship floats at the reference state. */

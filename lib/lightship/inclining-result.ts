@@ -8,6 +8,7 @@ import type { InclinedShip } from "@/lib/inclining/inclining-test";
 import type { ShipHydrostatics } from "@/lib/inclining/ship-afloat";
 import type { IncliningTestData } from "@/lib/inclining/test-data";
 import { answer, type Result } from "@/lib/result";
+import { type InclinedUncertainty, inclinedUncertainty } from "./inclined-uncertainty";
 import { generalisedVcgOf, type Lightship, type LightshipItem } from "./lightship";
 import { type ReducedTest, reducedTest } from "./reduced-test";
 
@@ -37,13 +38,13 @@ export type IncliningResult = {
     /** of the round after the moves, fitted apart; null where there is none, or where it is the one that counts */
     readonly after: RoundResult | null;
   };
-  readonly hydrostatics: Omit<ShipHydrostatics, "kml">;
+  readonly hydrostatics: Omit<ShipHydrostatics, "kml" | "waterplaneArea">;
   readonly fit: Omit<SlopeSpread, "byScatter"> & {
     readonly slope: number;
     readonly stations: readonly StationResult[];
     readonly moves: readonly MoveResult[];
   };
-  readonly asInclined: AsInclined;
+  readonly asInclined: AsInclined & { readonly uncertainty: InclinedUncertainty };
   /** null where the hydrostatics can't give it */
   readonly generalised: GeneralisedShip | null;
   /** `vcg` by the classical reduction */
@@ -88,7 +89,7 @@ export function resultOf(test: LightshipTestData, { ship, lightship }: ReducedTe
     waterline: waterlineResult(ship, test),
     hydrostatics: hydrostaticsResult(ship),
     fit: fitResult(ship, test),
-    asInclined: ship.asInclined,
+    asInclined: { ...ship.asInclined, uncertainty: inclinedUncertainty(test, ship.afloat, ship.line, ship.asInclined.gmFluid) },
     generalised: ship.generalised,
     lightship: lightshipResult(lightship, ship, test),
   };

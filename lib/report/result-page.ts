@@ -3,13 +3,14 @@ import type { IncliningResult } from "@/lib/lightship/inclining-result";
 import { causeName } from "./cause-words";
 import { checkName, verdictWord } from "./check-words";
 import { hintName, movesInWords } from "./hint-words";
+import { inclinedDigits, lightshipDigits } from "./result-digits";
 import type { ResultDocument } from "./result-document";
-import { decimalsFor, figure, figureWithin, signedFigure } from "./rounding";
+import { decimalsFor, figure, signedFigure } from "./rounding";
 import { afloatRows, changeRows, markRows, type Row } from "./waterline-lines";
 
 /**
  * The result of a test as lines of text for a person, each number with its unit.
- * Digits of what follows from the slope follow its 95 % interval; the others are those in which they are read.
+ * Digits follow the uncertainty, by `inclinedDigits` and `lightshipDigits`; readings stand in the digits in which they are read.
  */
 export function resultPage(result: ResultDocument): readonly string[] {
   const sections = [
@@ -25,11 +26,11 @@ export function resultPage(result: ResultDocument): readonly string[] {
   return [...sections.flatMap((lines) => [...lines, ""]), ...assumptionLines(result)];
 }
 
-function waterlineLines({ waterline, hydrostatics }: IncliningResult): readonly string[] {
+function waterlineLines({ waterline, hydrostatics, asInclined }: IncliningResult): readonly string[] {
   return section("Afloat", [
     ...afloatRows(waterline),
     ["Water density", figure(waterline.density, 4), "t/m³"],
-    [`Displacement by ${hydrostatics.source}`, figure(hydrostatics.displacement, 1), "t"],
+    [`Displacement by ${hydrostatics.source}`, figure(hydrostatics.displacement, inclinedDigits(asInclined.uncertainty).displacement), "t"],
     ["KMt at the measured list", figure(hydrostatics.kmt, 3), "m"],
   ]);
 }
@@ -48,7 +49,7 @@ function foundBy(checks: ResultDocument["checks"], id: CheckId): readonly string
   return checks.flatMap((check) => (check.id === id ? [`  ${checkName(id)}: ${verdictWord(check.verdict)}; ${check.found}`] : []));
 }
 
-function fitLines({ fit }: IncliningResult): readonly string[] {
+function fitLines({ fit, asInclined }: IncliningResult): readonly string[] {
   const decimals = decimalsFor(fit.slopeUncertainty * 1e6);
   return section("Line, tangent on moment", [
     ["Slope per 1 000 000 t·m", figure(fit.slope * 1e6, decimals), ""],
@@ -62,41 +63,41 @@ function fitLines({ fit }: IncliningResult): readonly string[] {
     ...fit.moves.map(
       ({ no, moment, gm }): Row => [
         `Move ${no} at ${signedFigure(moment, 2)} t·m, GM`,
-        gm === null ? "–" : figure(gm, 3),
+        gm === null ? "–" : figure(gm, inclinedDigits(asInclined.uncertainty).gm),
         gm === null ? "" : "m",
       ],
     ),
   ]);
 }
 
-function inclinedLines({ asInclined, fit }: IncliningResult): readonly string[] {
-  const uncertainty = (asInclined.gmFluid * fit.slopeUncertainty) / fit.slope;
+function inclinedLines({ asInclined }: IncliningResult): readonly string[] {
+  const digits = inclinedDigits(asInclined.uncertainty);
   return section("As inclined", [
-    ["Displacement", figure(asInclined.displacement, 1), "t"],
-    ["GM fluid", figureWithin(asInclined.gmFluid, uncertainty), "m"],
-    ["Free surface correction", figureWithin(asInclined.freeSurfaceCorrection, uncertainty), "m"],
-    ["GM solid", figureWithin(asInclined.gmSolid, uncertainty), "m"],
-    ["VCG", figureWithin(asInclined.vcg, uncertainty), "m"],
-    ["LCG", figure(asInclined.lcg, 3), "m"],
-    ["TCG to starboard", signedFigure(asInclined.tcg, 3), "m"],
+    ["Displacement", figure(asInclined.displacement, digits.displacement), "t"],
+    ["GM fluid", figure(asInclined.gmFluid, digits.gm), "m"],
+    ["Free surface correction", figure(asInclined.freeSurfaceCorrection, digits.gm), "m"],
+    ["GM solid", figure(asInclined.gmSolid, digits.gm), "m"],
+    ["VCG", figure(asInclined.vcg, digits.vcg), "m"],
+    ["LCG", figure(asInclined.lcg, digits.lcg), "m"],
+    ["TCG to starboard", signedFigure(asInclined.tcg, digits.tcg), "m"],
   ]);
 }
 
-function lightshipLines({ lightship }: ResultDocument): readonly string[] {
+function lightshipLines({ lightship, asInclined }: ResultDocument): readonly string[] {
+  const digits = lightshipDigits(lightship, asInclined, lightship.interval95);
   const { displacement, vcg, lcg, vcgGeneralised } = lightship.interval95;
   return section(`Lightship, ${lightship.headline} method, with its 95 % interval`, [
-    within("Displacement", lightship.displacement, displacement, "t"),
-    within("VCG, classical", lightship.vcg, vcg, "m"),
+    within("Displacement", lightship.displacement, displacement, "t", digits.displacement),
+    within("VCG, classical", lightship.vcg, vcg, "m", digits.vcg),
     ...(vcgGeneralised && lightship.vcgGeneralised !== null
-      ? [within("VCG, generalised", lightship.vcgGeneralised, vcgGeneralised, "m")]
+      ? [within("VCG, generalised", lightship.vcgGeneralised, vcgGeneralised, "m", digits.vcg)]
       : []),
-    within("LCG", lightship.lcg, lcg, "m"),
-    ["TCG to starboard", signedFigure(lightship.tcg, 3), "m"],
+    within("LCG", lightship.lcg, lcg, "m", digits.lcg),
+    ["TCG to starboard", signedFigure(lightship.tcg, digits.tcg), "m"],
   ]);
 }
 
-function within(label: string, value: number, [low, high]: readonly [number, number], unit: string): Row {
-  const decimals = decimalsFor((high - low) / 4);
+function within(label: string, value: number, [low, high]: readonly [number, number], unit: string, decimals: number): Row {
   return [label, figure(value, decimals), `${unit}   ${figure(low, decimals)} to ${figure(high, decimals)}`];
 }
 
@@ -108,7 +109,10 @@ function budgetLines({ budget }: ResultDocument): readonly string[] {
 }
 
 function examinationSections({ checks, hints }: ResultDocument): readonly (readonly string[])[] {
-  const findings = checks.map(({ id, verdict, found, limit }): Row => [checkName(id), verdictWord(verdict), ` ${found}; ${limit}`]);
+  const findings = checks.map(({ id, verdict, found, limit, source }): Row => {
+    const from = id.startsWith("previous-") ? ` (${source})` : "";
+    return [checkName(id), verdictWord(verdict), ` ${found}; ${limit}${from}`];
+  });
   const told = hints.flatMap(({ cause, moves, evidence }) => [`  ${hintName(cause)}: ${movesInWords(moves)}`, `    ${evidence}`]);
   return [section("Checks", findings), ...(told.length === 0 ? [] : [["What the plot tells", ...told]])];
 }

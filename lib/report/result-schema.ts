@@ -5,6 +5,7 @@ const number = z.number();
 const interval = z.tuple([number, number]);
 const byName = z.record(z.string(), number);
 const round = { draftAft: number, draftForward: number, draftMidships: number, trim: number, heelDegrees: number, sag: number };
+const inclined = z.strictObject({ displacement: number, gm: number, vcg: number, lcg: number, tcg: number });
 const centre = { lcg: number, tcg: number, vcg: number };
 
 /** The result of a test as `reduce` prints it: the published shape of `ResultDocument`. Metres, tonnes, tangents, shares of 1. */
@@ -56,7 +57,14 @@ export const resultSchema = z.strictObject({
     ),
     moves: z.array(z.strictObject({ no: number, session: number, moment: number, tanHeel: number, gm: number.nullable() })),
   }),
-  asInclined: z.strictObject({ displacement: number, gmFluid: number, freeSurfaceCorrection: number, gmSolid: number, ...centre }),
+  asInclined: z.strictObject({
+    displacement: number,
+    gmFluid: number,
+    freeSurfaceCorrection: number,
+    gmSolid: number,
+    ...centre,
+    uncertainty: inclined,
+  }),
   generalised: z.strictObject({ vcg: number, tcg: number }).nullable(),
   lightship: z.strictObject({
     displacement: number,

@@ -14,7 +14,9 @@ afterEach(cleanup);
 const { moves, due } = bargeSnapshot({ read: 4, open: null });
 
 function shown(record: TestRecord, unmeasured: readonly number[] = []) {
-  return render(<StandingResult so={testSoFar(record)} moves={moves} unmeasured={unmeasured} />).container.textContent ?? "";
+  return (
+    render(<StandingResult record={record} so={testSoFar(record)} moves={moves} unmeasured={unmeasured} />).container.textContent ?? ""
+  );
 }
 
 describe("the result as it stands", () => {

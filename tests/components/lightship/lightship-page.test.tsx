@@ -33,9 +33,9 @@ describe("the lightship page", () => {
   test("shows each line of the way with its mass and moments", () => {
     render(<LightshipPage mayState={false} record={bargeRecord(4)} />);
     const table = screen.getByRole("table", { name: "From as inclined to lightship" });
-    expect(rowOf(table, "As inclined")).toEqual(["1476.00", "30.000", "0.000", "4.800", "44280.0", "0.0", "7084.8"]);
+    expect(rowOf(table, "As inclined")).toEqual(["1476.0", "30.000", "0.000", "4.800", "44280.0", "0.0", "7084.8"]);
     expect(rowOf(table, "less test weights")).toEqual(["−10.00", "30.000", "0.000", "5.600", "−300.0", "0.0", "−56.0"]);
-    expect(rowOf(table, "Lightship")).toEqual(["1466.00", "30.000", "0.000", "4.795", "43980.0", "0.0", "7028.8"]);
+    expect(rowOf(table, "Lightship")).toEqual(["1466.0", "30.000", "0.000", "4.795", "43980.0", "0.0", "7028.8"]);
   });
 
   test("adds and deducts the items of the plan by name", () => {
@@ -47,7 +47,7 @@ describe("the lightship page", () => {
     const table = screen.getByRole("table", { name: "From as inclined to lightship" });
     expect(rowOf(table, "less scaffolding").slice(0, 4)).toEqual(["−2.00", "10.000", "0.000", "8.000"]);
     expect(rowOf(table, "plus anchor, port").slice(0, 4)).toEqual(["+1.50", "57.000", "−2.000", "5.000"]);
-    expect(rowOf(table, "Lightship")[0]).toBe("1465.50");
+    expect(rowOf(table, "Lightship")[0]).toBe("1465.5");
   });
 
   test("gives the residual of every mark", () => {
@@ -84,6 +84,20 @@ describe("the lightship page", () => {
     expect(rowOf(rounds, "Draft aft")).toEqual(["2.000 m", "2.030 m", "+0.030 m"]);
     expect(rowOf(screen.getByRole("table", { name: "Residual of each mark" }), "0P").at(-1)).toBe("+30.0 mm");
     expect(screen.getByText(/changed most: \+0\.030 m\.$/)).toBeDefined();
+  });
+
+  test("compares the lightship with an earlier test, where the record has one, with the limits of SOLAS", () => {
+    const previous = { kind: "earlier" as const, displacement: 1500, vcg: 4.8, lcg: 30 };
+    render(<LightshipPage mayState={false} record={{ ...bargeRecord(4), previous }} />);
+    const table = screen.getByRole("table", { name: "Checks of the test" });
+    expect(rowOf(table, "Displacement compared")).toEqual([
+      "−2.27 % against 1500 t of the earlier test",
+      "at most 2.00 %",
+      "not met",
+      "SOLAS II-1/5.5",
+    ]);
+    expect(rowOf(table, "LCG compared").slice(2)).toEqual(["met", "SOLAS II-1/5.5"]);
+    expect(rowOf(table, "VCG compared")).toHaveLength(4);
   });
 
   test("says in sentences what keeps the lightship from being known, and shows no figure", () => {

@@ -9,7 +9,7 @@ import { bargeRecord } from "../control/barge";
 afterEach(cleanup);
 
 function rows(record: TestRecord): string[][] {
-  render(<MovesTable test={record} ship={promised(incliningTest(record))} />);
+  render(<MovesTable test={record} ship={promised(incliningTest(record))} gmDecimals={3} />);
   const table = screen.getByRole("table", { name: "Each move against the others" });
   return within(table)
     .getAllByRole("row")

@@ -139,7 +139,8 @@ function uprightPart({ lightship, hydrostatics, waterline, fit }: IncliningResul
 
 function centresOf({ lightship, asInclined }: IncliningResult) {
   const { displacement: _, ...centre } = lightship;
-  const { displacement: __, ...inclined } = asInclined;
+  // what is stated of the water's density does not grow with the tonne
+  const { displacement: __, uncertainty: ___, ...inclined } = asInclined;
   return { centre, inclined };
 }
 
