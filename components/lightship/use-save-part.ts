@@ -2,7 +2,7 @@ import { useRouter } from "next/navigation";
 import { useState } from "react";
 
 /** Puts one part of what a test states on the server and shows the page anew; null where it worked, else a sentence. */
-export function useSavePart<T>(test: string, part: "uncertainty" | "settings") {
+export function useSavePart<T>(test: string, part: "uncertainty" | "settings" | "expected") {
   const router = useRouter();
   const [refused, setRefused] = useState<string | null>(null);
   const save = async (stated: T | null) => {

@@ -45,7 +45,7 @@ function plan(): TestRecord {
     hydrometers: [{ id: "H1", scale: "density-vacuum", correction: 0, certificate: "calibrated in March 2026" }],
     previous: { kind: "earlier", displacement: 1296.2, vcg: 5.688, lcg: 24.97 },
     readings: { battens: [], drafts: [], soundings: [], water: [] },
-    settings: { method: "classical", seed: 1 },
+    settings: { method: "classical", seed: 1, expected: { displacement: 1480, lcg: 24.2, tcg: 0, vcg: 5.4, density: 1.02 } },
     uncertainty,
   };
 }

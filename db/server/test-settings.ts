@@ -18,3 +18,13 @@ export function saveSettings(db: Database, test: string, chosen: ChosenSettings 
     return savePlan(db, test, Object.keys(settings).length > 0 ? { ...plan, settings } : plan, null, act);
   });
 }
+
+/** Changes the ship as she is expected to be and nothing else; null: she is no longer stated. */
+export function saveExpected(db: Database, test: string, expected: TestSettings["expected"] | null, act: Act): Result<string, PlanRefusal> {
+  return inTransaction(db, () => {
+    const { settings = {}, ...plan } = planOf(planRecord(db, test));
+    const { expected: _, ...kept } = settings;
+    const changed: TestSettings = expected ? { ...kept, expected } : kept;
+    return savePlan(db, test, Object.keys(changed).length > 0 ? { ...plan, settings: changed } : plan, null, act);
+  });
+}

@@ -47,7 +47,7 @@ export type TableRefusal =
  * Source: dz_B/dc = c·BM, from the wedges of immersion and emersion; sag's share ¾: UN/ECE code of uniform standards for
  * draught surveys, ECE/ENERGY/19 (1992) (from memory).
  */
-export function tableHydrostatics(table: HydrostaticTable, waterline: Waterline): Result<TableHydrostatics, TableRefusal> {
+export function tableHydrostatics(table: HydrostaticTable, waterline: Pick<Waterline, "plane">): Result<TableHydrostatics, TableRefusal> {
   const tables = tablesByTrim(table.rows);
   const fault = faultOf(tables);
   if (fault) return refuse(fault);

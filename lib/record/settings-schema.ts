@@ -1,5 +1,5 @@
 import { z } from "zod";
-import { nonNegative, ordinal, positive } from "./quantities";
+import { nonNegative, number, ordinal, positive } from "./quantities";
 
 const agreementSchema = z.strictObject({
   battenMm: positive,
@@ -40,6 +40,9 @@ const limitsSchema = z
   })
   .partial();
 
+/** The ship as she is expected to be inclined, from which a plan is predicted; KG with the liquids free. */
+export const expectedShipSchema = z.strictObject({ displacement: positive, lcg: number, tcg: number, vcg: number, density: positive });
+
 /** How a test is reduced and what it is held against. Every key may be left out: then the usual holds. */
 export const settingsSchema = z.strictObject({
   method: z.enum(["classical", "generalised"]).optional(),
@@ -48,6 +51,7 @@ export const settingsSchema = z.strictObject({
   draws: ordinal.optional(),
   agreement: agreementSchema.optional(),
   limits: limitsSchema.optional(),
+  expected: expectedShipSchema.optional(),
 });
 
 export type TestSettings = z.infer<typeof settingsSchema>;

@@ -39,6 +39,7 @@ export const pages: Readonly<Record<string, Row["allowed"]>> = {
   "app/(office)/people/mail/page.tsx": ["administrator"],
   "app/(office)/tests/page.tsx": everybody,
   "app/(office)/tests/[id]/page.tsx": everybody,
+  "app/(office)/tests/[id]/plan/page.tsx": ["lead", "engineer"],
   "app/(office)/tests/[id]/control/page.tsx": allButReaders,
   "app/(office)/tests/[id]/lightship/page.tsx": ["lead", "engineer", "witness"],
   "app/(office)/tests/[id]/ledger/page.tsx": allButReaders,
@@ -74,6 +75,9 @@ export const handlers: Readonly<Record<string, Readonly<Record<string, Row>>>> =
   "app/api/v1/tests/[id]/job/route.ts": { GET: { allowed: everybody } },
   "app/api/v1/tests/[id]/live/route.ts": { GET: { allowed: allButReaders } },
   "app/api/v1/tests/[id]/record/route.ts": { GET: { allowed: allButReaders } },
+  "app/api/v1/tests/[id]/expected/route.ts": {
+    PUT: { allowed: ["engineer"], body: () => ({ displacement: 1480, lcg: 24, tcg: 0, vcg: 5.4, density: 1.02 }) },
+  },
   "app/api/v1/tests/[id]/roles/route.ts": {
     PUT: { allowed: office, body: () => ({ account: randomUUID(), role: "lead", isHeld: true }), status: 404 },
   },

@@ -2,7 +2,7 @@ import { expect, test } from "vitest";
 import { ledgerOf } from "@/db/server/ledger-entries";
 import { recordOf } from "@/db/server/record-as-it-stands";
 import { planOf, planRecord } from "@/db/server/test-plan";
-import { saveSettings } from "@/db/server/test-settings";
+import { saveExpected, saveSettings } from "@/db/server/test-settings";
 import { promised } from "@/lib/result";
 import { at, plan, yard } from "./yard";
 
@@ -32,4 +32,17 @@ test("goes back to the usual where nothing is chosen any more", () => {
   expect(planRecord(db, id).settings).not.toHaveProperty("limits");
   promised(saveSettings(db, id, null, { by: engineer.id, at }));
   expect(planRecord(db, id).settings?.weights).toBeUndefined();
+});
+
+test("the expected ship is stated and taken back, and leaves what is chosen as it is", () => {
+  const { db, engineer, test: id } = yard();
+  const act = { by: engineer.id, at };
+  promised(saveSettings(db, id, { method: "generalised" }, act));
+  const expected = { displacement: 1500, lcg: 24, tcg: 0, vcg: 5.5, density: 1.025 };
+  promised(saveExpected(db, id, expected, act));
+  expect(planRecord(db, id).settings).toMatchObject({ method: "generalised", expected });
+  promised(saveSettings(db, id, null, act));
+  expect(planRecord(db, id).settings).toMatchObject({ expected });
+  promised(saveExpected(db, id, null, act));
+  expect(planRecord(db, id).settings).not.toHaveProperty("expected");
 });
