@@ -1,6 +1,5 @@
 import { underFreeDeviceLock } from "@/db/device/device-lock";
 import { unsentCount } from "@/db/device/event-queue";
-import { keepPhotographWait, photographWait } from "@/db/device/photograph-wait";
 import {
   announcedPhotograph,
   letGoPhotograph,
@@ -8,7 +7,8 @@ import {
   notePhotographSent,
   photographsToLetGo,
   photographsToSend,
-} from "@/db/device/photographs";
+} from "@/db/device/photograph-sending";
+import { keepPhotographWait, photographWait } from "@/db/device/photograph-wait";
 import type { Reach } from "@/lib/sync/queue-words";
 import { retryDelay } from "@/lib/sync/retry";
 import { isOnServer, type PhotographHeard, sentPhotograph } from "./photograph-request";

@@ -2,7 +2,7 @@ import { deviceIdentity, updateIdentity } from "@/db/device/device-identity";
 import { underFreeDeviceLock } from "@/db/device/device-lock";
 import { deviceToSend, eventsOfDevice, keepSending, keepStates, lastSending, unsentCount } from "@/db/device/event-queue";
 import type { HeldEvent } from "@/db/device/held-event";
-import { oweAllPhotographs } from "@/db/device/photographs";
+import { oweAllPhotographs } from "@/db/device/photograph-sending";
 import { BATCH_EVENTS } from "@/lib/sync/batch-limits";
 import { afterAnswer, afterBackup, afterComparison, afterSilence, nextBatch, type StateChange } from "@/lib/sync/outbox";
 import { PROTOCOL, type SyncAnswer } from "@/lib/sync/protocol";

@@ -9,8 +9,8 @@ import type { Beside, usePhotographs } from "./use-photographs";
 export function PhotographStrip({ beside, busy, trouble, take, drop }: ReturnType<typeof usePhotographs>) {
   const isFull = beside.length >= PHOTOGRAPHS_A_READING;
   return (
-    <section aria-label="Photographs of this reading" className="flex flex-col gap-1">
-      <div className="flex min-h-tap items-center gap-2">
+    <section aria-label="Photographs of this reading" className={`flex flex-col gap-1 ${trouble ? "" : "-mb-3"}`}>
+      <div className="flex h-11 items-stretch gap-2">
         {beside.map((each, index) => (
           <Thumb key={each.sha256} of={each} no={index + 1} onDrop={() => drop(each.sha256)} />
         ))}
@@ -29,7 +29,7 @@ type CameraProps = { busy: boolean; first: boolean; onTake: (file: File) => void
 
 function Camera({ busy, first, onTake }: CameraProps) {
   return (
-    <label className="flex min-h-tap min-w-0 flex-1 items-center gap-2 rounded border-2 border-ink-line px-3 text-small leading-tight focus-within:outline focus-within:outline-2">
+    <label className="flex min-w-0 flex-1 items-center gap-2 rounded border-2 border-ink-line px-3 text-small leading-tight focus-within:outline focus-within:outline-2">
       <CameraSign />
       <span className="font-bold">{busy ? "Keeping it" : "Photograph"}</span>
       {first ? <span className="min-w-0 text-ink-soft">kept without its place</span> : null}
@@ -58,7 +58,7 @@ function Thumb({ of, no, onDrop }: { of: Beside; no: number; onDrop: () => void 
       type="button"
       onClick={onDrop}
       aria-label={`Take out photograph ${no}`}
-      className="relative h-tap w-tap shrink-0 rounded border border-ink-line bg-center bg-cover"
+      className="relative h-11 w-11 shrink-0 rounded border border-ink-line bg-center bg-cover"
       style={address === null ? undefined : { backgroundImage: `url(${address})` }}
     >
       <span aria-hidden="true" className="absolute top-0 right-0 rounded bg-ink px-1 text-sailcloth text-small leading-tight">

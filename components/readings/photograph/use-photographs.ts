@@ -2,7 +2,7 @@ import { useLiveQuery } from "dexie-react-hooks";
 import { useRef, useState } from "react";
 import { dropPhotograph, keepPhotograph, photographsBeside } from "@/db/device/photographs";
 import { unfinishedKey } from "@/db/device/unfinished-entries";
-import { type PictureRefusal, smallerPicture } from "./smaller-picture";
+import type { PictureRefusal } from "./smaller-picture";
 
 export type PhotographTrouble = PictureRefusal["type"] | "NoRoom" | "TakenBefore" | "NotKept";
 export type Beside = { readonly sha256: string; readonly picture: Blob };
@@ -48,6 +48,8 @@ async function keepPicture(file: File, entry: string): Promise<PhotographTrouble
   try {
     const { quota, usage } = (await navigator.storage?.estimate?.()) ?? {};
     if (quota !== undefined && usage !== undefined && quota - usage < ROOM_FOR_READINGS) return "NoRoom";
+    // most readings have no photograph: their pages load without this
+    const { smallerPicture } = await import("./smaller-picture");
     const smaller = await smallerPicture(file);
     if (!smaller.ok) return smaller.refusal.type;
     return (await keepPhotograph(smaller.value, entry)) ? null : "TakenBefore";

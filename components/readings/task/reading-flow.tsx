@@ -1,15 +1,17 @@
 "use client";
 
-import type { ReactNode } from "react";
+import { lazy, type ReactNode, Suspense } from "react";
 import type { ReadingValue } from "@/lib/sync/event";
 import type { Slot, SlotKind } from "@/lib/sync/slot";
-import { PhotographStrip } from "../photograph/photograph-strip";
 import { AgainChoice } from "./again-choice";
 import { SavedCard } from "./saved-card";
 import { StorageAlarm } from "./storage-alarm";
 import type { SheetHere } from "./use-job-sheet";
 import type { OwnReading } from "./use-own-readings";
 import { useReading } from "./use-reading";
+
+// the keys are there before the camera is
+const PhotographStrip = lazy(() => import("../photograph/photograph-strip").then(({ PhotographStrip }) => ({ default: PhotographStrip })));
 
 export type Entry<T> = {
   readonly form: T;
@@ -69,7 +71,11 @@ export function ReadingFlow<T>({ here, slot, empty, formOf, shown, next, onRepea
   return (
     <>
       {failed ? <StorageAlarm failure={failed} shown={draftShown(failed.draft.payload, shown)} onTryAgain={reading.tryAgain} /> : null}
-      {withPhotographs.includes(slot.kind) ? <PhotographStrip {...photographs} /> : null}
+      {withPhotographs.includes(slot.kind) ? (
+        <Suspense fallback={<div className="-mb-3 h-11" />}>
+          <PhotographStrip {...photographs} />
+        </Suspense>
+      ) : null}
       {children({ ...reading, correcting })}
     </>
   );

@@ -7,15 +7,12 @@ import { keepStates } from "@/db/device/event-queue";
 import { exportFile } from "@/db/device/export-file";
 import {
   announcedPhotograph,
-  dropPhotograph,
-  keepPhotograph,
   notePhotographSent,
   oweAllPhotographs,
-  photographsBeside,
-  photographsOwed,
   photographsToLetGo,
   photographsToSend,
-} from "@/db/device/photographs";
+} from "@/db/device/photograph-sending";
+import { dropPhotograph, keepPhotograph, photographsBeside, photographsOwed } from "@/db/device/photographs";
 import { unfinishedKey } from "@/db/device/unfinished-entries";
 import { eventBodySchema } from "@/lib/sync/event";
 import { phoneFileSchema } from "@/lib/sync/phone-file";
