@@ -59,7 +59,7 @@ export function ShiftCalculator({ known }: { known: Known | undefined }) {
 }
 
 function startOf(known: Known | undefined): ShiftTyped {
-  const none = { weight: "", distance: "", tanHeel: "2", length: "4", deflection: "" };
+  const none = { weight: "", distance: "8", tanHeel: "2", length: "4", deflection: "" };
   return {
     ...none,
     displacement: known ? figure(known.displacement, 0) : "",

@@ -26,5 +26,6 @@ function degrees(tanHeel: number): string {
 function placesOf(crossings: readonly { readonly x: number; readonly side: string }[]): string {
   const sides = [...new Set(crossings.map(({ side }) => side))].join(" and ");
   const places = crossings.map(({ x }) => x);
-  return `${sides}, from ${figure(Math.min(...places), 1)} to ${figure(Math.max(...places), 1)} m forward of AP`;
+  const [aft, forward] = [figure(Math.min(...places), 1), figure(Math.max(...places), 1)];
+  return aft === forward ? `${sides}, ${aft} m forward of AP` : `${sides}, ${aft} to ${forward} m forward of AP`;
 }
