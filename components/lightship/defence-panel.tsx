@@ -1,25 +1,21 @@
 "use client";
 
 import { Button } from "@/components/ui/button";
-import { Disclosure } from "@/components/ui/disclosure";
 import { Panel } from "@/components/ui/panel";
 import type { TestRecord } from "@/lib/record/test-record";
 import type { lightshipDigits } from "@/lib/report/result-digits";
 import { BudgetTable } from "./budget-table";
 import { IntervalTable } from "./interval-table";
-import { SettingsForm } from "./settings-form";
-import { UncertaintyForm } from "./uncertainty-form";
 import type { useDefence } from "./use-defence";
 
 type DefencePanelProps = {
   record: TestRecord;
   defence: ReturnType<typeof useDefence>;
   digits: ReturnType<typeof lightshipDigits>;
-  mayState: boolean;
 };
 
 /** How far the lightship can be trusted, and what to measure better. */
-export function DefencePanel({ record, defence, digits, mayState }: DefencePanelProps) {
+export function DefencePanel({ record, defence, digits }: DefencePanelProps) {
   const { stop, start, ...state } = defence;
   return (
     <Panel title="How well it is known" aside={state.type === "done" ? `${state.defence.draws} draws` : undefined}>
@@ -34,16 +30,6 @@ export function DefencePanel({ record, defence, digits, mayState }: DefencePanel
         <div className="grid items-start gap-6 lg:grid-cols-2">
           <IntervalTable intervals={state.defence.interval95} digits={digits} isAssumed={record.uncertainty === undefined} />
           <BudgetTable budget={state.defence.budget} />
-        </div>
-      ) : null}
-      {mayState ? (
-        <div className="mt-4 border-ink-line border-t pt-2">
-          <Disclosure title="Standard uncertainties of this test">
-            <UncertaintyForm test={record.test.id} stated={record.uncertainty} />
-          </Disclosure>
-          <Disclosure title="Method, weights and limits of this test">
-            <SettingsForm test={record.test.id} settings={record.settings} />
-          </Disclosure>
         </div>
       ) : null}
     </Panel>

@@ -21,6 +21,7 @@ import { HydrostaticsPanel } from "./hydrostatics-panel";
 import { ItemsTable } from "./items-table";
 import { type FoundLightship, foundLightship } from "./lightship-found";
 import { LightshipResult } from "./lightship-result";
+import { SettingsPanel } from "./settings-panel";
 import { useDefence } from "./use-defence";
 import { WaterlinePanel } from "./waterline-panel";
 
@@ -29,13 +30,14 @@ export function LightshipPage({ record, mayState }: { record: TestRecord; maySta
   const found = useMemo(() => foundLightship(record), [record]);
   return (
     <div className="flex flex-col gap-5">
-      {found.ok ? <Found found={found.value} record={record} mayState={mayState} /> : <NotYet refusals={found.refusal.faults} />}
+      {found.ok ? <Found found={found.value} record={record} /> : <NotYet refusals={found.refusal.faults} />}
       <ItemsTable items={record.items} />
+      {mayState ? <SettingsPanel record={record} /> : null}
     </div>
   );
 }
 
-function Found({ found, record, mayState }: { found: FoundLightship; record: TestRecord; mayState: boolean }) {
+function Found({ found, record }: { found: FoundLightship; record: TestRecord }) {
   const { ship, lines, examination, result } = found;
   const defence = useDefence(record);
   const intervals = defence.type === "done" ? defence.defence.interval95 : null;
@@ -43,7 +45,7 @@ function Found({ found, record, mayState }: { found: FoundLightship; record: Tes
   return (
     <>
       <LightshipResult lightship={result.lightship} difference={methodDifference(record, ship)} digits={digits} />
-      <DefencePanel record={record} defence={defence} digits={digits} mayState={mayState} />
+      <DefencePanel record={record} defence={defence} digits={digits} />
       <Panel title="From as inclined to lightship">
         <BalanceTable lines={lines} digits={{ "as-inclined": inclinedDigits(result.asInclined.uncertainty), lightship: digits }} />
       </Panel>

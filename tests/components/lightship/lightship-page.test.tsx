@@ -106,5 +106,6 @@ describe("the lightship page", () => {
     expect(screen.getByText("The lightship can’t be worked out yet")).toBeDefined();
     expect(screen.queryByRole("table", { name: "From as inclined to lightship" })).toBeNull();
     expect(screen.getAllByRole("listitem").length).toBeGreaterThanOrEqual(2);
+    expect(screen.queryByText("Settings of this test")).toBeNull();
   });
 });
