@@ -1,5 +1,5 @@
 import "client-only";
-import { PHONE_FILE_PHOTOGRAPH_BYTES } from "@/lib/sync/photograph";
+import { PHONE_FILE_PHOTOGRAPH_BYTES } from "@/lib/sync/batch-limits";
 import type { EventDraft } from "./append-event";
 import { deviceDatabase, type HeldPhotograph } from "./device-database";
 import { publicKeyOf } from "./device-identity";

@@ -5,8 +5,6 @@ export const PHOTOGRAPH_BYTES = 2 * 1024 * 1024;
 /** The longer side of a photograph as the phone keeps it [pixels]: the marks of a batten are a few pixels apart. */
 export const PHOTOGRAPH_SIDE = 1600;
 export const PHOTOGRAPHS_A_READING = 4;
-/** The photographs of an exported file together [bytes]: some hundred, and still a file that a phone can write and share. */
-export const PHONE_FILE_PHOTOGRAPH_BYTES = 32 * 1024 * 1024;
 
 export type PictureType = "image/jpeg" | "image/png" | "image/webp";
 
@@ -34,12 +32,6 @@ export function keptSize({ width, height }: PictureSize): PictureSize {
  * stand on their own way.
  */
 export type PhotographState = "unfinished" | "saved" | "on-server";
-
-/** "2 photographs still on this phone"; nothing where none is owed. */
-export function photographsOwedInWords(count: number): string {
-  if (count === 0) return "";
-  return `${count} ${count === 1 ? "photograph" : "photographs"} still on this phone`;
-}
 
 type Keeping = {
   readonly state: PhotographState;

@@ -12,6 +12,12 @@ export function queueWords(count: QueueCount, reach: Reach): string {
   return `All ${count.onServer + count.quarantined} on the server${backedUp(count)}${aside}`;
 }
 
+/** "2 photographs still on this phone"; nothing where none is owed. */
+export function photographsOwedInWords(count: number): string {
+  if (count === 0) return "";
+  return `${count} ${count === 1 ? "photograph" : "photographs"} still on this phone`;
+}
+
 function backedUp({ onServer, confirmed }: QueueCount): string {
   if (confirmed === 0) return "";
   return confirmed === onServer ? ", backed up" : `, ${confirmed} backed up`;

@@ -39,6 +39,7 @@ test("a phone is enrolled, and the server goes away", async () => {
   const code = await codeFor(office, "Rolf Lund");
   hand = new ReaderHand(await opened(phone), ship.server.url, id);
   await enrol(hand.page, ship, code, "Blue phone, aft");
+  await expect(office.getByRole("row", { name: /Blue phone, aft/ })).toBeVisible();
   for (const watch of watches) watch.serverIsDown();
   await ship.server.kill();
 });

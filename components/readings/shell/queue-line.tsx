@@ -1,8 +1,7 @@
 "use client";
 
 import Link from "next/link";
-import { photographsOwedInWords } from "@/lib/sync/photograph";
-import { queueWords } from "@/lib/sync/queue-words";
+import { photographsOwedInWords, queueWords } from "@/lib/sync/queue-words";
 import { type Queue, useQueue } from "./use-queue";
 
 /** The state of the queue, always in words; a tap leads to everything the phone holds. Its place never changes size. */

@@ -1,5 +1,5 @@
 import { describe, expect, test } from "vitest";
-import { keptSize, mayLetGo, photographsOwedInWords, pictureType } from "@/lib/sync/photograph";
+import { keptSize, mayLetGo, pictureType } from "@/lib/sync/photograph";
 import { photographNamesSchema } from "@/lib/sync/photograph-names";
 
 const bytes = (...given: number[]) => new Uint8Array(given);
@@ -29,10 +29,6 @@ describe("the size kept", () => {
     expect(keptSize({ width: 640, height: 480 })).toEqual({ width: 640, height: 480 });
     expect(keptSize({ width: 100_000, height: 3 })).toEqual({ width: 1600, height: 1 });
   });
-});
-
-test("photographs still owed are counted in words", () => {
-  expect([0, 1, 2].map(photographsOwedInWords)).toEqual(["", "1 photograph still on this phone", "2 photographs still on this phone"]);
 });
 
 test("a reading names one to four photographs, each by its hash", () => {

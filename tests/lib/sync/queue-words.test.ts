@@ -1,5 +1,5 @@
 import { describe, expect, it } from "vitest";
-import { queueWords, type Reach } from "@/lib/sync/queue-words";
+import { photographsOwedInWords, queueWords, type Reach } from "@/lib/sync/queue-words";
 
 const words = (unsent: number, onServer: number, quarantined: number, reach: Reach = "reached", confirmed = 0) =>
   queueWords({ unsent, onServer, confirmed, quarantined }, reach);
@@ -33,4 +33,8 @@ describe("the state of the queue in words", () => {
     expect(words(3, 5, 0, "sign-in-needed")).toBe("3 saved on this phone: sign in to send. Readings go on");
     expect(words(0, 5, 0, "sign-in-needed")).toBe("All 5 on the server");
   });
+});
+
+it("photographs still owed are counted in words", () => {
+  expect([0, 1, 2].map(photographsOwedInWords)).toEqual(["", "1 photograph still on this phone", "2 photographs still on this phone"]);
 });
