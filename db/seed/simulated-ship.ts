@@ -1,4 +1,5 @@
 import type { Waterplane } from "@/lib/frame";
+import { liquidInBox, type TankBox } from "@/lib/hydrostatics/box-liquid";
 import { equilibrium } from "@/lib/hydrostatics/equilibrium";
 import { type Hull, hullFromOffsets } from "@/lib/hydrostatics/hull";
 import { type TankContents, tankContents } from "@/lib/hydrostatics/tank";
@@ -15,6 +16,8 @@ export type SimulatedTruth = {
   readonly waterDensity: number;
   /** sounding of each tank by its own table, at its centre [m] */
   readonly levels: Readonly<Record<string, number>>;
+  /** of the hull girder at midships, positive when midships is deepest [m]; 0 where left out */
+  readonly sag?: number;
 };
 
 /** A ship floating at rest with everything that a plan puts aboard. */
@@ -22,7 +25,7 @@ export type SimulatedShip = {
   readonly hull: Hull;
   readonly plan: TestRecord;
   readonly truth: SimulatedTruth;
-  readonly liquids: readonly (TankContents & { readonly density: number })[];
+  readonly liquids: readonly (TankContents & { readonly density: number; readonly box?: TankBox })[];
 };
 
 /**
@@ -45,7 +48,8 @@ export function simulatedShip(plan: TestRecord, truth: SimulatedTruth): Result<S
  *
  *     Δx = b·i_L/V,   Δy = c·i/V,   Δz = ½·(b²·i_L + c²·i)/V
  *
- * exact while the surface meets upright walls only; found together with the waterplane.
+ * exact while the surface meets upright walls only; in a tank known as a box the athwart part is that of the clipped box.
+ * Found together with the waterplane.
  * Refused: a move that is not in the plan; a ship that finds no rest.
  * Source: centroid of a liquid under a tilted surface, *common practice*.
  */
@@ -54,10 +58,11 @@ export function restAt(ship: SimulatedShip, move: number, during: "drafts" | "mo
   if (positions === undefined) return refuse({ type: "UnknownMove", move });
   const solid = solidWeights(ship, positions, during);
   const { lbp } = ship.plan.vessel;
-  let plane: Waterplane = { draftAtAp: 0, slopeAlong: 0, tanHeel: 0, sag: 0, lbp };
+  const sag = ship.truth.sag ?? 0;
+  let plane: Waterplane = { draftAtAp: 0, slopeAlong: 0, tanHeel: 0, sag, lbp };
   for (let round = 0; round < 40; round++) {
     const { mass, ...centre } = centreOf(plus(solid, liquidsUnder(ship, plane)));
-    const water = { lbp, density: ship.truth.waterDensity, ...(round === 0 ? {} : { guess: plane }) };
+    const water = { lbp, sag, density: ship.truth.waterDensity, ...(round === 0 ? {} : { guess: plane }) };
     const rest = equilibrium(ship.hull, { displacement: mass, ...centre }, water);
     if (!rest.ok) return rest;
     const step = Math.abs(rest.value.plane.tanHeel - plane.tanHeel) + Math.abs(rest.value.plane.slopeAlong - plane.slopeAlong);
@@ -90,17 +95,28 @@ function standingAtTest(item: TestRecord["items"][number]): Moments {
 
 function liquidsUnder({ liquids }: SimulatedShip, { slopeAlong, tanHeel }: Waterplane): Moments {
   return total(
-    liquids.map(({ mass, density, lcg, tcg, vcg, freeSurfaceInertia, inertiaLongitudinal = 0 }) => {
-      // a shift of the centre times the mass is ρ·i·slope: an empty tank moves nothing
-      const [along, athwart] = [density * inertiaLongitudinal * slopeAlong, density * freeSurfaceInertia * tanHeel];
-      const up = (along * slopeAlong + athwart * tanHeel) / 2;
+    liquids.map((liquid) => {
+      const { mass, density, lcg, tcg, vcg, inertiaLongitudinal = 0 } = liquid;
       if (mass === 0) return { mass, x: lcg, y: tcg, z: vcg };
-      return { mass, x: lcg + along / mass, y: tcg + athwart / mass, z: vcg + up / mass };
+      // a shift of the centre times the mass is ρ·i·slope
+      const along = (density * inertiaLongitudinal * slopeAlong) / mass;
+      const [athwart, up] = tilted(liquid, tanHeel);
+      return { mass, x: lcg + along, y: tcg + athwart, z: vcg + up + (along * slopeAlong) / 2 };
     }),
   );
 }
 
+function tilted({ box, volume, freeSurfaceInertia }: SimulatedShip["liquids"][number], tanHeel: number): readonly [number, number] {
+  if (box === undefined || freeSurfaceInertia === 0) {
+    const athwart = (freeSurfaceInertia * tanHeel) / volume;
+    return [athwart, (athwart * tanHeel) / 2];
+  }
+  const [upright, now] = [liquidInBox(box, volume, 0), liquidInBox(box, volume, tanHeel)];
+  return [now.tcg - upright.tcg, now.vcg - upright.vcg];
+}
+
 function contentsOf(tank: TestRecord["tanks"][number], level: number, attitude: Parameters<typeof tankContents>[2]) {
   const contents = tankContents(tank, level, attitude);
-  return contents.ok ? answer({ ...contents.value, density: tank.density }) : contents;
+  if (!contents.ok) return contents;
+  return answer({ ...contents.value, density: tank.density, ...(tank.box ? { box: tank.box } : {}) });
 }

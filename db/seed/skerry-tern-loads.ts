@@ -3,7 +3,11 @@ import { type Box, boxTankTable } from "./box-tank";
 
 /** Nine tanks with upright walls: fuel in the double bottom is the one slack pair; the others are pressed full or empty. */
 export function skerryTernTanks(): TestRecord["tanks"] {
-  return tanks.map(({ box, ...tank }) => ({ ...tank, measure: "sounding", table: boxTankTable(box) }));
+  return tanks.map(({ box, ...tank }) => ({ ...tank, measure: "sounding", table: boxTankTable(box), box: walls(box) }));
+}
+
+function walls({ x, y, z }: Box): NonNullable<TestRecord["tanks"][number]["box"]> {
+  return { x: [...x], y: [...y], z: [...z] };
 }
 
 /** Who and what is aboard for the test only, and what is not yet, or not where it will stand. */

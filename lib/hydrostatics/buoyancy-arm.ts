@@ -31,7 +31,13 @@ export function buoyancyArm(hull: Hull, held: Held, from: number, to: number, no
     const { tcb, vcb, kmt } = rest.value.hydrostatics;
     found.push({ tanHeel, arm: tcb + tanHeel * vcb, slope: kmt });
   }
-  return answer({ from, to, at: (tanHeel) => between(found, tanHeel) });
+  return answer(armThrough(found));
+}
+
+/** An arm through nodes in the order of their heels: cubics between them, straight on beyond. */
+export function armThrough(nodes: readonly ArmAt[]): BuoyancyArm {
+  const [first, last] = [nodes[0] as ArmAt, nodes.at(-1) as ArmAt];
+  return { from: first.tanHeel, to: last.tanHeel, at: (tanHeel) => between(nodes, tanHeel) };
 }
 
 // outside the range the last slope goes on: a search may look there on its way

@@ -1,5 +1,6 @@
 import { slopeAlongFromTrim } from "@/lib/frame";
 import { answer, type Result, refuse } from "@/lib/result";
+import type { TankBox } from "./box-liquid";
 import { type LevelRow, type LevelTable, levelLimits, levelRow } from "./tank-level";
 
 export type TankRow = LevelRow & { readonly trim?: number };
@@ -13,6 +14,8 @@ export type Tank = {
   /** x and y of the sounding pipe */
   readonly pipe?: readonly [number, number];
   readonly table: readonly TankRow[];
+  /** where the tank is one */
+  readonly box?: TankBox;
 };
 
 /** The ship's attitude while the tank was sounded. */

@@ -8,8 +8,8 @@ import { type SpreadPoint, slopeSpread } from "./slope-spread";
 import type { StationSeries, TangentOfMove } from "./station-series";
 import type { UncertaintyNotPositive } from "./weighted-slope";
 
-/** The moment that acts at each move, against the zero of its session [t·m]. */
-export type ActingMoment = { readonly no: number; readonly session: number; readonly moment: number };
+/** The moment that acts at each move, against the zero of its session, and how far the weights went along the ship [t·m]. */
+export type ActingMoment = { readonly no: number; readonly session: number; readonly moment: number; readonly along?: number };
 
 export type NoBattenReadings = { readonly type: "NoBattenReadings" };
 
@@ -98,10 +98,10 @@ function fittedPoint({ no, moment, tan, weighedBy }: OnLine, residual: number): 
   return { move: no, moment, tan, residual, ...(weighedBy === undefined ? {} : { weighedBy }) };
 }
 
-function moveOnLine({ no, session, moment }: ActingMoment, points: readonly OnLine[]): readonly MoveOnLine[] {
+function moveOnLine({ no, session, moment, along = 0 }: ActingMoment, points: readonly OnLine[]): readonly MoveOnLine[] {
   const read = points.filter((point) => point.no === no && point.session === session);
   if (read.length === 0) return [];
   const tanHeel = mean(read.map(({ change }) => change));
   const residual = sum(read.map((point) => weightOf(point) * point.residual)) / sum(read.map(weightOf));
-  return [{ no, session, moment, tanHeel, residual, stations: read.length }];
+  return [{ no, session, moment, along, tanHeel, residual, stations: read.length }];
 }

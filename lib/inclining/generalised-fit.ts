@@ -3,8 +3,8 @@ import { sum } from "@/lib/numerics/sum";
 import { answer, type Result, refuse } from "@/lib/result";
 import { weightOf } from "./line-weights";
 
-/** A tangent observed by one series at one move, and the moment that acted then. */
-export type Observed = { readonly moment: number; readonly tan: number; readonly weighedBy?: number };
+/** A tangent observed by one series at one move, the moment that acted then, and the hull's arm where her trim was another then. */
+export type Observed = { readonly moment: number; readonly tan: number; readonly weighedBy?: number; readonly arm?: BuoyancyArm };
 
 /** The ship does not come back from the heel of a move: KG lies above the metacentre there. */
 export type NoRestAtMove = { readonly type: "NoRestAtMove"; readonly moment: number; readonly vcg: number };
@@ -18,7 +18,8 @@ type Ship = { readonly arm: BuoyancyArm; readonly displacement: number; readonly
  *     f(c) − f(c₀) − KG·(c − c₀) = M/Δ,   f(c) = y_B + c·z_B
  *     minimise Σ wⱼₖ·(tⱼₖ − aⱼ − cₖ)²  over KG and the intercepts aⱼ;  w = 1 unless the readings are weighed
  *
- * Any form of hull, any heel inside the range of the arm. Gauss–Newton from the classical KG.
+ * Any form of hull, any heel inside the range of the arm; a move with weights shifted along the ship brings its own f.
+ * Gauss–Newton from the classical KG.
  * Refused: a move at which the ship would find no rest.
  * Source: R. Dunworth, Back against the wall, and: The pursuit of better inclining, STAB 2014 and 2015 *from memory*, rederived
  * from G on the line of buoyancy.
@@ -28,7 +29,7 @@ export function generalisedVcg(ship: Ship, series: readonly (readonly Observed[]
   for (let step = 0; step < 12; step++) {
     let [byGradient, byGradients] = [0, 0];
     for (const observed of series) {
-      const rests = observed.map(({ moment }) => restUnder(ship, moment, vcg));
+      const rests = observed.map((each) => restUnder(ship, each, vcg));
       const failed = rests.indexOf(null);
       if (failed >= 0) return refuse({ type: "NoRestAtMove", moment: observed[failed]?.moment ?? 0, vcg });
       const weights = observed.map(weightOf);
@@ -65,8 +66,8 @@ export function heelAtRest(arm: BuoyancyArm, vcg: number, tcg: number, near: num
 }
 
 /** Heel under a moment, and how it grows with KG; null where there is no rest. */
-function restUnder({ arm, displacement, tanHeelAtZero }: Ship, moment: number, vcg: number) {
-  const tcg = arm.at(tanHeelAtZero).arm - vcg * tanHeelAtZero;
+function restUnder({ arm: atZero, displacement, tanHeelAtZero }: Ship, { moment, arm = atZero }: Observed, vcg: number) {
+  const tcg = atZero.at(tanHeelAtZero).arm - vcg * tanHeelAtZero;
   const tanHeel = heelAtRest(arm, vcg, tcg + moment / displacement, tanHeelAtZero);
   if (tanHeel === null) return null;
   return { tanHeel, perVcg: (tanHeel - tanHeelAtZero) / (arm.at(tanHeel).slope - vcg) };

@@ -3,6 +3,8 @@ import { type Hull, hullFromOffsets } from "@/lib/hydrostatics/hull";
 import { sum } from "@/lib/numerics/sum";
 import { generalisedVcg, heelAtRest } from "./generalised-fit";
 import type { AsInclined, MomentTangentLine } from "./inclined-ship";
+import { armWithLiquids } from "./liquid-arm";
+import type { Liquid } from "./liquids";
 import type { ShipAfloat } from "./ship-afloat";
 import type { HydrostaticSource, IncliningTestData } from "./test-data";
 import type { Aboard } from "./test-plan";
@@ -18,7 +20,8 @@ export type GeneralisedShip = { readonly vcg: number; readonly tcg: number };
  *
  * KG_fluid: see `generalisedVcg`; it belongs to the moves, and persons who were aboard only for the drafts or only for the
  * moves are brought to the draft round by their masses and heights. A weight that also moved in height acts by its share in
- * the moments of the line; the trim of a weight moved along the ship is left out (below 0.1 mm of KG for moves of 0.01·L).
+ * the moments of the line; one that moved along the ship trims her, and the hull's arm at that move is that of her new trim.
+ * Liquids in boxes are followed by their own shape (`armWithLiquids`), others count by their free surface.
  * Null: hydrostatics by a table, which knows no other heel; a hull that finds no rest at some move.
  * Source: see `generalisedVcg`.
  */
@@ -26,18 +29,19 @@ export function generalisedShip(
   test: IncliningTestData,
   afloat: ShipAfloat,
   line: MomentTangentLine,
-  classical: AsInclined,
+  { classical, liquids }: { readonly classical: AsInclined; readonly liquids: readonly Liquid[] },
 ): GeneralisedShip | null {
-  const { tcb, vcb } = afloat.hydrostatics;
+  const { tcb } = afloat.hydrostatics;
   if (test.hydrostatics.kind !== "offsets" || tcb === null) return null;
   const states = statesOf(test.aboard, classical.displacement);
   const fluid = classical.vcg + classical.freeSurfaceCorrection;
-  const arms = armsOver(test.hydrostatics, afloat, heelsOf(afloat, line), roundedTo(fluid, 0.1), states.displacementAtMoves);
-  if (arms === null) return null;
+  const hulls = armsOver(test.hydrostatics, afloat, line, roundedTo(fluid, 0.1), states.displacementAtMoves);
+  if (hulls === null) return null;
+  const arms = withLiquids(hulls, liquids, { drafts: classical.displacement, moves: states.displacementAtMoves });
   const atDrafts = vcgAtDrafts(arms, afloat, line, { fluid, classical, states });
   if (atDrafts === null) return null;
   const { tanHeel } = afloat.waterline.plane;
-  return { vcg: atDrafts - classical.freeSurfaceCorrection, tcg: tcb - tanHeel * (atDrafts - vcb) };
+  return { vcg: atDrafts - classical.freeSurfaceCorrection, tcg: arms.atDrafts.at(tanHeel).arm - tanHeel * atDrafts };
 }
 
 type States = {
@@ -56,14 +60,47 @@ function statesOf(aboard: readonly Aboard[], displacement: number): States {
   };
 }
 
-type Arms = { readonly atDrafts: BuoyancyArm; readonly atMoves: BuoyancyArm };
+/** `alongMoves`: at the moves with her centre of gravity `alongBy` further forward; null where no weight went along the ship. */
+type Arms = {
+  readonly atDrafts: BuoyancyArm;
+  readonly atMoves: BuoyancyArm;
+  readonly alongMoves: BuoyancyArm | null;
+  readonly alongBy: number;
+};
+
+function withLiquids(arms: Arms, liquids: readonly Liquid[], displacement: { drafts: number; moves: number }): Arms {
+  const { atDrafts, atMoves, alongMoves, alongBy } = arms;
+  return {
+    atDrafts: armWithLiquids(atDrafts, liquids, displacement.drafts),
+    atMoves: armWithLiquids(atMoves, liquids, displacement.moves),
+    alongMoves: alongMoves && armWithLiquids(alongMoves, liquids, displacement.moves),
+    alongBy,
+  };
+}
+
+/** The arm with the centre of gravity shifted along the ship: a small trim changes it in proportion. */
+function armShifted({ atMoves, alongMoves, alongBy }: Arms, shift: number): BuoyancyArm {
+  if (alongMoves === null || shift === 0) return atMoves;
+  const share = shift / alongBy;
+  return {
+    ...atMoves,
+    at: (tanHeel) => {
+      const [here, there] = [atMoves.at(tanHeel), alongMoves.at(tanHeel)];
+      return { tanHeel, arm: here.arm + share * (there.arm - here.arm), slope: here.slope + share * (there.slope - here.slope) };
+    },
+  };
+}
+
 type Given = { readonly fluid: number; readonly classical: AsInclined; readonly states: States };
 
 /** Fluid KG at the draft round; the heel at zero of the moves follows from it and is found together with it. */
 function vcgAtDrafts(arms: Arms, afloat: ShipAfloat, line: MomentTangentLine, { fluid, classical, states }: Given): number | null {
   const { tanHeel } = afloat.waterline.plane;
-  const series = line.stations.map(({ commonResiduals }) => commonResiduals);
   const displacement = states.displacementAtMoves;
+  const alongOf = (session: number, no: number) => line.moves.find((move) => move.no === no && move.session === session)?.along ?? 0;
+  const series = line.stations.map(({ session, commonResiduals }) =>
+    commonResiduals.map((point) => ({ ...point, arm: armShifted(arms, alongOf(session, point.move) / displacement) })),
+  );
   const isSame = displacement === classical.displacement && states.upward === 0 && states.athwart === 0;
   let tanHeelAtZero = tanHeel;
   let found = fluid;
@@ -95,26 +132,26 @@ type Offsets = Extract<HydrostaticSource, { kind: "offsets" }>;
  * The arms at the displacement of the drafts and of the moves. LCG is such that the measured waterplane is in balance; the KG
  * that shares in the trim's balance may be a decimetre off, which no heel of a test can show.
  */
-function armsOver(
-  offsets: Offsets,
-  { waterline, hydrostatics, water }: ShipAfloat,
-  [from, to]: readonly [number, number],
-  vcg: number,
-  displacementAtMoves: number,
-): Arms | null {
+function armsOver(offsets: Offsets, afloat: ShipAfloat, line: MomentTangentLine, vcg: number, displacementAtMoves: number): Arms | null {
+  const { waterline, hydrostatics, water } = afloat;
+  const [from, to] = heelsOf(afloat, line);
   const hull = hullOf(offsets);
   if (hull === null) return null;
   const { plane } = waterline;
   const lcg = hydrostatics.lcb - plane.slopeAlong * (vcg - hydrostatics.vcb);
-  const held = { lbp: plane.lbp, sag: plane.sag, guess: plane, lcg, vcg };
-  const armAt = (volume: number) =>
-    remembered(offsets, [volume, from, to, lcg, vcg, plane.sag], () => {
-      const arm = buoyancyArm(hull, { ...held, volume }, from, to, nodes);
+  const held = { lbp: plane.lbp, sag: plane.sag, guess: plane, vcg };
+  const armAt = (volume: number, shift = 0) =>
+    remembered(offsets, [volume, from, to, lcg + shift, vcg, plane.sag], () => {
+      const arm = buoyancyArm(hull, { ...held, volume, lcg: lcg + shift }, from, to, nodes);
       return arm.ok ? arm.value : null;
     });
+  const alongBy = 0.01 * plane.lbp;
+  const goAlong = line.moves.some(({ along }) => Math.abs(along) > 1e-6 * displacementAtMoves * plane.lbp);
   const atDrafts = armAt(hydrostatics.volume);
   const atMoves = armAt(displacementAtMoves / water.density);
-  return atDrafts && atMoves ? { atDrafts, atMoves } : null;
+  const alongMoves = goAlong ? armAt(displacementAtMoves / water.density, alongBy) : null;
+  if (!atDrafts || !atMoves || (goAlong && !alongMoves)) return null;
+  return { atDrafts, atMoves, alongMoves, alongBy };
 }
 
 /** What was worked out for the same hull and numbers before: an analysis asks hundreds of times, mostly for the same. */

@@ -33,6 +33,8 @@ export type MoveOnLine = {
   readonly session: number;
   /** moment that acts [t·m]: from the measured positions, with the share of a weight that also moved in height */
   readonly moment: number;
+  /** the weights' moment along the ship against the zero of its session, forward [t·m]: it changes her trim */
+  readonly along: number;
   /** change of heel against the zero of its session, mean over the stations read */
   readonly tanHeel: number;
   /** mean over the stations of measured − fitted by the common slope, weighed as the line is */

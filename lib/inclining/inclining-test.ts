@@ -42,7 +42,7 @@ export function incliningTest(test: IncliningTestData): Result<InclinedShip, Fau
 
   const ship = asInclined(afloat.value, line.value, liquids.value, test.aboard);
   if (!ship.ok) return inside("readings.battens", ship);
-  const generalised = generalisedShip(test, afloat.value, line.value, ship.value);
+  const generalised = generalisedShip(test, afloat.value, line.value, { classical: ship.value, liquids: liquids.value });
   return answer({ afloat: afloat.value, liquids: liquids.value, line: line.value, asInclined: ship.value, generalised });
 }
 

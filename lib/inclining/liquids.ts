@@ -1,3 +1,4 @@
+import type { TankBox } from "@/lib/hydrostatics/box-liquid";
 import { type Attitude, type TankContents, tankContents } from "@/lib/hydrostatics/tank";
 import { answer, type Result, refuse } from "@/lib/result";
 import { type Faults, gathered, inside } from "./faults";
@@ -6,7 +7,7 @@ import type { IncliningTestData } from "./test-data";
 import type { SoundingReading } from "./test-readings";
 
 /** What stands in one tank at the reference state, and the density of it [t/m³]. */
-export type Liquid = TankContents & { readonly id: string; readonly density: number };
+export type Liquid = TankContents & { readonly id: string; readonly density: number; readonly box?: TankBox };
 
 export type NoSounding = { readonly type: "NoSounding"; readonly tank: string };
 export type NoBallastSounding = { readonly type: "NoBallastSounding"; readonly tank: string; readonly move: number };
@@ -46,7 +47,10 @@ function liquidIn(
     return inside(`tanks[${index}]`, refuse({ type: "NoSounding", tank: tank?.id ?? "" } satisfies NoSounding));
   }
   const contents = tankContents(tank, meanLevel(looks), attitude);
-  return contents.ok ? answer({ ...contents.value, id: tank.id, density: tank.density }) : inside(`${first.path}.value`, contents);
+  if (!contents.ok) return inside(`${first.path}.value`, contents);
+  const { id, density, box } = tank;
+  // ballast that shifts is sounded at each move: its centre is known there, and counts with the moments
+  return answer({ ...contents.value, id, density, ...(box && !tank.shifts ? { box } : {}) });
 }
 
 function meanLevel(looks: Looks<SoundingReading>): number {

@@ -8,8 +8,8 @@ import type { CountedReadings, Placed } from "./readings-that-count";
 import type { IncliningTestData } from "./test-data";
 import type { Move, TestWeight } from "./test-plan";
 
-/** How a move has shifted the weights against the zero of its session [t·m]: athwartships (to starboard) and upward. */
-export type ShiftMoment = { readonly no: number; readonly session: number; readonly athwart: number; readonly upward: number };
+/** How a move has shifted the weights against the zero of its session [t·m]: athwartships (to starboard), upward and along (forward). */
+export type ShiftMoment = Shift & { readonly no: number; readonly session: number };
 
 /** How the ship lies at a move, for the soundings of ballast. */
 export type AttitudeAt = (move: { readonly no: number; readonly session?: number }) => Attitude;
@@ -20,7 +20,7 @@ export type NoPosition = { readonly type: "NoPosition"; readonly weight: string;
 /**
  * The moments of the moves that were read, from the positions as measured at each of them.
  *
- *     athwart = Σ mᵢ·(yᵢ − yᵢ₀),   upward = Σ mᵢ·(zᵢ − zᵢ₀)
+ *     athwart = Σ mᵢ·(yᵢ − yᵢ₀),   upward = Σ mᵢ·(zᵢ − zᵢ₀),   along = Σ mᵢ·(xᵢ − xᵢ₀)
  *
  * Where ballast is the shifting weight, its soundings at each move add theirs.
  * Positions in metres, masses in tonnes. A session without a move 0 of its own counts from the test's.
@@ -49,11 +49,12 @@ export function actingMoments(moments: readonly ShiftMoment[], attitudeAt: Attit
     no: move.no,
     session: move.session,
     moment: move.athwart + attitudeAt(move).tanHeel * move.upward,
+    along: move.along,
   }));
 }
 
 type Known = { readonly test: IncliningTestData; readonly counted: CountedReadings; readonly attitudeAt: AttitudeAt };
-type Shift = { readonly athwart: number; readonly upward: number };
+type Shift = { readonly athwart: number; readonly upward: number; readonly along: number };
 
 function shiftMoment(known: Known, move: Placed<Move>, zero: Placed<Move> | undefined): Result<ShiftMoment, Faults> {
   if (zero === undefined) return refuseFaults([{ type: "NoReferenceMove", path: "moves" } satisfies NoReferenceMove]);
@@ -66,6 +67,7 @@ function shiftMoment(known: Known, move: Placed<Move>, zero: Placed<Move> | unde
     session: sessionOf(move.value),
     athwart: sum(shifts.map(({ athwart }) => athwart)),
     upward: sum(shifts.map(({ upward }) => upward)),
+    along: sum(shifts.map(({ along }) => along)),
   });
 }
 
@@ -74,7 +76,7 @@ function shiftOfWeight({ id, mass }: TestWeight, move: Placed<Move>, zero: Place
   const from = zero.value.positions[id];
   if (to === undefined) return inside(`${move.path}.positions`, noPosition(id, move));
   if (from === undefined) return inside(`${zero.path}.positions`, noPosition(id, zero));
-  return answer({ athwart: mass * (to[1] - from[1]), upward: mass * (to[2] - from[2]) });
+  return answer({ athwart: mass * (to[1] - from[1]), upward: mass * (to[2] - from[2]), along: mass * (to[0] - from[0]) });
 }
 
 function shiftOfBallast({ test, counted, attitudeAt }: Known, tank: number, move: Move, zero: Move): Result<Shift, Faults> {
@@ -84,6 +86,7 @@ function shiftOfBallast({ test, counted, attitudeAt }: Known, tank: number, move
   return answer({
     athwart: to.value.mass * to.value.tcg - from.value.mass * from.value.tcg,
     upward: to.value.mass * to.value.vcg - from.value.mass * from.value.vcg,
+    along: to.value.mass * to.value.lcg - from.value.mass * from.value.lcg,
   });
 }
 

@@ -53,6 +53,8 @@ const tankLevelSchema = z.strictObject({
   inertiaLongitudinal: nonNegative.optional(),
 });
 
+const between = z.tuple([number, number]).refine(([from, to]) => from < to, "from a lower to a higher number");
+
 export const tankSchema = z.strictObject({
   id: name,
   contents: text,
@@ -61,6 +63,8 @@ export const tankSchema = z.strictObject({
   measure: z.enum(["sounding", "ullage"]),
   pipe: z.tuple([number, number]).optional(),
   table: z.array(tankLevelSchema).min(1),
+  /** six walls square to the ship, where the tank is a box: its liquid is then followed exactly as she heels */
+  box: z.strictObject({ x: between, y: between, z: between }).optional(),
   shifts: z.boolean().optional(),
 });
 

@@ -51,7 +51,7 @@ describe("the result as it stands", () => {
 
 describe("the stop", () => {
   const tripped = (degrees: number) => [
-    { no: 2, session: 1, moment: 40, tanHeel: Math.tan((degrees * Math.PI) / 180), residual: 0, stations: 3 },
+    { no: 2, session: 1, moment: 40, along: 0, tanHeel: Math.tan((degrees * Math.PI) / 180), residual: 0, stations: 3 },
   ];
 
   test("is called beyond 4° to either side and not before", () => {

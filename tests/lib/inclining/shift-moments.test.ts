@@ -29,6 +29,14 @@ describe("moments of the moves", () => {
     expect(actingMoments(moments, () => ({ trim: 0, tanHeel: 0.02, lbp: 60 }))[1]?.moment).toBeCloseTo(80.1, 12);
   });
 
+  it("tell how far the weights went along the ship", () => {
+    const moves = sampleMoves.map((move) =>
+      move.no === 1 ? { no: 1, positions: { W1: [27, 4, 5] as const, W2: [35, 4, 5] as const } } : move,
+    );
+    // 10 t by 2 m forward
+    expect(promised(shiftsOf(sampleTest({ moves }))).map(({ along }) => along)).toEqual([0, 20, 0, 0, 0, 0]);
+  });
+
   it("of a session with its own zero count from that", () => {
     const again = { no: 0, session: 2, positions: { W1: [25, 4, 5] as const, W2: [35, 4, 5] as const } };
     const then = { no: 1, session: 2, positions: { W1: [25, 4, 5] as const, W2: [35, 12, 5] as const } };
@@ -36,8 +44,8 @@ describe("moments of the moves", () => {
     const battens = [0, 1].map((move) => ({ id: `${move}`, move, session: 2, station: "A", mode: "settled" as const, valuesMm: [1] }));
     const moments = promised(shiftsOf({ ...test, readings: { ...test.readings, battens } }));
     expect(moments).toEqual([
-      { no: 0, session: 2, athwart: 0, upward: 0 },
-      { no: 1, session: 2, athwart: 80, upward: 0 },
+      { no: 0, session: 2, athwart: 0, upward: 0, along: 0 },
+      { no: 1, session: 2, athwart: 80, upward: 0, along: 0 },
     ]);
   });
 

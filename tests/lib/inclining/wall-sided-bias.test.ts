@@ -9,7 +9,7 @@ const { record } = skerryTern();
 const ship = promised(incliningTest({ ...record, readings: skerryTernReadings(7) }));
 
 function lineWith(heels: readonly number[]): MomentTangentLine {
-  const moves = heels.map((tanHeel, no): MoveOnLine => ({ no, session: 1, moment: 0, tanHeel, residual: 0, stations: 1 }));
+  const moves = heels.map((tanHeel, no): MoveOnLine => ({ no, session: 1, moment: 0, along: 0, tanHeel, residual: 0, stations: 1 }));
   return { ...ship.line, moves };
 }
 

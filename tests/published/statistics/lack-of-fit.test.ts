@@ -27,6 +27,7 @@ it("a load cell's straight line lacks fit as NIST found", () => {
     no,
     session: 1,
     moment,
+    along: 0,
     tanHeel: deflections[no] as number,
     residual: fit.residuals[no] as number,
     stations: 1,
