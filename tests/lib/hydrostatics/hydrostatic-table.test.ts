@@ -1,6 +1,8 @@
-import { describe, expect, it } from "vitest";
+import { describe, expect, it, test } from "vitest";
+import { skerryTern } from "@/db/seed/skerry-tern";
 import type { Waterplane } from "@/lib/frame";
-import { tableHydrostatics } from "@/lib/hydrostatics/hydrostatic-table";
+import { hullFromOffsets } from "@/lib/hydrostatics/hull";
+import { type HydrostaticTable, tableHydrostatics } from "@/lib/hydrostatics/hydrostatic-table";
 import { hydrostaticsAt } from "@/lib/hydrostatics/hydrostatics-at";
 import { type Waterline, waterlineFromMarks } from "@/lib/hydrostatics/waterline";
 import { promised } from "@/lib/result";
@@ -94,3 +96,54 @@ describe("hydrostatics from a table", () => {
 function at(plane: Waterplane): Waterline {
   return promised(waterlineFromMarks({ lbp, draftMarks: sixMarks, drafts: readingsAt(plane) }));
 }
+
+/** The demo's ship: flare, a transom that dips, a rising forefoot. */
+describe("a table of a ship's own hull against her offsets", () => {
+  const { record } = skerryTern();
+  const ship = promised(hullFromOffsets(record.hydrostatics.kind === "offsets" ? record.hydrostatics : { sections: [] }));
+  const { lbp: length } = record.vessel;
+  const keys = ["volume", "lcb", "vcb", "lcf", "waterplaneArea", "kmt", "kml"] as const;
+  const drafts = (step: number) => Array.from({ length: Math.round(1.6 / step) + 1 }, (_, i) => 2.4 + step * i);
+  const trims = (step: number) => Array.from({ length: Math.round(2 / step) + 1 }, (_, i) => -1 + step * i);
+  // amidships, between the lines of every table below
+  const lies = [2.83, 3.17, 3.61].flatMap((draft) => [-0.83, 0.29, 0.71].map((trim) => ({ draft, trim })));
+  const planeOf = ({ draft, trim }: { draft: number; trim: number }) => planeAt(draft + trim / 2, length, { slopeAlong: -trim / length });
+
+  test("with several trims it is off by what linear interpolation is, and a table twice as close by a quarter of it", () => {
+    const [wide, close] = [0.2, 0.1].map((step) => tableOf(ship, length, drafts(step), trims(2.5 * step)));
+    for (const key of keys) {
+      const [far, near] = [wide, close].map((table) => Math.max(...lies.map((lie) => offBy(key, table, lie))));
+      expect(far, key).toBeLessThanOrEqual(spacingExplains(key, 0.2, 0.5));
+      expect(near, key).toBeLessThanOrEqual(spacingExplains(key, 0.1, 0.25));
+    }
+  });
+
+  test("with one trim and the corrections for it the volume is off by terms of third order in trim only", () => {
+    const table = tableOf(ship, length, drafts(0.05));
+    const worst = (trim: number) => Math.max(...[2.83, 3.17, 3.61].map((draft) => offBy("volume", table, { draft, trim }) / 1450));
+    expect(worst(0.5)).toBeLessThan(worst(1) / 4 + 2e-5);
+    expect(worst(0.5)).toBeLessThan(2e-4);
+  });
+
+  function offBy(key: (typeof keys)[number], table: HydrostaticTable | undefined, lie: { draft: number; trim: number }): number {
+    const plane = planeOf(lie);
+    const found = promised(tableHydrostatics(table ?? { rows: [] }, { plane }));
+    return Math.abs(found[key] - promised(hydrostaticsAt(ship, plane))[key]);
+  }
+
+  /** Of a linear interpolation the error is at most h²/8·|f″| in each direction; f″ by differences over the hull itself, half as wide. */
+  function spacingExplains(key: (typeof keys)[number], step: number, stepOfTrim: number): number {
+    const f = (draft: number, trim: number) => promised(hydrostaticsAt(ship, planeOf({ draft, trim })))[key];
+    const bends = drafts(0.1)
+      .slice(1, -1)
+      .flatMap((draft) =>
+        [-0.75, -0.5, -0.25, 0, 0.25, 0.5, 0.75].map((trim) => {
+          const here = f(draft, trim);
+          const inDraft = Math.abs(f(draft + 0.05, trim) - 2 * here + f(draft - 0.05, trim)) / 0.05 ** 2;
+          const inTrim = Math.abs(f(draft, trim + 0.125) - 2 * here + f(draft, trim - 0.125)) / 0.125 ** 2;
+          return (inDraft * step ** 2 + inTrim * stepOfTrim ** 2) / 8;
+        }),
+      );
+    return Math.max(...bends);
+  }
+});
