@@ -34,7 +34,7 @@ export function liquidInBox({ x, y, z }: TankBox, volume: number, tanHeel: numbe
   if (area >= whole) return { tcg: middle, vcg: (z[0] + z[1]) / 2, surfaceInertia: 0 };
   const tilt = (Math.abs(tanHeel) * (y[1] - y[0])) / 2;
   const below = (height: number) => polygonBelowLine(walls, height - tanHeel * middle, tanHeel);
-  const height = rootBetween((each) => polygonMoments(below(each)).area - area, z[0] - tilt, z[1] + tilt, 1e-13);
+  const height = rootBetween((each) => polygonMoments(below(each)).area - area, z[0] - tilt, z[1] + tilt, 1e-12);
   if (!height.ok) return { tcg: middle, vcg: z[0], surfaceInertia: 0 };
   const [tcg, vcg] = polygonCentroid(below(height.value)) ?? [middle, z[0]];
   const breadth = surfaceBreadth(y, z, height.value - tanHeel * middle, tanHeel);

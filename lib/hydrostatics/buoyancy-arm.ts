@@ -5,8 +5,13 @@ import type { Hull } from "./hull";
 /** Where the line of buoyancy stands at a heel: y_B + c·z_B [m], and how it changes with c = tan(heel). */
 export type ArmAt = { readonly tanHeel: number; readonly arm: number; readonly slope: number };
 
-/** The arm over a range of heels. */
-export type BuoyancyArm = { readonly at: (tanHeel: number) => ArmAt; readonly from: number; readonly to: number };
+/** The arm over a range of heels, and the nodes it runs through. */
+export type BuoyancyArm = {
+  readonly at: (tanHeel: number) => ArmAt;
+  readonly from: number;
+  readonly to: number;
+  readonly nodes: readonly ArmAt[];
+};
 
 type Held = Afloat & { readonly volume: number; readonly lcg: number; readonly vcg: number };
 
@@ -37,7 +42,7 @@ export function buoyancyArm(hull: Hull, held: Held, from: number, to: number, no
 /** An arm through nodes in the order of their heels: cubics between them, straight on beyond. */
 export function armThrough(nodes: readonly ArmAt[]): BuoyancyArm {
   const [first, last] = [nodes[0] as ArmAt, nodes.at(-1) as ArmAt];
-  return { from: first.tanHeel, to: last.tanHeel, at: (tanHeel) => between(nodes, tanHeel) };
+  return { from: first.tanHeel, to: last.tanHeel, nodes, at: (tanHeel) => between(nodes, tanHeel) };
 }
 
 // outside the range the last slope goes on: a search may look there on its way

@@ -1,9 +1,9 @@
-import { type BuoyancyArm, buoyancyArm } from "@/lib/hydrostatics/buoyancy-arm";
+import { type ArmAt, armThrough, type BuoyancyArm, buoyancyArm } from "@/lib/hydrostatics/buoyancy-arm";
 import { type Hull, hullFromOffsets } from "@/lib/hydrostatics/hull";
 import { sum } from "@/lib/numerics/sum";
 import { generalisedVcg, heelAtRest } from "./generalised-fit";
 import type { AsInclined, MomentTangentLine } from "./inclined-ship";
-import { armWithLiquids } from "./liquid-arm";
+import { armWithLiquids, beyondFreeSurface } from "./liquid-arm";
 import type { Liquid } from "./liquids";
 import type { ShipAfloat } from "./ship-afloat";
 import type { HydrostaticSource, IncliningTestData } from "./test-data";
@@ -70,10 +70,14 @@ type Arms = {
 
 function withLiquids(arms: Arms, liquids: readonly Liquid[], displacement: { drafts: number; moves: number }): Arms {
   const { atDrafts, atMoves, alongMoves, alongBy } = arms;
+  const moments = beyondFreeSurface(
+    liquids,
+    atMoves.nodes.map(({ tanHeel }) => tanHeel),
+  );
   return {
-    atDrafts: armWithLiquids(atDrafts, liquids, displacement.drafts),
-    atMoves: armWithLiquids(atMoves, liquids, displacement.moves),
-    alongMoves: alongMoves && armWithLiquids(alongMoves, liquids, displacement.moves),
+    atDrafts: armWithLiquids(atDrafts, moments, displacement.drafts),
+    atMoves: armWithLiquids(atMoves, moments, displacement.moves),
+    alongMoves: alongMoves && armWithLiquids(alongMoves, moments, displacement.moves),
     alongBy,
   };
 }
@@ -82,13 +86,12 @@ function withLiquids(arms: Arms, liquids: readonly Liquid[], displacement: { dra
 function armShifted({ atMoves, alongMoves, alongBy }: Arms, shift: number): BuoyancyArm {
   if (alongMoves === null || shift === 0) return atMoves;
   const share = shift / alongBy;
-  return {
-    ...atMoves,
-    at: (tanHeel) => {
-      const [here, there] = [atMoves.at(tanHeel), alongMoves.at(tanHeel)];
-      return { tanHeel, arm: here.arm + share * (there.arm - here.arm), slope: here.slope + share * (there.slope - here.slope) };
-    },
-  };
+  return armThrough(
+    atMoves.nodes.map(({ tanHeel, arm, slope }, i) => {
+      const there = alongMoves.nodes[i] as ArmAt;
+      return { tanHeel, arm: arm + share * (there.arm - arm), slope: slope + share * (there.slope - slope) };
+    }),
+  );
 }
 
 type Given = { readonly fluid: number; readonly classical: AsInclined; readonly states: States };

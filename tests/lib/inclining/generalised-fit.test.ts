@@ -9,6 +9,7 @@ const z0 = 1;
 const wallSided: BuoyancyArm = {
   from: -0.2,
   to: 0.2,
+  nodes: [],
   at: (tanHeel) => ({ tanHeel, arm: (bm + z0) * tanHeel + (bm / 2) * tanHeel ** 3, slope: bm + z0 + 1.5 * bm * tanHeel ** 2 }),
 };
 const moments = [0, 48, 96, 48, 0, -48, -96, -48, 0];
