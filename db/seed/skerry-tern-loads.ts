@@ -1,12 +1,13 @@
+import type { TankBox } from "@/lib/hydrostatics/box-liquid";
+import { boxTankTable } from "@/lib/hydrostatics/box-tank";
 import type { TestRecord } from "@/lib/record/test-record";
-import { type Box, boxTankTable } from "./box-tank";
 
 /** Nine tanks with upright walls: fuel in the double bottom is the one slack pair; the others are pressed full or empty. */
 export function skerryTernTanks(): TestRecord["tanks"] {
   return tanks.map(({ box, ...tank }) => ({ ...tank, measure: "sounding", table: boxTankTable(box), box: walls(box) }));
 }
 
-function walls({ x, y, z }: Box): NonNullable<TestRecord["tanks"][number]["box"]> {
+function walls({ x, y, z }: TankBox): NonNullable<TestRecord["tanks"][number]["box"]> {
   return { x: [...x], y: [...y], z: [...z] };
 }
 
@@ -28,7 +29,7 @@ export const skerryTernLoads: Pick<TestRecord, "aboard" | "items"> = {
   ],
 };
 
-type BoxTank = Pick<TestRecord["tanks"][number], "id" | "contents" | "density" | "kind"> & { readonly box: Box };
+type BoxTank = Pick<TestRecord["tanks"][number], "id" | "contents" | "density" | "kind"> & { readonly box: TankBox };
 
 const tanks: readonly BoxTank[] = [
   { id: "FW-P", contents: "fresh water", density: 1, kind: "deep", box: { x: [8, 13], y: [-5, -2.5], z: [1.6, 4] } },

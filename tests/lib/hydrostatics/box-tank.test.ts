@@ -1,5 +1,5 @@
 import { describe, expect, it } from "vitest";
-import { boxTankTable } from "@/db/seed/box-tank";
+import { boxTankTable } from "@/lib/hydrostatics/box-tank";
 import { tankContents } from "@/lib/hydrostatics/tank";
 import { promised } from "@/lib/result";
 
