@@ -28,7 +28,7 @@ export default defineConfig({
           testTimeout: 30_000,
         },
       },
-      { extends: true, test: { name: "components", environment: "happy-dom", include: ["tests/components/**/*.test.tsx"] } },
+      { extends: true, test: { name: "components", environment: "happy-dom", include: ["tests/components/**/*.test.{ts,tsx}"] } },
     ],
   },
 });
