@@ -84,6 +84,7 @@ function simulated(sections: Sections, { aft, starboard, sag }: Lie, { forward, 
   return { result: promised(incliningResult(read)), read, truth };
 }
 
+// trims from 0.4 % of her length by the head to 3.8 % by the stern, lists from 2.5° to port to 1.8° to starboard
 describe.each(Object.entries(hulls))("%s, read without noise", (_, sections) => {
   test.each([
     { aft: 0, starboard: 0, sag: 0 },
@@ -96,7 +97,6 @@ describe.each(Object.entries(hulls))("%s, read without noise", (_, sections) => 
   });
 });
 
-// trims from 0.5 % by the head to 3.8 % by the stern, lists from 1.5° to port to 1.8° to starboard
 test.each([
   { aft: 0, starboard: 0, sag: 0 },
   { aft: 1.4, starboard: 0.03, sag: 0.04 },
