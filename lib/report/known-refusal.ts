@@ -23,6 +23,8 @@ import type { RankDeficient, TooFewRows } from "@/lib/numerics/least-squares";
 import type { NoSpread, TooFewPoints } from "@/lib/numerics/linear-fit";
 import type { NoSignChange } from "@/lib/numerics/root";
 import type { RecordFault } from "@/lib/record/record-faults";
+import type { UploadRefusal } from "@/lib/spreadsheet/uploaded-sheets";
+import type { SheetFault } from "@/lib/vessel/sheet-faults";
 
 export type NumericsRefusal = TooFewPoints | NoSpread | TooFewRows | RankDeficient | OutsideTable | NoSignChange;
 
@@ -50,7 +52,7 @@ export type InclinedRefusal =
   | NoRestExpected
   | NothingLeft;
 
-export type KnownRefusal = NumericsRefusal | FloatingRefusal | InclinedRefusal | RecordFault;
+export type KnownRefusal = NumericsRefusal | FloatingRefusal | InclinedRefusal | RecordFault | UploadRefusal | SheetFault;
 
 /** A clause for each refusal of a kind, without capital and full stop: it also stands behind a path. */
 export type Clauses<R extends { readonly type: string }> = {

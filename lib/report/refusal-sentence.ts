@@ -4,8 +4,16 @@ import { inclinedClauses } from "./inclined-clauses";
 import type { Clauses, KnownRefusal } from "./known-refusal";
 import { numericsClauses } from "./numerics-clauses";
 import { recordClauses } from "./record-clauses";
+import { sheetClauses, uploadClauses } from "./sheet-clauses";
 
-const clauses: Clauses<KnownRefusal> = { ...numericsClauses, ...floatingClauses, ...inclinedClauses, ...recordClauses };
+const clauses: Clauses<KnownRefusal> = {
+  ...numericsClauses,
+  ...floatingClauses,
+  ...inclinedClauses,
+  ...recordClauses,
+  ...uploadClauses,
+  ...sheetClauses,
+};
 
 /** What was refused and why, as one plain sentence. */
 export function refusalSentence(refusal: Refusal): string {

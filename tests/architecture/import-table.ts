@@ -19,6 +19,7 @@ export const importTable: readonly TableRow[] = [
   { part: "lib/people", mayImport: ["lib"] },
   { part: "lib/spreadsheet", mayImport: ["lib"] },
   { part: "lib/sync", mayImport: [...method, "lib/record", "lib/ledger"] },
+  { part: "lib/vessel", mayImport: [...method, "lib/record", "lib/spreadsheet"] },
   { part: "lib/report", mayImport: ["lib/*"] },
   { part: "db/schema", mayImport: ["lib/*"] },
   { part: "db/device", mayImport: ["lib/*"] },

@@ -6,6 +6,7 @@ import type { KnownRefusal } from "@/lib/report/known-refusal";
 import { refusalLine, refusalSentence } from "@/lib/report/refusal-sentence";
 
 const m = { lowest: 1, highest: 4 };
+const inSheet = { sheet: "Tanks", cell: "C14", column: "Volume" };
 
 /** One refusal of every type; the mapped type fails to compile where one is missing. */
 const everyRefusal: { readonly [Type in KnownRefusal["type"]]: Extract<KnownRefusal, { readonly type: Type }> } = {
@@ -69,6 +70,30 @@ const everyRefusal: { readonly [Type in KnownRefusal["type"]]: Extract<KnownRefu
   UnknownReference: { type: "UnknownReference", kind: "move", name: "9", path: "readings.battens[0].move" },
   SoundingWithoutPlace: { type: "SoundingWithoutPlace", given: "both", path: "readings.soundings[0]" },
   NotBallast: { type: "NotBallast", tank: "FO", path: "readings.soundings[0].move" },
+  FileTooLarge: { type: "FileTooLarge", got: 20 * 1024 * 1024, most: 5 * 1024 * 1024 },
+  EmptyFile: { type: "EmptyFile" },
+  NotASpreadsheet: { type: "NotASpreadsheet", kind: "program" },
+  NotAWorkbook: { type: "NotAWorkbook", holds: "open-document" },
+  BrokenWorkbook: { type: "BrokenWorkbook", part: "xl/workbook.xml" },
+  WorkbookUnpacksTooLarge: { type: "WorkbookUnpacksTooLarge", got: 9e8, most: 6e7 },
+  BrokenCsv: { type: "BrokenCsv", line: 7 },
+  SheetTooLarge: { type: "SheetTooLarge", sheet: "Tanks", cell: "A20001" },
+  EmptyCell: { type: "EmptyCell", ...inSheet },
+  NotANumber: { type: "NotANumber", given: "abc", ...inSheet },
+  OtherDecimalMark: { type: "OtherDecimalMark", given: "1,5", mark: "point", ...inSheet },
+  FormulaCell: { type: "FormulaCell", formula: "=A1*2", ...inSheet },
+  ErrorCell: { type: "ErrorCell", error: "#N/A", ...inSheet },
+  DateCell: { type: "DateCell", ...inSheet },
+  ColumnMissing: { type: "ColumnMissing", ...inSheet },
+  RowsMissing: { type: "RowsMissing", got: 1, needed: 2, ...inSheet },
+  OutOfLimits: { type: "OutOfLimits", value: -1, limit: "above 0", ...inSheet },
+  OutOfOrder: { type: "OutOfOrder", value: 0.4, before: 0.5, order: "rise", ...inSheet },
+  NotAbove: { type: "NotAbove", value: 1, other: "KB", than: 2, ...inSheet },
+  TooManyWords: { type: "TooManyWords", got: 80, most: 60, ...inSheet },
+  RepeatedInSheet: { type: "RepeatedInSheet", what: "level", first: "A3", ...inSheet },
+  SectionInTwoPlaces: { type: "SectionInTwoPlaces", x: 12, first: "A3", ...inSheet },
+  HullInSheet: { type: "HullInSheet", because: { type: "EmptySection", x: 10 }, ...inSheet },
+  TankInSheet: { type: "TankInSheet", because: { type: "FreeSurfaceUnknown", tank: "FO", level: 1 }, ...inSheet },
 };
 
 describe("refusals in words", () => {
@@ -76,6 +101,13 @@ describe("refusals in words", () => {
     const sentence = refusalSentence(refusal);
     expect(sentence).toMatch(/^[A-Z0−\d].{10,}[^.]\.$/);
     expect(sentence).not.toMatch(/undefined|NaN|\[object|the data do not allow/);
+  });
+
+  it("name the sheet and the cell they are about, or the cell alone where it was typed", () => {
+    expect(refusalSentence(everyRefusal.NotANumber)).toBe("Sheet “Tanks”, cell C14: “abc” is not a number (Volume).");
+    expect(refusalSentence({ ...everyRefusal.OutOfOrder, sheet: "" } as KnownRefusal)).toBe(
+      "Cell C14: 0.4 comes after 0.5, but must rise from row to row (Volume).",
+    );
   });
 
   it("carry the numbers that caused them", () => {
